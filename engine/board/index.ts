@@ -1,0 +1,3 @@
+export * from './squares';
+export * from './square-set';
+export * from './position';

@@ -1,0 +1,3 @@
+export * from './basics';
+export * from './reading';
+export * from './statement';
