@@ -1,0 +1,2 @@
+export * from './attack-map';
+export * from './queries';
