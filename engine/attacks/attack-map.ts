@@ -6,15 +6,16 @@
  * Attackers are those of the Laws of Chess (FIDE, article 3.1): a pinned man still attacks.
  */
 import {
+  EDGES,
   KING_STEPS,
   KNIGHT_LEAPS,
   LEAP_ROW,
   NEIGHBOURS,
-  PAWN_STRIKES,
   type Position,
   RAY_ROW,
   RAYS,
-  STRIKE_ROW,
+  
+  STRIDES,
 } from '../board';
 
 /** Places of the kinds in a man's code (`code & 7`). */
@@ -40,12 +41,16 @@ export interface AttackMap {
   readonly numbers: Int8Array;
   /** Mask of the men of a side that attack a square: entry (side << 6 | square). */
   readonly attackers: Int32Array;
-  /** First man in a direction: entry (square << 3 | direction), -1 where the line is empty to the edge. */
-  readonly firstMan: Int8Array;
   /** King's square of each side, -1 in diagrams without one. */
   readonly kings: Int8Array;
-  /** Mask of each side's absolutely pinned men. */
+  /** Mask of each side's absolutely pinned men, see `pinnedMask`. */
   readonly pinned: Int32Array;
+  /** Whether `pinned` has been filled for this position. */
+  pinsKnown: boolean;
+  /** First man in a direction, see `firstMen`: entry (square << 3 | direction), -1 where the line is empty to the edge. */
+  readonly lines: Int8Array;
+  /** Whether `lines` has been filled for this position. */
+  lined: boolean;
 }
 
 /** Empty tables, to be filled by `attackMap` again and again. */
@@ -56,106 +61,127 @@ export function newAttackMap(): AttackMap {
     squares: new Uint8Array(64),
     numbers: new Int8Array(64),
     attackers: new Int32Array(128),
-    firstMan: new Int8Array(512),
     kings: new Int8Array(2),
     pinned: new Int32Array(2),
+    pinsKnown: false,
+    lines: new Int8Array(512),
+    lined: false,
   };
 }
 
 /** The attack map of a position; `into` gives the tables to fill, so that bulk work allocates nothing. */
-export function attackMap(position: Position, into: AttackMap = newAttackMap()): AttackMap {
+export function attackMap(position: Pick<Position, 'board'>, into: AttackMap = newAttackMap()): AttackMap {
   into.board = position.board;
-  into.attackers.fill(0);
-  numberMen(into);
-  fillFirstMen(into);
+  into.lined = false;
+  into.pinsKnown = false;
   fillAttackers(into);
-  fillPins(into);
   return into;
 }
 
-const placeOf = new Uint8Array(16);
+const tally = new Uint8Array(16);
+/** Squares by the code of the man on them: entry (code << 6 | count so far). */
+const buckets = new Uint8Array(16 << 6);
 
-function numberMen(map: AttackMap): void {
-  const { board, counts, squares, numbers, kings } = map;
-  placeOf.fill(0);
-  kings[0] = -1;
-  kings[1] = -1;
-  for (let square = 63; square >= 0; square--) {
-    const code = board[square] as number;
-    if (code === 0) continue;
-    placeOf[code]!++;
-    if ((code & 7) === KING) kings[code >> 3] = square;
-  }
-  for (let side = 0; side < 2; side++) {
-    let next = 0;
-    for (let kind = PAWN; kind <= KING; kind++) {
-      const count = placeOf[(side << 3) | kind] as number;
-      placeOf[(side << 3) | kind] = next;
-      next += count;
-    }
-    counts[side] = next;
-  }
+/** One pass sorts the men by code, a second numbers them in order of worth and marks what each attacks. */
+function fillAttackers(map: AttackMap): void {
+  const { board, numbers, attackers } = map;
+  attackers.fill(0);
+  numbers.fill(-1);
+  tally.fill(0);
   for (let square = 0; square < 64; square++) {
-    const code = board[square] as number;
-    if (code === 0) {
-      numbers[square] = -1;
-      continue;
-    }
-    const number = placeOf[code]!++;
-    numbers[square] = number;
-    squares[((code >> 3) << 5) | number] = square;
+    const code = board[square]!;
+    if (code !== 0) buckets[(code << 6) | tally[code]!++] = square;
   }
+  fillSide(map, 0);
+  fillSide(map, 8);
 }
 
-/** North, east and the two upward diagonals are filled from the top, the others from the bottom. */
-function fillFirstMen({ board, firstMan }: AttackMap): void {
-  for (let square = 63; square >= 0; square--) {
-    const row = square << 3;
-    fillFirstMan(board, firstMan, row, 0);
-    fillFirstMan(board, firstMan, row, 2);
-    fillFirstMan(board, firstMan, row, 4);
-    fillFirstMan(board, firstMan, row, 7);
-  }
-  for (let square = 0; square < 64; square++) {
-    const row = square << 3;
-    fillFirstMan(board, firstMan, row, 1);
-    fillFirstMan(board, firstMan, row, 3);
-    fillFirstMan(board, firstMan, row, 5);
-    fillFirstMan(board, firstMan, row, 6);
-  }
-}
-
-function fillFirstMan(board: Readonly<Uint8Array>, firstMan: Int8Array, row: number, direction: number): void {
-  const next = NEIGHBOURS[row | direction] as number;
-  firstMan[row | direction] = next < 0 ? -1 : board[next] !== 0 ? next : (firstMan[(next << 3) | direction] as number);
-}
-
-function fillAttackers({ board, counts, squares, attackers }: AttackMap): void {
-  for (let side = 0; side < 2; side++) {
-    const offset = side << 6;
-    const count = counts[side] as number;
-    for (let number = 0; number < count; number++) {
-      const from = squares[(side << 5) | number] as number;
-      const bit = 1 << number;
-      const kind = (board[from] as number) & 7;
-      if (kind === PAWN) {
-        for (let at = (offset | from) * STRIKE_ROW, to = PAWN_STRIKES[at]!; to >= 0; to = PAWN_STRIKES[++at]!) {
-          attackers[offset | to]! |= bit;
-        }
-      } else if (kind === KNIGHT || kind === KING) {
-        const table = kind === KNIGHT ? KNIGHT_LEAPS : KING_STEPS;
-        for (let at = from * LEAP_ROW, to = table[at]!; to >= 0; to = table[++at]!) attackers[offset | to]! |= bit;
-      } else {
-        const last = kind === ROOK ? 4 : 8;
-        for (let direction = kind === BISHOP ? 4 : 0; direction < last; direction++) {
-          for (let at = ((from << 3) | direction) * RAY_ROW, to = RAYS[at]!; to >= 0; to = RAYS[++at]!) {
-            attackers[offset | to]! |= bit;
-            if (board[to] !== 0) break;
-          }
-        }
+/** `white` is 0, `black` 8: what is added to a kind's place to give the code. */
+function fillSide({ board, counts, squares, numbers, attackers, kings }: AttackMap, sideCode: number): void {
+  const side = sideCode >> 3;
+  const offset = side << 6;
+  const row = side << 5;
+  let number = 0;
+  for (let kind = PAWN; kind <= KING; kind++) {
+    const code = sideCode | kind;
+    const end = tally[code]!;
+    for (let i = 0; i < end; i++) {
+      const from = buckets[(code << 6) | i]!;
+      numbers[from] = number;
+      squares[row | number] = from;
+      const bit = 1 << number++;
+      if (kind === PAWN) markPawn(attackers, offset, from, bit);
+      else if (kind === KNIGHT) markLeaps(attackers, offset, KNIGHT_LEAPS, from, bit);
+      else if (kind === KING) markLeaps(attackers, offset, KING_STEPS, from, bit);
+      else {
+        if (kind !== BISHOP) markLines(attackers, board, offset, from, bit, 0);
+        if (kind !== ROOK) markLines(attackers, board, offset, from, bit, 4);
       }
     }
   }
+  counts[side] = number;
+  const kingCode = sideCode | KING;
+  kings[side] = tally[kingCode]! > 0 ? buckets[kingCode << 6]! : -1;
+}
+
+function markPawn(attackers: Int32Array, offset: number, from: number, bit: number): void {
+  const ahead = offset === 0 ? from + 8 : from - 8;
+  if (ahead < 0 || ahead > 63) return;
+  const file = from & 7;
+  if (file > 0) attackers[offset | (ahead - 1)]! |= bit;
+  if (file < 7) attackers[offset | (ahead + 1)]! |= bit;
+}
+
+function markLeaps(attackers: Int32Array, offset: number, leaps: Readonly<Int8Array>, from: number, bit: number): void {
+  for (let at = from * LEAP_ROW, to = leaps[at]!; to >= 0; to = leaps[++at]!) attackers[offset | to]! |= bit;
+}
+
+/** Marks the four lines of a rook (`first` 0) or bishop (`first` 4). */
+function markLines(
+  attackers: Int32Array,
+  board: Readonly<Uint8Array>,
+  offset: number,
+  from: number,
+  bit: number,
+  first: number,
+): void {
+  for (let direction = first; direction < first + 4; direction++) {
+    const stride = STRIDES[direction]!;
+    const edge = EDGES[(from << 3) | direction]!;
+    for (let to = from; to !== edge; ) {
+      to += stride;
+      attackers[offset | to]! |= bit;
+      if (board[to] !== 0) break;
+    }
+  }
+}
+
+/** The table of first men in every direction, filled on first use: entry (square << 3 | direction), -1 where there is none. */
+export function firstMen(map: AttackMap): Readonly<Int8Array> {
+  if (map.lined) return map.lines;
+  const { board, lines } = map;
+  // North, east and the two directions that go up are filled from the top, the others from the bottom.
+  for (let square = 63; square >= 0; square--) {
+    const row = square << 3;
+    fillFirstMan(board, lines, row);
+    fillFirstMan(board, lines, row | 2);
+    fillFirstMan(board, lines, row | 4);
+    fillFirstMan(board, lines, row | 7);
+  }
+  for (let square = 0; square < 64; square++) {
+    const row = square << 3;
+    fillFirstMan(board, lines, row | 1);
+    fillFirstMan(board, lines, row | 3);
+    fillFirstMan(board, lines, row | 5);
+    fillFirstMan(board, lines, row | 6);
+  }
+  map.lined = true;
+  return lines;
+}
+
+function fillFirstMan(board: Readonly<Uint8Array>, lines: Int8Array, entry: number): void {
+  const next = NEIGHBOURS[entry]!;
+  lines[entry] = next < 0 ? -1 : board[next] !== 0 ? next : lines[(next << 3) | (entry & 7)]!;
 }
 
 /** Whether a man's code moves along a direction of the rook (0 to 3) or bishop (4 to 7). */
@@ -164,18 +190,36 @@ export function slidesAlong(code: number, direction: number): boolean {
   return kind === QUEEN || kind === (direction < 4 ? ROOK : BISHOP);
 }
 
-function fillPins({ board, firstMan, kings, numbers, pinned }: AttackMap): void {
+/** First man met from a square in a direction by walking the board; -1 where there is none. */
+function walk(board: Readonly<Uint8Array>, from: number, direction: number): number {
+  const stride = STRIDES[direction]!;
+  const edge = EDGES[(from << 3) | direction]!;
+  for (let to = from; to !== edge; ) {
+    to += stride;
+    if (board[to] !== 0) return to;
+  }
+  return -1;
+}
+
+/** Mask of a side's absolutely pinned men, found on first use. */
+export function pinnedMask(map: AttackMap, side: SideIndex): number {
+  if (!map.pinsKnown) fillPins(map);
+  map.pinsKnown = true;
+  return map.pinned[side]!;
+}
+
+function fillPins({ board, kings, numbers, pinned }: AttackMap): void {
   for (let side = 0; side < 2; side++) {
-    const king = kings[side] as number;
+    const king = kings[side]!;
     let mask = 0;
     if (king >= 0) {
       for (let direction = 0; direction < 8; direction++) {
-        const front = firstMan[(king << 3) | direction] as number;
-        if (front < 0 || (board[front] as number) >> 3 !== side) continue;
-        const pinner = firstMan[(front << 3) | direction] as number;
+        const front = walk(board, king, direction);
+        if (front < 0 || board[front]! >> 3 !== side) continue;
+        const pinner = walk(board, front, direction);
         if (pinner < 0) continue;
-        const code = board[pinner] as number;
-        if (code >> 3 !== side && slidesAlong(code, direction)) mask |= 1 << (numbers[front] as number);
+        const code = board[pinner]!;
+        if (code >> 3 !== side && slidesAlong(code, direction)) mask |= 1 << numbers[front]!;
       }
     }
     pinned[side] = mask;
@@ -184,18 +228,19 @@ function fillPins({ board, firstMan, kings, numbers, pinned }: AttackMap): void 
 
 /** Mask of a side's men that stand behind an attacker of the square: see `behind` in the queries. */
 export function behindMask(map: AttackMap, side: SideIndex, square: number): number {
-  const { board, firstMan, numbers, attackers } = map;
+  const { board, numbers, attackers } = map;
+  const lines = firstMen(map);
   const direct = attackers[(side << 6) | square] as number;
   let mask = 0;
   if (direct === 0) return 0;
   for (let direction = 0; direction < 8; direction++) {
-    const front = firstMan[(square << 3) | direction] as number;
+    const front = lines[(square << 3) | direction] as number;
     if (front < 0) continue;
     const code = board[front] as number;
     if (code >> 3 !== side) continue;
     if (!slidesAlong(code, direction) && (code & 7) !== PAWN) continue;
     if (((direct >>> (numbers[front] as number)) & 1) === 0) continue;
-    for (let next = firstMan[(front << 3) | direction]!; next >= 0; next = firstMan[(next << 3) | direction]!) {
+    for (let next = lines[(front << 3) | direction]!; next >= 0; next = lines[(next << 3) | direction]!) {
       const behind = board[next] as number;
       if (behind >> 3 !== side || !slidesAlong(behind, direction)) break;
       mask |= 1 << (numbers[next] as number);
@@ -209,8 +254,8 @@ export function isHeldFrom(map: AttackMap, side: SideIndex, from: number, square
   const king = map.kings[side] as number;
   if (king < 0 || king === square) return false;
   for (let direction = 0; direction < 8; direction++) {
-    if (map.firstMan[(king << 3) | direction] !== from) continue;
-    const pinner = map.firstMan[(from << 3) | direction] as number;
+    if (firstMen(map)[(king << 3) | direction] !== from) continue;
+    const pinner = firstMen(map)[(from << 3) | direction] as number;
     if (square === pinner) return false;
     for (let at = ((king << 3) | direction) * RAY_ROW, to = RAYS[at]!; to >= 0 && to !== pinner; to = RAYS[++at]!) {
       if (to === square) return false;

@@ -1,6 +1,6 @@
 /** Questions to the attack map in the words of the game. Lists run cheapest man first. */
 import { KINDS, type Kind, type Side, type Square } from '../types';
-import { type AttackMap, behindMask, isHeldFrom, type SideIndex } from './attack-map';
+import { type AttackMap, behindMask, isHeldFrom, pinnedMask, type SideIndex } from './attack-map';
 
 /** 0 for White, 1 for Black. */
 export function sideIndex(side: Side): SideIndex {
@@ -33,7 +33,7 @@ export function isAttacked(map: AttackMap, side: Side, square: Square): boolean 
 /** Attackers of the square that an absolute pin keeps from capturing there. */
 export function heldFrom(map: AttackMap, side: Side, square: Square): Square[] {
   const index = sideIndex(side);
-  const pinned = attackerMask(map, side, square) & (map.pinned[index] as number);
+  const pinned = attackerMask(map, side, square) & pinnedMask(map, index);
   return pinned === 0 ? [] : menOfMask(map, side, pinned).filter((from) => isHeldFrom(map, index, from, square));
 }
 
@@ -48,7 +48,7 @@ export function behind(map: AttackMap, side: Side, square: Square): Square[] {
 /** Whether the man on the square is absolutely pinned. */
 export function isPinned(map: AttackMap, square: Square): boolean {
   const code = map.board[square] as number;
-  return code !== 0 && (((map.pinned[code >> 3] as number) >>> (map.numbers[square] as number)) & 1) === 1;
+  return code !== 0 && ((pinnedMask(map, (code >> 3) as SideIndex) >>> (map.numbers[square] as number)) & 1) === 1;
 }
 
 /** Kind of the man on an occupied square. Throws on an empty one: the caller knows who stands where. */

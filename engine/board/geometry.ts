@@ -61,6 +61,15 @@ export const RAYS: Readonly<Int8Array> = (() => {
 /** Next square in a direction: entry (square << 3 | direction), -1 off the board. */
 export const NEIGHBOURS: Readonly<Int8Array> = Int8Array.from({ length: 512 }, (_, row) => RAYS[row * RAY_ROW] ?? -1);
 
+/** What a step in a direction adds to a square's number. */
+export const STRIDES: Readonly<Int8Array> = Int8Array.from(DIRECTIONS, ([files, ranks]) => files + 8 * ranks);
+
+/** Last square in a direction, the square itself where there is none: entry (square << 3 | direction). */
+export const EDGES: Readonly<Int8Array> = Int8Array.from({ length: 512 }, (_, row) => {
+  const ray = RAYS.subarray(row * RAY_ROW, (row + 1) * RAY_ROW);
+  return ray[ray.indexOf(-1) - 1] ?? row >> 3;
+});
+
 /** Direction from one square to another on the same line: entry (from << 6 | to), -1 where there is none. */
 export const DIRECTION_TO: Readonly<Int8Array> = (() => {
   const table = new Int8Array(4096).fill(-1);
