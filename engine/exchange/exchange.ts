@@ -9,7 +9,7 @@
  * result does not hang on the order of squares. Left out: promotion by capturing, captures in passing, and
  * checks given elsewhere.
  */
-import { type AttackMap, firstMen, KING, PAWN, slidesAlong, type SideIndex } from '../attacks';
+import { type AttackMap, firstMen, KING, slidesAlong, type SideIndex } from '../attacks';
 import { DIRECTION_TO } from '../board';
 
 /** Worth by the kind's place in a man's code; the king's is never asked for. */
@@ -17,7 +17,7 @@ const WORTH_BY_PLACE: Readonly<Int8Array> = Int8Array.of(0, 1, 3, 3, 5, 9, 0, 0)
 
 /** Worth of a man by its code, in pawns; 0 for a king or an empty square. */
 export function worthOf(code: number): number {
-  return WORTH_BY_PLACE[code & 7] as number;
+  return WORTH_BY_PLACE[code & 7]!;
 }
 
 // The state of one exchange. It lives in the module so that the search allocates nothing; nothing here
@@ -29,55 +29,55 @@ const available = new Int32Array(2);
 const gone = new Int32Array(2);
 
 function isGone(square: number): boolean {
-  return (((gone[(map.board[square] as number) >> 3] as number) >>> (map.numbers[square] as number)) & 1) === 1;
+  return ((gone[map.board[square]! >> 3]! >>> map.numbers[square]!) & 1) === 1;
 }
 
 /** First man from a square in a direction that has not left; -1 where there is none before the edge or the target. */
 function nextMan(from: number, direction: number): number {
-  let at = lines[(from << 3) | direction] as number;
-  while (at >= 0 && at !== target && isGone(at)) at = lines[(at << 3) | direction] as number;
+  let at = lines[(from << 3) | direction]!;
+  while (at >= 0 && at !== target && isGone(at)) at = lines[(at << 3) | direction]!;
   return at;
 }
 
 /** Whether the side's man on `from` stands aside: leaving its square for the target would open a line to its king. */
 function standsAside(side: number, from: number): boolean {
-  const king = map.kings[side] as number;
+  const king = map.kings[side]!;
   if (king < 0 || king === target) return false;
-  const direction = DIRECTION_TO[(king << 6) | from] as number;
+  const direction = DIRECTION_TO[(king << 6) | from]!;
   if (direction < 0 || DIRECTION_TO[(king << 6) | target] === direction) return false;
   if (nextMan(king, direction) !== from) return false;
   const pinner = nextMan(from, direction);
   if (pinner < 0) return false;
-  const code = map.board[pinner] as number;
+  const code = map.board[pinner]!;
   return code >> 3 !== side && slidesAlong(code, direction);
 }
 
 /** The man who leaves `from` is gone; the slider behind him on the line to the target, of either side, joins in. */
 function leave(side: number, from: number): void {
-  const bit = 1 << (map.numbers[from] as number);
+  const bit = 1 << map.numbers[from]!;
   gone[side]! |= bit;
   available[side]! &= ~bit;
-  const direction = DIRECTION_TO[(target << 6) | from] as number;
+  const direction = DIRECTION_TO[(target << 6) | from]!;
   if (direction < 0) return;
   const behind = nextMan(from, direction);
   if (behind < 0 || nextMan(target, direction) !== behind) return;
-  const code = map.board[behind] as number;
-  if (slidesAlong(code, direction)) available[code >> 3]! |= 1 << (map.numbers[behind] as number);
+  const code = map.board[behind]!;
+  if (slidesAlong(code, direction)) available[code >> 3]! |= 1 << map.numbers[behind]!;
 }
 
 /** Whether the order among equals cannot matter for this man: no slider further back on his line, no king on a line with him. */
 function isPlain(from: number): boolean {
-  const direction = DIRECTION_TO[(target << 6) | from] as number;
+  const direction = DIRECTION_TO[(target << 6) | from]!;
   if (direction >= 0) {
     for (let at = lines[(from << 3) | direction]!; at >= 0; at = lines[(at << 3) | direction]!) {
-      if (slidesAlong(map.board[at] as number, direction)) return false;
+      if (slidesAlong(map.board[at]!, direction)) return false;
     }
   }
-  const white = map.kings[0] as number;
-  const black = map.kings[1] as number;
+  const white = map.kings[0]!;
+  const black = map.kings[1]!;
   return (
-    (white < 0 || (DIRECTION_TO[(white << 6) | from] as number) < 0) &&
-    (black < 0 || (DIRECTION_TO[(black << 6) | from] as number) < 0)
+    (white < 0 || DIRECTION_TO[(white << 6) | from]! < 0) &&
+    (black < 0 || DIRECTION_TO[(black << 6) | from]! < 0)
   );
 }
 
@@ -88,53 +88,101 @@ const NONE = -100;
 function forced(side: number, worth: number): number {
   let best = NONE;
   let price = -1;
-  let plainTried = 0;
-  for (let rest = available[side] as number; rest !== 0; rest &= rest - 1) {
-    const number = 31 - Math.clz32(rest & -rest);
-    const from = map.squares[(side << 5) | number] as number;
-    const place = (map.board[from] as number) & 7;
-    if (place === KING) {
-      if (price >= 0) break;
-    } else {
-      const itsWorth = WORTH_BY_PLACE[place] as number;
-      if (price >= 0 && itsWorth !== price) break;
-      if (standsAside(side, from)) continue;
-      if (price >= 0 || (rest & (rest - 1)) !== 0) {
-        // Equals: pawns, or men of the same worth. Of those whose order cannot matter one is enough.
-        if (isPlain(from)) {
-          if (plainTried & (place === PAWN ? 1 : 2)) continue;
-          plainTried |= place === PAWN ? 1 : 2;
-        }
+  let plainTried = false;
+  for (let rest = available[side]!; rest !== 0; rest &= rest - 1) {
+    const from = map.squares[(side << 5) | (31 - Math.clz32(rest & -rest))]!;
+    const place = map.board[from]! & 7;
+    if (place === KING) return price >= 0 ? best : kingCaptures(side, from, worth);
+    const itsWorth = WORTH_BY_PLACE[place]!;
+    if (price >= 0 && itsWorth !== price) break;
+    if (standsAside(side, from)) continue;
+    if (price >= 0 || nextIsEqual(side, rest, itsWorth)) {
+      // Of equals whose order cannot matter one is enough.
+      if (isPlain(from)) {
+        if (plainTried) continue;
+        plainTried = true;
       }
-      price = itsWorth;
     }
-    const white = available[0] as number;
-    const black = available[1] as number;
-    const goneWhite = gone[0] as number;
-    const goneBlack = gone[1] as number;
+    price = itsWorth;
+    const white = available[0]!;
+    const black = available[1]!;
+    const goneWhite = gone[0]!;
+    const goneBlack = gone[1]!;
     leave(side, from);
-    let gain: number;
-    if (place === KING) {
-      gain = available[side ^ 1] === 0 ? worth : NONE;
-    } else {
-      const reply = forced(side ^ 1, WORTH_BY_PLACE[place] as number);
-      gain = worth - (reply > 0 ? reply : 0);
-    }
+    const reply = forced(side ^ 1, itsWorth);
     available[0] = white;
     available[1] = black;
     gone[0] = goneWhite;
     gone[1] = goneBlack;
+    const gain = worth - (reply > 0 ? reply : 0);
     if (gain > best) best = gain;
+    if (best === worth) break;
   }
   return best;
+}
+
+/** A king captures only where no enemy attacker is left, those whom its leaving uncovers included. */
+function kingCaptures(side: number, from: number, worth: number): number {
+  const white = available[0]!;
+  const black = available[1]!;
+  const gones = gone[side]!;
+  leave(side, from);
+  const free = available[side ^ 1] === 0;
+  available[0] = white;
+  available[1] = black;
+  gone[side] = gones;
+  return free ? worth : NONE;
+}
+
+/** Whether the attacker after the first of the mask costs as much. */
+function nextIsEqual(side: number, rest: number, worth: number): boolean {
+  const others = rest & (rest - 1);
+  if (others === 0) return false;
+  const next = map.board[map.squares[(side << 5) | (31 - Math.clz32(others & -others))]!]!;
+  return (next & 7) !== KING && WORTH_BY_PLACE[next & 7] === worth;
+}
+
+/** Whether the side can gain at least `need` (1 or more) by capturing a man of that worth. */
+function gainsAtLeast(side: number, worth: number, need: number): boolean {
+  if (worth < need) return false;
+  let price = -1;
+  let plainTried = false;
+  for (let rest = available[side]!; rest !== 0; rest &= rest - 1) {
+    const from = map.squares[(side << 5) | (31 - Math.clz32(rest & -rest))]!;
+    const place = map.board[from]! & 7;
+    if (place === KING) return price < 0 && kingCaptures(side, from, worth) !== NONE;
+    const itsWorth = WORTH_BY_PLACE[place]!;
+    if (price >= 0 && itsWorth !== price) return false;
+    if (standsAside(side, from)) continue;
+    if (worth - itsWorth >= need) return true;
+    if (price >= 0 || nextIsEqual(side, rest, itsWorth)) {
+      if (isPlain(from)) {
+        if (plainTried) continue;
+        plainTried = true;
+      }
+    }
+    price = itsWorth;
+    const white = available[0]!;
+    const black = available[1]!;
+    const goneWhite = gone[0]!;
+    const goneBlack = gone[1]!;
+    leave(side, from);
+    const answered = gainsAtLeast(side ^ 1, itsWorth, worth - need + 1);
+    available[0] = white;
+    available[1] = black;
+    gone[0] = goneWhite;
+    gone[1] = goneBlack;
+    if (!answered) return true;
+  }
+  return false;
 }
 
 function begin(from: AttackMap, square: number): void {
   map = from;
   lines = firstMen(from);
   target = square;
-  available[0] = map.attackers[square] as number;
-  available[1] = map.attackers[64 | square] as number;
+  available[0] = map.attackers[square]!;
+  available[1] = map.attackers[64 | square]!;
   gone[0] = 0;
   gone[1] = 0;
 }
@@ -145,11 +193,11 @@ function begin(from: AttackMap, square: number): void {
  * an empty square, an own man, the enemy king, no attacker that may move.
  */
 export function exchangeOn(attacks: AttackMap, side: SideIndex, square: number): number | null {
-  const code = attacks.board[square] as number;
+  const code = attacks.board[square]!;
   if (code === 0 || code >> 3 === side || (code & 7) === KING) return null;
   begin(attacks, square);
   if (available[side] === 0) return null;
-  const gain = forced(side, WORTH_BY_PLACE[code & 7] as number);
+  const gain = forced(side, WORTH_BY_PLACE[code & 7]!);
   return gain === NONE ? null : gain;
 }
 
@@ -164,7 +212,7 @@ export function lossOn(attacks: AttackMap, side: SideIndex, place: number, squar
   const enemy = side ^ 1;
   if (available[enemy] === 0) return 0;
   if (place === KING) return Number.POSITIVE_INFINITY;
-  const gain = forced(enemy, WORTH_BY_PLACE[place] as number);
+  const gain = forced(enemy, WORTH_BY_PLACE[place]!);
   return gain > 0 ? gain : 0;
 }
 
@@ -178,13 +226,5 @@ export function isSafeOn(attacks: AttackMap, side: SideIndex, place: number, squ
   const enemy = side ^ 1;
   if (available[enemy] === 0) return true;
   if (place === KING) return false;
-  const worth = WORTH_BY_PLACE[place] as number;
-  for (let rest = available[enemy] as number; rest !== 0; rest &= rest - 1) {
-    const from = map.squares[(enemy << 5) | (31 - Math.clz32(rest & -rest))] as number;
-    const attacker = (map.board[from] as number) & 7;
-    if (attacker === KING || standsAside(enemy, from)) continue;
-    if ((WORTH_BY_PLACE[attacker] as number) < worth) return false;
-    break;
-  }
-  return forced(enemy, worth) <= 0;
+  return !gainsAtLeast(enemy, WORTH_BY_PLACE[place]!, 1);
 }

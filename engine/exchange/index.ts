@@ -1,1 +1,2 @@
 export * from './exchange';
+export * from './safety';
