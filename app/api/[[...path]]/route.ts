@@ -1,0 +1,3 @@
+import { nothing } from '@/lib/api/others';
+
+export const { GET, HEAD, OPTIONS, POST, PUT, PATCH, DELETE } = nothing;

@@ -1,0 +1,50 @@
+/** The terminal command: `npm run waypost -- read "<FEN>"`. It needs no server and no database. */
+import { fileURLToPath } from 'node:url';
+import { env } from '@/lib/env';
+import { READ_HELP, runRead } from './read';
+import { EXIT, type ExitCode, ownTerminal, type Terminal, written } from './terminal';
+import { UsageError } from './usage-error';
+
+const HELP = `waypost: where the pieces belong
+
+Commands
+  read "<FEN>"      read a position; "read --help" says more
+
+`;
+
+/** Runs one command and gives its exit code. A command that is not understood is answered on standard error. */
+export async function runWaypost(args: readonly string[], terminal: Terminal): Promise<ExitCode> {
+  const [command, ...rest] = args;
+  try {
+    switch (command) {
+      case 'read':
+        return await runRead(rest, terminal);
+      case '--help':
+      case '-h':
+      case 'help':
+        await written(terminal.output, HELP + READ_HELP);
+        return EXIT.good;
+      case undefined:
+        throw new UsageError('A command is missing.');
+      default:
+        throw new UsageError(`There is no command "${command}".`);
+    }
+  } catch (error) {
+    if (!(error instanceof UsageError)) throw error;
+    await written(terminal.errors, `${error.message}\nTry: npm run waypost -- --help\n`);
+    return EXIT.usage;
+  }
+}
+
+/** Whoever reads our output may stop early (`| head`): that is no fault of anybody's. */
+function endQuietlyWhenUnread(): void {
+  process.stdout.on('error', (error: NodeJS.ErrnoException) => {
+    if (error.code !== 'EPIPE') throw error;
+    process.exit(EXIT.good);
+  });
+}
+
+if (process.argv[1] === fileURLToPath(import.meta.url)) {
+  endQuietlyWhenUnread();
+  process.exitCode = await runWaypost(process.argv.slice(2), ownTerminal(env.noColor));
+}

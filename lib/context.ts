@@ -1,0 +1,20 @@
+/** The whole outside world of a service: who asks, what time it is, and whether anyone still waits. */
+
+/** Who asks. Nobody signs in for the calls there are now. */
+export interface Actor {
+  readonly kind: 'anonymous';
+}
+
+export interface Context {
+  readonly actor: Actor;
+  /** Also in the answer's X-Request-Id header and in every log line. */
+  readonly requestId: string;
+  readonly now: () => Date;
+  /** Aborted when the caller has gone away. */
+  readonly signal: AbortSignal;
+}
+
+/** The context of a request by somebody who has not signed in. */
+export function anonymousContext(requestId: string, signal: AbortSignal): Context {
+  return { actor: { kind: 'anonymous' }, requestId, now: () => new Date(), signal };
+}

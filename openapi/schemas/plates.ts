@@ -1,0 +1,32 @@
+/** What a plate can be asked to show. */
+import { z } from 'zod';
+import { sideSchema, squareSchema } from '../../engine/reading/schema';
+import { fenSchema, modeSchema } from './ids';
+
+export const plateLayers = ['none', 'control', 'command', 'weak', 'outposts', 'files', 'mobility'] as const;
+export const plateThemes = ['light', 'dark'] as const;
+
+/** Bounds of a plate's width, in pixels. */
+export const plateWidthMin = 120;
+export const plateWidthMax = 2400;
+
+/** The longest caption, in characters: three lines under a plate of common width. */
+export const plateCaptionMax = 240;
+
+const yesNoSchema = z.enum(['yes', 'no']);
+
+/** The query of both plate calls. */
+export const plateQueryShape = {
+  fen: fenSchema,
+  mode: modeSchema.default('diagram'),
+  layer: z.enum(plateLayers).default('command').describe('What is drawn over the board.'),
+  width: z.coerce.number().int().min(plateWidthMin).max(plateWidthMax).default(720).describe('Width of the whole figure in pixels.'),
+  theme: z.enum(plateThemes).default('light'),
+  side: sideSchema.default('white').describe('The side at the foot of the board.'),
+  man: squareSchema.optional().describe('For the layer "mobility": the square of the man.'),
+  caption: z.string().max(plateCaptionMax).optional().describe('A line of text under the board, instead of the one from the reading.'),
+  notes: yesNoSchema.default('no').describe('Whether the leading statements stand beside the board.'),
+};
+
+const plateQuerySchema = z.strictObject(plateQueryShape);
+export type PlateQuery = z.infer<typeof plateQuerySchema>;

@@ -1,0 +1,1302 @@
+/** Generated from the contracts by `npm run generate`; not written by hand. */
+export interface paths {
+    readonly "/api/v1/readings": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a position, cacheable
+         * @description The same reading at an address of its own, with a strong ETag: it changes only when the engine does.
+         */
+        readonly get: operations["getReading"];
+        readonly put?: never;
+        /**
+         * Read a position
+         * @description Computes the reading of one position: every square, every man, pawns, weak squares, outposts, files, kings, and what follows from them in sentences.
+         */
+        readonly post: operations["createReading"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/readings/batch": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Read many positions
+         * @description Reads up to 1000 positions and answers one JSON value a line, in the order of the request, each as soon as it is computed. A FEN that cannot be read is answered in its place.
+         */
+        readonly post: operations["createReadings"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/plates.svg": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Draw a plate as SVG
+         * @description Draws the position with one layer of its reading and, if asked, the leading statements beside the board. The same marks draw the page.
+         */
+        readonly get: operations["getPlateSvg"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/plates.png": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Draw a plate as PNG
+         * @description Draws the position with one layer of its reading and, if asked, the leading statements beside the board. The same marks draw the page. The PNG is at most 2400 pixels wide.
+         */
+        readonly get: operations["getPlatePng"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the calls
+         * @description A small index: every call with its address, and where the document is.
+         */
+        readonly get: operations["getIndex"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/openapi.json": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * The OpenAPI document
+         * @description This document, generated from the schemas that check requests and replies.
+         */
+        readonly get: operations["getDocument"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/problems/{code}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Explain a problem
+         * @description The "type" of every problem is an address of this call.
+         */
+        readonly get: operations["getProblem"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/health": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Live and ready
+         * @description Answers as long as the service lives; "ready" says that it takes work.
+         */
+        readonly get: operations["getHealth"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+}
+export type webhooks = Record<string, never>;
+export interface components {
+    schemas: {
+        /** @description Stands in the place of a reading that could not be made. */
+        readonly BadLine: {
+            readonly error: components["schemas"]["Fault"];
+            /** @description The number of the FEN, from 1. */
+            readonly line: number;
+        };
+        /** @description Positions to read. */
+        readonly BatchRequest: {
+            /** @description FENs, answered in this order, one a line. */
+            readonly fens: readonly string[];
+            /** @default strict */
+            readonly mode: components["schemas"]["Mode"];
+            /** @description Only these parts, beside the position itself. Left out: the whole reading. */
+            readonly include?: readonly components["schemas"]["ReadingPart"][];
+        };
+        /** @description A bound that was passed: its name and the most that is taken. */
+        readonly Bound: {
+            readonly name: string;
+            readonly max: number;
+        };
+        /**
+         * @description A colour of squares.
+         * @enum {string}
+         */
+        readonly Colour: "light" | "dark";
+        /** @description How far a bishop or queen sees along a diagonal, one way. */
+        readonly DiagonalReading: {
+            readonly from: components["schemas"]["Square"];
+            /** @enum {string} */
+            readonly direction: "a1h8" | "h1a8";
+            /** @description Squares seen along the diagonal from the man, nearest first, one way. */
+            readonly squares: readonly components["schemas"]["Square"][];
+            readonly stoppedBy: components["schemas"]["Square"] | null;
+            /** @description The man that stops it is a rammed pawn. */
+            readonly stopperFixed: boolean;
+        };
+        /** @description Why a position was refused, or what a diagram lacks. */
+        readonly Fault: {
+            /** @description Stable code of the fault, e.g. "rank-length". */
+            readonly code: string;
+            /**
+             * @description The FEN field at fault; "text" when the fields cannot be told apart.
+             * @enum {string}
+             */
+            readonly field: "board" | "side" | "castling" | "enPassant" | "halfmove" | "fullmove" | "text";
+            /** @description What is wrong, in a sentence. */
+            readonly message: string;
+            /** @description The square at fault, where there is one. */
+            readonly square?: components["schemas"]["Square"];
+        };
+        /** @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four. */
+        readonly Fen: string;
+        /**
+         * @description A file by its letter.
+         * @enum {string}
+         */
+        readonly File: "a" | "b" | "c" | "d" | "e" | "f" | "g" | "h";
+        /** @description One file. */
+        readonly FileReading: {
+            readonly file: components["schemas"]["File"];
+            /** @enum {string} */
+            readonly status: "open" | "half-open" | "closed";
+            readonly halfOpenFor: components["schemas"]["Side"] | null;
+            /** @description Rooks and queens on the file. */
+            readonly heavy: {
+                readonly white: readonly components["schemas"]["Square"][];
+                readonly black: readonly components["schemas"]["Square"][];
+            };
+            /** @enum {string} */
+            readonly control: "white" | "black" | "shared" | "none";
+            /** @description Squares on the 7th and 8th rank of each side where it can enter. */
+            readonly entries: {
+                readonly white: readonly components["schemas"]["Square"][];
+                readonly black: readonly components["schemas"]["Square"][];
+            };
+            readonly targets: readonly {
+                readonly square: components["schemas"]["Square"];
+                readonly side: components["schemas"]["Side"];
+            }[];
+        };
+        readonly Health: {
+            /** @enum {string} */
+            readonly status: "ready";
+            /** @description Version of the computations. */
+            readonly engine: string;
+            readonly uptimeSeconds: number;
+        };
+        /**
+         * @description A kind of man.
+         * @enum {string}
+         */
+        readonly Kind: "pawn" | "knight" | "bishop" | "rook" | "queen" | "king";
+        /** @description A king and its shelter. */
+        readonly KingReading: {
+            readonly square: components["schemas"]["Square"];
+            readonly shelter: readonly {
+                readonly file: components["schemas"]["File"];
+                readonly pawn: components["schemas"]["Square"] | null;
+                readonly advanced: number;
+            }[];
+            /** @description Files of the king and beside it, open or half-open for the enemy. */
+            readonly openBeside: readonly components["schemas"]["File"][];
+            /** @description Enemy men that attack its zone. */
+            readonly reachedBy: readonly components["schemas"]["Square"][];
+            /** @description Own men that guard its zone. */
+            readonly guardedBy: readonly components["schemas"]["Square"][];
+            /** @description Squares it can step to now. */
+            readonly flights: readonly components["schemas"]["Square"][];
+            /** @description Flights off its back rank. */
+            readonly luft: readonly components["schemas"]["Square"][];
+        };
+        /** @description One call of the API. */
+        readonly Link: {
+            readonly id: string;
+            readonly method: string;
+            readonly href: string;
+            readonly summary: string;
+        };
+        /** @description One man and what it can do from where it stands. */
+        readonly ManReading: {
+            readonly square: components["schemas"]["Square"];
+            readonly side: components["schemas"]["Side"];
+            readonly kind: components["schemas"]["Kind"];
+            /** @description Squares it can move to: pseudo-legal, pins kept. */
+            readonly moves: readonly components["schemas"]["Square"][];
+            /** @description Those of its moves on which it is not lost by exchange. */
+            readonly safeMoves: readonly components["schemas"]["Square"][];
+            /** @description Squares attacked, own men included. */
+            readonly sees: number;
+            readonly pinned: boolean;
+            /** @description Pawns the enemy gains by taking it now; 0 if nothing. */
+            readonly enPrise: number;
+            /** @description Enemy men that attack it, cheapest first. */
+            readonly attackers: readonly components["schemas"]["Square"][];
+            /** @description Own men that guard it, cheapest first. */
+            readonly defenders: readonly components["schemas"]["Square"][];
+            /** @description What falls if it leaves. */
+            readonly duties: readonly {
+                readonly square: components["schemas"]["Square"];
+                /** @description Pawns lost there if the man leaves. */
+                readonly loses: number;
+            }[];
+            /** @description Attackable and without a safe square. */
+            readonly trapped: boolean;
+            /** @description Named traits: bad-bishop, bad-but-active, rim, outpost, overloaded and others. */
+            readonly notes: readonly string[];
+        };
+        /**
+         * @description strict: legal positions only. diagram: also what teachers draw, the faults answered as warnings.
+         * @enum {string}
+         */
+        readonly Mode: "strict" | "diagram";
+        /** @description An outpost or advanced post. */
+        readonly Outpost: {
+            readonly square: components["schemas"]["Square"];
+            /** @description The side that may use it. */
+            readonly side: components["schemas"]["Side"];
+            /**
+             * @description "advanced": a pawn may still challenge it, or no pawn supports it.
+             * @enum {string}
+             */
+            readonly rank: "outpost" | "advanced";
+            /** @enum {string} */
+            readonly hold: "permanent" | "fixed" | "open";
+            /** @description The soonest enemy pawn that can attack it. */
+            readonly challenge: {
+                readonly from: components["schemas"]["Square"];
+                readonly moves: number;
+            } | null;
+            /** @description The soonest own pawn that can guard it; moves 0: it does now. */
+            readonly support: {
+                readonly pawn: components["schemas"]["Square"];
+                readonly moves: number;
+            } | null;
+            /** @description The square itself when an own man stands there. */
+            readonly occupant: components["schemas"]["Square"] | null;
+            readonly users: readonly {
+                /** @description Where the man stands now. */
+                readonly from: components["schemas"]["Square"];
+                readonly kind: components["schemas"]["Kind"];
+                /** @description Own moves needed to stand there safely, the enemy standing still; 0: it stands there. */
+                readonly moves: number;
+            }[];
+            /** @description The enemy has a minor piece that can challenge it. */
+            readonly tradable: boolean;
+        };
+        /** @description The pawns of one side. */
+        readonly PawnSide: {
+            readonly islands: number;
+            readonly isolated: readonly components["schemas"]["Square"][];
+            readonly doubled: readonly components["schemas"]["Square"][];
+            readonly backward: readonly components["schemas"]["Square"][];
+            readonly passed: readonly components["schemas"]["Square"][];
+            readonly protectedPassed: readonly components["schemas"]["Square"][];
+            readonly candidates: readonly components["schemas"]["Square"][];
+            readonly onLight: number;
+            readonly onDark: number;
+            /** @description Wings (a to c, d to e, f to h) where this side has more pawns. */
+            readonly majorities: readonly ("queenside" | "centre" | "kingside")[];
+        };
+        /** @description Problem details (RFC 9457). */
+        readonly Problem: {
+            /** @description Stable address of the kind of problem. */
+            readonly type: string;
+            /** @description The kind of problem in a sentence, the same each time. */
+            readonly title: string;
+            readonly status: number;
+            /** @description What is wrong this time. */
+            readonly detail: string;
+            /** @description The address that was called. */
+            readonly instance: string;
+            readonly code: components["schemas"]["ProblemCode"];
+            /** @description Also in the X-Request-Id header and in our log. */
+            readonly requestId: string;
+            /** @description What to do. */
+            readonly fix: string;
+            /** @description The path of the first fault. */
+            readonly path?: string;
+            readonly bound?: components["schemas"]["Bound"];
+            readonly faults?: readonly components["schemas"]["ProblemFault"][];
+        };
+        /**
+         * @description A stable code of a problem.
+         * @enum {string}
+         */
+        readonly ProblemCode: "not-json" | "not-found" | "method-not-allowed" | "body-too-large" | "unsupported-media-type" | "invalid-request" | "fen-refused" | "internal";
+        /** @description One place of a request that was refused. */
+        readonly ProblemFault: {
+            /**
+             * @description The part of the request at fault.
+             * @enum {string}
+             */
+            readonly in: "body" | "query" | "path";
+            /** @description JSON pointer (RFC 6901) to the value at fault inside that part, e.g. "/fens/3". */
+            readonly path: string;
+            /** @description Stable code of the fault, e.g. "unknown-field" or, for a FEN, "rank-length". */
+            readonly code: string;
+            /** @description What is wrong, in a sentence. */
+            readonly message: string;
+            /** @description For a FEN: its field at fault. */
+            readonly field?: string;
+            /** @description For a FEN: the square at fault, where there is one. */
+            readonly square?: components["schemas"]["Square"];
+        };
+        /** @description A kind of problem, and what to do about it. */
+        readonly ProblemKind: {
+            readonly type: string;
+            readonly code: components["schemas"]["ProblemCode"];
+            readonly status: number;
+            readonly title: string;
+            readonly fix: string;
+        };
+        /** @description Everything computed for one position. */
+        readonly Reading: {
+            /** @description Version of the computations. */
+            readonly engine: string;
+            /** @description Six fields, normalised. */
+            readonly fen: string;
+            /** @enum {string} */
+            readonly mode: "strict" | "diagram";
+            readonly warnings: readonly components["schemas"]["Fault"][];
+            readonly sideToMove: components["schemas"]["Side"];
+            /** @description 64, a1 first, then b1 … h8. */
+            readonly squares: readonly components["schemas"]["SquareReading"][];
+            /** @description One a man, in square order. */
+            readonly men: readonly components["schemas"]["ManReading"][];
+            readonly pawns: {
+                readonly white: components["schemas"]["PawnSide"];
+                readonly black: components["schemas"]["PawnSide"];
+                readonly rams: readonly {
+                    readonly white: components["schemas"]["Square"];
+                    readonly black: components["schemas"]["Square"];
+                }[];
+                readonly levers: readonly {
+                    readonly from: components["schemas"]["Square"];
+                    readonly against: components["schemas"]["Square"];
+                    readonly side: components["schemas"]["Side"];
+                    readonly moves: number;
+                    readonly supported: boolean;
+                }[];
+                readonly fixedness: {
+                    readonly all: number | null;
+                    readonly centre: number | null;
+                };
+                readonly structure: {
+                    readonly id: string;
+                    readonly name: string;
+                    /** @description The side that has the structure’s leading part. */
+                    readonly side: components["schemas"]["Side"];
+                    /** @description Pawns that differ from the model. */
+                    readonly differs: number;
+                } | null;
+            };
+            readonly weakSquares: readonly components["schemas"]["WeakSquare"][];
+            readonly outposts: readonly components["schemas"]["Outpost"][];
+            /** @description 8, a first. */
+            readonly files: readonly components["schemas"]["FileReading"][];
+            readonly diagonals: readonly components["schemas"]["DiagonalReading"][];
+            readonly colourComplexes: readonly {
+                readonly side: components["schemas"]["Side"];
+                readonly colour: components["schemas"]["Colour"];
+                readonly squares: readonly components["schemas"]["Square"][];
+                readonly ownBishop: boolean;
+                readonly enemyBishop: boolean;
+            }[];
+            readonly kings: {
+                readonly white: components["schemas"]["KingReading"] | null;
+                readonly black: components["schemas"]["KingReading"] | null;
+            };
+            readonly totals: {
+                readonly white: components["schemas"]["Totals"];
+                readonly black: components["schemas"]["Totals"];
+            };
+            /** @description By weight, heaviest first. */
+            readonly statements: readonly components["schemas"]["Statement"][];
+            /** @description Keys of the few statements that matter most. */
+            readonly lead: readonly string[];
+        };
+        /**
+         * @description A part of a reading.
+         * @enum {string}
+         */
+        readonly ReadingPart: "squares" | "men" | "pawns" | "weakSquares" | "outposts" | "files" | "diagonals" | "colourComplexes" | "kings" | "totals" | "statements" | "lead";
+        /** @description A reading with the parts that were asked for. */
+        readonly ReadingParts: {
+            /** @description Version of the computations. */
+            readonly engine: string;
+            /** @description Six fields, normalised. */
+            readonly fen: string;
+            /** @enum {string} */
+            readonly mode: "strict" | "diagram";
+            readonly warnings: readonly components["schemas"]["Fault"][];
+            readonly sideToMove: components["schemas"]["Side"];
+            /** @description 64, a1 first, then b1 … h8. */
+            readonly squares?: readonly components["schemas"]["SquareReading"][];
+            /** @description One a man, in square order. */
+            readonly men?: readonly components["schemas"]["ManReading"][];
+            readonly pawns?: {
+                readonly white: components["schemas"]["PawnSide"];
+                readonly black: components["schemas"]["PawnSide"];
+                readonly rams: readonly {
+                    readonly white: components["schemas"]["Square"];
+                    readonly black: components["schemas"]["Square"];
+                }[];
+                readonly levers: readonly {
+                    readonly from: components["schemas"]["Square"];
+                    readonly against: components["schemas"]["Square"];
+                    readonly side: components["schemas"]["Side"];
+                    readonly moves: number;
+                    readonly supported: boolean;
+                }[];
+                readonly fixedness: {
+                    readonly all: number | null;
+                    readonly centre: number | null;
+                };
+                readonly structure: {
+                    readonly id: string;
+                    readonly name: string;
+                    /** @description The side that has the structure’s leading part. */
+                    readonly side: components["schemas"]["Side"];
+                    /** @description Pawns that differ from the model. */
+                    readonly differs: number;
+                } | null;
+            };
+            readonly weakSquares?: readonly components["schemas"]["WeakSquare"][];
+            readonly outposts?: readonly components["schemas"]["Outpost"][];
+            /** @description 8, a first. */
+            readonly files?: readonly components["schemas"]["FileReading"][];
+            readonly diagonals?: readonly components["schemas"]["DiagonalReading"][];
+            readonly colourComplexes?: readonly {
+                readonly side: components["schemas"]["Side"];
+                readonly colour: components["schemas"]["Colour"];
+                readonly squares: readonly components["schemas"]["Square"][];
+                readonly ownBishop: boolean;
+                readonly enemyBishop: boolean;
+            }[];
+            readonly kings?: {
+                readonly white: components["schemas"]["KingReading"] | null;
+                readonly black: components["schemas"]["KingReading"] | null;
+            };
+            readonly totals?: {
+                readonly white: components["schemas"]["Totals"];
+                readonly black: components["schemas"]["Totals"];
+            };
+            /** @description By weight, heaviest first. */
+            readonly statements?: readonly components["schemas"]["Statement"][];
+            /** @description Keys of the few statements that matter most. */
+            readonly lead?: readonly string[];
+        };
+        /** @description One position to read. */
+        readonly ReadingRequest: {
+            readonly fen: components["schemas"]["Fen"];
+            /** @default strict */
+            readonly mode: components["schemas"]["Mode"];
+            /** @description Only these parts, beside the position itself. Left out: the whole reading. */
+            readonly include?: readonly components["schemas"]["ReadingPart"][];
+        };
+        /**
+         * @description A side.
+         * @enum {string}
+         */
+        readonly Side: "white" | "black";
+        /**
+         * @description A square by its name, "a1" to "h8".
+         * @enum {string}
+         */
+        readonly Square: "a1" | "b1" | "c1" | "d1" | "e1" | "f1" | "g1" | "h1" | "a2" | "b2" | "c2" | "d2" | "e2" | "f2" | "g2" | "h2" | "a3" | "b3" | "c3" | "d3" | "e3" | "f3" | "g3" | "h3" | "a4" | "b4" | "c4" | "d4" | "e4" | "f4" | "g4" | "h4" | "a5" | "b5" | "c5" | "d5" | "e5" | "f5" | "g5" | "h5" | "a6" | "b6" | "c6" | "d6" | "e6" | "f6" | "g6" | "h6" | "a7" | "b7" | "c7" | "d7" | "e7" | "f7" | "g7" | "h7" | "a8" | "b8" | "c8" | "d8" | "e8" | "f8" | "g8" | "h8";
+        /** @description One square: who attacks it and who commands it. */
+        readonly SquareReading: {
+            readonly square: components["schemas"]["Square"];
+            readonly occupant: {
+                readonly side: components["schemas"]["Side"];
+                readonly kind: components["schemas"]["Kind"];
+            } | null;
+            /** @description Men that attack the square, cheapest first, pinned men included (FIDE Laws 3.1). */
+            readonly attackers: {
+                readonly white: readonly components["schemas"]["Square"][];
+                readonly black: readonly components["schemas"]["Square"][];
+            };
+            /** @description Attackers that an absolute pin keeps from capturing here. */
+            readonly held: {
+                readonly white: readonly components["schemas"]["Square"][];
+                readonly black: readonly components["schemas"]["Square"][];
+            };
+            /** @description Sliders that would join after a friendly man in front has captured here. */
+            readonly behind: {
+                readonly white: readonly components["schemas"]["Square"][];
+                readonly black: readonly components["schemas"]["Square"][];
+            };
+            /**
+             * @description Whose knight would be safe here: one side’s, both (open) or neither (disputed).
+             * @enum {string}
+             */
+            readonly command: "white" | "black" | "open" | "disputed";
+            /** @description Gain in pawns for the side that begins to capture here; null where it cannot. */
+            readonly exchange: {
+                readonly white: number | null;
+                readonly black: number | null;
+            };
+        };
+        /** @description One sentence of a reading. */
+        readonly Statement: {
+            /** @description Unique in the reading. */
+            readonly key: string;
+            /** @description The template. */
+            readonly id: string;
+            /** @enum {string} */
+            readonly theme: "structure" | "squares" | "outposts" | "files" | "men" | "king" | "control";
+            /** @description The side it speaks of; null for both. */
+            readonly side: components["schemas"]["Side"] | null;
+            /** @description Orders the statements; nothing else. */
+            readonly weight: number;
+            /** @description The claim alone: always the beginning of the text. */
+            readonly head: string;
+            /** @description The whole sentence or sentences. */
+            readonly text: string;
+            readonly squares: readonly components["schemas"]["Square"][];
+            readonly men: readonly components["schemas"]["Square"][];
+            /** @description What the text says, as data. */
+            readonly facts: {
+                readonly [key: string]: unknown;
+            };
+        };
+        /** @description Counts of one side over the whole board. */
+        readonly Totals: {
+            readonly controlled: number;
+            readonly commanded: number;
+            readonly enemyHalf: number;
+            readonly centre: number;
+            readonly extendedCentre: number;
+            readonly safeMoves: number;
+        };
+        /** @description A square that its side’s pawns cannot guard. */
+        readonly WeakSquare: {
+            readonly square: components["schemas"]["Square"];
+            /** @description The side whose weakness it is. */
+            readonly side: components["schemas"]["Side"];
+            /** @enum {string} */
+            readonly hold: "permanent" | "fixed";
+            readonly matters: boolean;
+            readonly commandedByEnemy: boolean;
+            /** @description Enemy men that can come to stand there safely, soonest first. */
+            readonly users: readonly {
+                /** @description Where the man stands now. */
+                readonly from: components["schemas"]["Square"];
+                readonly kind: components["schemas"]["Kind"];
+                /** @description Own moves needed to stand there safely, the enemy standing still; 0: it stands there. */
+                readonly moves: number;
+            }[];
+            /** @description The colour of the square. */
+            readonly complex: components["schemas"]["Colour"];
+        };
+    };
+    responses: never;
+    parameters: never;
+    requestBodies: never;
+    headers: never;
+    pathItems: never;
+}
+export type $defs = Record<string, never>;
+export interface operations {
+    readonly getReading: {
+        readonly parameters: {
+            readonly query: {
+                /**
+                 * @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four.
+                 * @example r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10
+                 */
+                readonly fen: components["schemas"]["Fen"];
+                readonly mode?: components["schemas"]["Mode"];
+                /**
+                 * @example [
+                 *       "statements",
+                 *       "lead"
+                 *     ]
+                 */
+                readonly include?: readonly components["schemas"]["ReadingPart"][];
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Read a position, cacheable */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Reading"] | components["schemas"]["ReadingParts"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createReading: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 4096 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "fen": "r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10",
+                 *       "include": [
+                 *         "statements",
+                 *         "lead"
+                 *       ]
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["ReadingRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Read a position */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Reading"] | components["schemas"]["ReadingParts"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createReadings: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 262144 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "fens": [
+                 *         "r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10",
+                 *         "8/5ppp/4k3/3p4/3P1K2/4P3/5PPP/8 w - - 0 1",
+                 *         "not a position"
+                 *       ],
+                 *       "include": [
+                 *         "lead"
+                 *       ]
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["BatchRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description One JSON value a line; the schema is that of a line. */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/x-ndjson": components["schemas"]["Reading"] | components["schemas"]["BadLine"] | components["schemas"]["ReadingParts"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getPlateSvg: {
+        readonly parameters: {
+            readonly query: {
+                /**
+                 * @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four.
+                 * @example r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10
+                 */
+                readonly fen: components["schemas"]["Fen"];
+                readonly mode?: components["schemas"]["Mode"];
+                /**
+                 * @description What is drawn over the board.
+                 * @example command
+                 */
+                readonly layer?: "none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility";
+                /** @description Width of the whole figure in pixels. */
+                readonly width?: number;
+                readonly theme?: "light" | "dark";
+                /** @description The side at the foot of the board. */
+                readonly side?: components["schemas"]["Side"];
+                /** @description For the layer "mobility": the square of the man. */
+                readonly man?: components["schemas"]["Square"];
+                /** @description A line of text under the board, instead of the one from the reading. */
+                readonly caption?: string;
+                /** @description Whether the leading statements stand beside the board. */
+                readonly notes?: "yes" | "no";
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Draw a plate as SVG */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "image/svg+xml": string;
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getPlatePng: {
+        readonly parameters: {
+            readonly query: {
+                /**
+                 * @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four.
+                 * @example r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10
+                 */
+                readonly fen: components["schemas"]["Fen"];
+                readonly mode?: components["schemas"]["Mode"];
+                /**
+                 * @description What is drawn over the board.
+                 * @example command
+                 */
+                readonly layer?: "none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility";
+                /**
+                 * @description Width of the whole figure in pixels.
+                 * @example 480
+                 */
+                readonly width?: number;
+                readonly theme?: "light" | "dark";
+                /** @description The side at the foot of the board. */
+                readonly side?: components["schemas"]["Side"];
+                /** @description For the layer "mobility": the square of the man. */
+                readonly man?: components["schemas"]["Square"];
+                /** @description A line of text under the board, instead of the one from the reading. */
+                readonly caption?: string;
+                /** @description Whether the leading statements stand beside the board. */
+                readonly notes?: "yes" | "no";
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Draw a plate as PNG */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "image/png": string;
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getIndex: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description List the calls */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": {
+                        /** @description Version of the computations. */
+                        readonly engine: string;
+                        readonly document: string;
+                        readonly calls: readonly components["schemas"]["Link"][];
+                    };
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getDocument: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description The OpenAPI document */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": {
+                        readonly openapi: string;
+                        readonly info: {
+                            readonly title: string;
+                            readonly version: string;
+                        } & {
+                            readonly [key: string]: unknown;
+                        };
+                    } & {
+                        readonly [key: string]: unknown;
+                    };
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getProblem: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /** @example fen-refused */
+                readonly code: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Explain a problem */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ProblemKind"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getHealth: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Live and ready */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Health"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+}
