@@ -1,0 +1,4 @@
+export * from './square-table';
+export * from './weak-squares';
+export * from './outposts';
+export * from './totals';
