@@ -1,0 +1,4 @@
+export * from './model';
+export * from './table';
+export * from './name-structure';
+export * from './structure-lead';

@@ -1,0 +1,68 @@
+/** Structures that mostly come from the Sicilian Defence. */
+import type { StructureModel } from '../model';
+
+export const SICILIAN: readonly StructureModel[] = [
+  {
+    id: 'maroczy-bind',
+    name: 'Maroczy bind',
+    leader: 'white',
+    white: { core: 'c4 e4', bare: 'd', usual: 'a b f g h' },
+    black: { core: 'd7|d6', bare: 'c', usual: 'a b e f g h' },
+    lead: '{c4} and {e4} hold {d5}; {enemy}’s levers by the book are {b5} and {f5}',
+    source: 'Flores Rios, Chess Structures; Soltis, Pawn Structure Chess; from memory',
+  },
+  {
+    id: 'hedgehog',
+    name: 'hedgehog',
+    leader: 'black',
+    white: { core: 'c4', bare: 'd', usual: 'a b e f g h' },
+    black: { core: 'b6 d6 e6', bare: 'c', usual: 'a6|a7 f g h' },
+    lead: '{b6}, {d6} and {e6} keep to {side}’s third rank and the c-file is half-open for {side}; the levers are {b5} and {d5}',
+    source: 'Flores Rios, Chess Structures; Watson, Secrets of Modern Chess Strategy; from memory',
+  },
+  {
+    id: 'scheveningen',
+    name: 'Scheveningen centre',
+    leader: 'black',
+    white: { core: 'c2|c3|c4 e4', bare: 'd', usual: 'a b f g h' },
+    black: { core: 'd6 e6', bare: 'c', usual: 'a b f g h' },
+    lead: '{e6} guards {d5} and {d6} guards {e5}; the c-file is half-open for {side}, the d-file for {enemy}',
+    source: 'Soltis, Pawn Structure Chess; from memory',
+  },
+  {
+    id: 'boleslavsky-hole',
+    name: 'Boleslavsky hole',
+    leader: 'black',
+    white: { core: 'e4', bare: 'd', usual: 'a b c f g h' },
+    black: { core: 'd6 e5', bare: 'c', usual: 'a b f g h' },
+    lead: 'no pawn of {side} can guard {d5} again, and {d6} stands behind it on a file half-open for {enemy}',
+    source: 'Soltis, Pawn Structure Chess; Flores Rios, Chess Structures; from memory',
+  },
+  {
+    id: 'sveshnikov-doubled',
+    name: 'Sveshnikov with doubled f-pawns',
+    leader: 'black',
+    white: { core: 'e4 g2|g3|g4', bare: 'd', usual: 'a b c f h' },
+    black: { core: 'd6 e5 f6|f5 f7', bare: 'c g', usual: 'a b h' },
+    lead: 'no pawn of {side} can guard {d5} again; in return {side} has the half-open g-file and two f-pawns to strike at {e4}',
+    source: 'from memory',
+  },
+  {
+    id: 'dragon',
+    name: 'dragon formation',
+    leader: 'black',
+    white: { core: 'e4', bare: 'd', usual: 'a b c2|c3 f g h' },
+    black: { core: 'd6 e7 g6', bare: 'c', usual: 'a b f h' },
+    lead: '{d6}, {e7} and {g6} leave the long diagonal to a bishop on {g7}; the d-file is half-open for {enemy}',
+    source: 'Soltis, Pawn Structure Chess; Kmoch, Pawn Power in Chess; from memory',
+  },
+  {
+    id: 'closed-sicilian',
+    name: 'closed Sicilian',
+    leader: 'white',
+    white: { core: 'd3 e4', usual: 'a b c2|c3 f g h' },
+    black: { core: 'c5 d6|d7 e6|e7', usual: 'a b f g h' },
+    lead: '{d3} holds {e4} and {c5} holds {d4}; by the book {side} goes forward with {f4}, {enemy} with {b5}',
+    source: 'Flores Rios, Chess Structures; from memory',
+  },
+];
