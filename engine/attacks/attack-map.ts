@@ -226,27 +226,52 @@ function fillPins({ board, kings, numbers, pinned }: AttackMap): void {
   }
 }
 
-/** Mask of a side's men that stand behind an attacker of the square: see `behind` in the queries. */
-export function behindMask(map: AttackMap, side: SideIndex, square: number): number {
-  const { board, numbers, attackers } = map;
-  const lines = firstMen(map);
-  const direct = attackers[(side << 6) | square] as number;
-  let mask = 0;
-  if (direct === 0) return 0;
-  for (let direction = 0; direction < 8; direction++) {
-    const front = lines[(square << 3) | direction] as number;
-    if (front < 0) continue;
-    const code = board[front] as number;
-    if (code >> 3 !== side) continue;
-    if (!slidesAlong(code, direction) && (code & 7) !== PAWN) continue;
-    if (((direct >>> (numbers[front] as number)) & 1) === 0) continue;
-    for (let next = lines[(front << 3) | direction]!; next >= 0; next = lines[(next << 3) | direction]!) {
-      const behind = board[next] as number;
-      if (behind >> 3 !== side || !slidesAlong(behind, direction)) break;
-      mask |= 1 << (numbers[next] as number);
+/**
+ * Marks who stands behind: sliders that would attack a square once the friendly sliders, or the one pawn, in
+ * front of them on the same line have captured there. `into` is filled by (side << 6 | square) with masks.
+ *
+ * Found from the rear: from each slider past the friends that attack along its line.
+ */
+export function fillBehind(map: AttackMap, into: Int32Array): void {
+  const { board, counts, squares } = map;
+  into.fill(0);
+  for (let side = 0; side < 2; side++) {
+    for (let number = counts[side]! - 1; number >= 0; number--) {
+      const from = squares[(side << 5) | number]!;
+      const kind = board[from]! & 7;
+      if (kind < BISHOP) break;
+      if (kind === KING) continue;
+      const last = kind === ROOK ? 4 : 8;
+      for (let direction = kind === BISHOP ? 4 : 0; direction < last; direction++) {
+        markBehind(map, into, side, from, direction, 1 << number);
+      }
     }
   }
-  return mask;
+}
+
+function markBehind(map: AttackMap, into: Int32Array, side: number, from: number, direction: number, bit: number): void {
+  const { board } = map;
+  const lines = firstMen(map);
+  const stride = STRIDES[direction]!;
+  for (let front = lines[(from << 3) | direction]!; front >= 0; ) {
+    const code = board[front]!;
+    if (code >> 3 !== side) return;
+    if ((code & 7) === PAWN) {
+      const next = front + stride;
+      if (direction >= 4 && stride > 0 === (side === 0) && front !== EDGES[(front << 3) | direction]) {
+        into[(side << 6) | next]! |= bit;
+      }
+      return;
+    }
+    if (!slidesAlong(code, direction)) return;
+    const next = lines[(front << 3) | direction]!;
+    const end = next < 0 ? EDGES[(front << 3) | direction]! : next;
+    for (let to = front; to !== end; ) {
+      to += stride;
+      into[(side << 6) | to]! |= bit;
+    }
+    front = next;
+  }
 }
 
 /** Whether a pinned man's pin keeps it from capturing on the square: the square is off the pin's line. */

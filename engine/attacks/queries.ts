@@ -1,6 +1,6 @@
 /** Questions to the attack map in the words of the game. Lists run cheapest man first. */
 import { KINDS, type Kind, type Side, type Square } from '../types';
-import { type AttackMap, behindMask, isHeldFrom, pinnedMask, type SideIndex } from './attack-map';
+import { type AttackMap, isHeldFrom, pinnedMask, type SideIndex } from './attack-map';
 
 /** 0 for White, 1 for Black. */
 export function sideIndex(side: Side): SideIndex {
@@ -35,14 +35,6 @@ export function heldFrom(map: AttackMap, side: Side, square: Square): Square[] {
   const index = sideIndex(side);
   const pinned = attackerMask(map, side, square) & pinnedMask(map, index);
   return pinned === 0 ? [] : menOfMask(map, side, pinned).filter((from) => isHeldFrom(map, index, from, square));
-}
-
-/**
- * Men that stand behind: sliders of the side that would attack the square once the friendly slider or
- * pawn in front of them on the same line has captured there.
- */
-export function behind(map: AttackMap, side: Side, square: Square): Square[] {
-  return menOfMask(map, side, behindMask(map, sideIndex(side), square));
 }
 
 /** Whether the man on the square is absolutely pinned. */

@@ -14,7 +14,7 @@ export interface Reach {
   readonly safety: Safety;
   /** How far was looked, in own moves. */
   readonly movesMax: number;
-  /** Entry ((side << 5 | man's number) << 6 | square): moves needed, 0 where it stands, -1 not within `movesMax`. */
+  /** Entry ((side << 5 | man's number) << 6 | square): moves needed, 0 where it stands, negative where not within `movesMax`. */
   readonly moves: Int8Array;
 }
 
@@ -118,7 +118,6 @@ export function fillReach(safety: Safety, from: number, movesMax: number, out: I
       }
     }
   }
-  for (let entry = offset; entry < offset + 64; entry++) if (out[entry] === UNSAFE) out[entry] = -1;
 }
 
 /** Tests a square on first sight; a safe empty one joins the frontier, whose new end is returned. */

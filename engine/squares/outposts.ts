@@ -7,11 +7,11 @@
  * homes and are left out. On the 7th rank no pawn can ever challenge: a square there is listed, as `deep`,
  * where a pawn supports it now or in one move; the others are entry squares and belong to the files.
  */
-import { type AttackMap, KNIGHT } from '../attacks';
+import { KNIGHT } from '../attacks';
 import { colourOf, KNIGHT_LEAPS, LEAP_ROW, relativeRank } from '../board';
 import { type PawnMap, pawnHold, pawnReach } from '../pawns';
 import { type Reach, type User, usersOf } from '../reach';
-import { opponent, type Side, type Square } from '../types';
+import { bySide, type Colour, opponent, type Side, SIDES, type Square } from '../types';
 import { hasBishop } from './weak-squares';
 
 export interface OutpostValue {
@@ -28,27 +28,36 @@ export interface OutpostValue {
   /** The square itself when a piece of the side stands there. */
   readonly occupant: Square | null;
   readonly users: readonly User[];
-  /** The enemy has a minor piece that can trade itself for the occupant: see `isTradable`. */
+  /**
+   * The enemy has a minor piece that can trade itself for the occupant: a bishop of the square's colour, or a
+   * knight that attacks it now or after one safe move.
+   */
   readonly tradable: boolean;
 }
 
 /** Outposts and advanced posts of both sides, in square order, White's before Black's on one square. */
 export function outposts(pawns: PawnMap, reach: Reach): OutpostValue[] {
   const found: OutpostValue[] = [];
+  const challengers = bySide((side) => minorChallengers(reach, side));
   for (let square = 8; square < 56; square++) {
-    for (const side of ['white', 'black'] as const) {
-      const post = outpost(pawns, reach, side, square as Square);
+    for (const side of SIDES) {
+      const post = outpost(pawns, reach, side, square as Square, challengers[opponent(side)]);
       if (post) found.push(post);
     }
   }
   return found;
 }
 
-function outpost(pawns: PawnMap, reach: Reach, side: Side, square: Square): OutpostValue | null {
+function outpost(
+  pawns: PawnMap,
+  reach: Reach,
+  side: Side,
+  square: Square,
+  challengers: MinorChallengers,
+): OutpostValue | null {
   const rank = relativeRank(square, side);
   if (rank < 4 || rank > 7) return null;
-  const { map } = reach.safety;
-  const code = map.board[square]!;
+  const code = reach.safety.map.board[square]!;
   if ((code & 7) === 1) return null;
   const enemy = opponent(side);
   const hold = pawnHold(pawns, enemy, square);
@@ -67,27 +76,32 @@ function outpost(pawns: PawnMap, reach: Reach, side: Side, square: Square): Outp
     support: soonest && { pawn: soonest.from, moves: soonest.moves },
     occupant: own ? square : null,
     users: usersOf(reach, side, square),
-    tradable: isTradable(map, reach, enemy, square),
+    tradable: challengers.bishops[colourOf(square)] || challengers.knights[square] === 1,
   };
 }
 
-/**
- * Whether the enemy has a minor piece that can challenge a man on the square: a bishop of its colour, or a
- * knight that attacks it now or after one safe move.
- */
-export function isTradable(map: AttackMap, reach: Reach, enemy: Side, square: Square): boolean {
-  if (hasBishop(map.board, enemy, colourOf(square))) return true;
-  const row = enemy === 'white' ? 0 : 32;
-  for (let at = square * LEAP_ROW, from = KNIGHT_LEAPS[at]!; from >= 0; from = KNIGHT_LEAPS[++at]!) {
-    for (let number = 0; number < map.counts[row >> 5]!; number++) {
-      const man = row | number;
-      const kind = map.board[map.squares[man]!]! & 7;
-      if (kind < KNIGHT) continue;
-      if (kind > KNIGHT) break;
-      if (map.squares[man] === from) return true;
-      const moves = reach.moves[(man << 6) | from]!;
-      if (moves >= 0 && moves <= 1) return true;
+/** The minor pieces of a side that could trade themselves for a man on a square. */
+interface MinorChallengers {
+  readonly bishops: Readonly<Record<Colour, boolean>>;
+  /** One entry a square: 1 where a knight attacks it now or after one safe move. */
+  readonly knights: Uint8Array;
+}
+
+function minorChallengers({ safety: { map }, moves }: Reach, side: Side): MinorChallengers {
+  const knights = new Uint8Array(64);
+  const row = side === 'white' ? 0 : 32;
+  for (let number = 0; number < map.counts[row >> 5]!; number++) {
+    const man = row | number;
+    const from = map.squares[man]!;
+    if ((map.board[from]! & 7) !== KNIGHT) continue;
+    markLeaps(from, knights);
+    for (let at = from * LEAP_ROW, to = KNIGHT_LEAPS[at]!; to >= 0; to = KNIGHT_LEAPS[++at]!) {
+      if (moves[(man << 6) | to] === 1) markLeaps(to, knights);
     }
   }
-  return false;
+  return { bishops: { light: hasBishop(map.board, side, 'light'), dark: hasBishop(map.board, side, 'dark') }, knights };
+}
+
+function markLeaps(from: number, into: Uint8Array): void {
+  for (let at = from * LEAP_ROW, to = KNIGHT_LEAPS[at]!; to >= 0; to = KNIGHT_LEAPS[++at]!) into[to] = 1;
 }

@@ -1,5 +1,5 @@
 /** Every square at once: who commands it, what captures there would bring, and who stands behind. */
-import { type AttackMap, behindMask, type SideIndex } from '../attacks';
+import { type AttackMap, fillBehind, menOfMask, type SideIndex } from '../attacks';
 import { exchangeOn, isSafeHere, type Safety } from '../exchange';
 import type { Side, Square } from '../types';
 
@@ -33,6 +33,7 @@ const KNIGHT_PLACE = 2;
 /** Fills the tables for one position. */
 export function squareTable(safety: Safety, into: SquareTable = newSquareTable()): SquareTable {
   const { map } = safety;
+  fillBehind(map, into.behind);
   for (let square = 0; square < 64; square++) {
     into.commands[square] = commandIndex(safety, square);
     fillSide(map, into, 0, square);
@@ -49,7 +50,6 @@ function commandIndex(safety: Safety, square: number): number {
 
 function fillSide(map: AttackMap, into: SquareTable, side: SideIndex, square: number): void {
   const entry = (side << 6) | square;
-  into.behind[entry] = behindMask(map, side, square);
   const gain = map.board[square] === 0 ? null : exchangeOn(map, side, square);
   into.exchanges[entry] = gain === null ? NO_EXCHANGE : gain;
 }
@@ -57,6 +57,11 @@ function fillSide(map: AttackMap, into: SquareTable, side: SideIndex, square: nu
 /** Who commands the square. */
 export function commandOf(table: SquareTable, square: Square): Command {
   return COMMANDS[table.commands[square]!]!;
+}
+
+/** Men of the side that stand behind an attacker of the square, cheapest first. */
+export function behind(map: AttackMap, table: SquareTable, side: Side, square: Square): Square[] {
+  return menOfMask(map, side, table.behind[side === 'white' ? square : 64 | square]!);
 }
 
 /** What the side gains, in pawns, if it begins to capture on the square; null where it cannot. */

@@ -86,6 +86,7 @@ export const outpostSchema = z
     square: squareSchema,
     side: sideSchema.describe('The side that may use it.'),
     rank: z.enum(['outpost', 'advanced']).describe('"advanced": a pawn may still challenge it, or no pawn supports it.'),
+    deep: z.boolean().describe('On the side’s 7th rank.'),
     hold: z.enum(['permanent', 'fixed', 'open']),
     challenge: pawnDistance.nullable().describe('The soonest enemy pawn that can attack it.'),
     support: z.object({ pawn: squareSchema, moves: z.int() }).nullable().describe('The soonest own pawn that can guard it; moves 0: it does now.'),
