@@ -108,3 +108,8 @@ export function lettersOf(fen: string): string[] {
   const ranks = (fen.split(' ')[0] ?? '').split('/').reverse();
   return ranks.flatMap((rank) => [...rank].flatMap((c) => (/\d/.test(c) ? Array<string>(Number(c)).fill('') : [c])));
 }
+
+/** The engine's mailbox of letters, by the codes that `engine/board/position.ts` describes. */
+export function codesOf(letters: readonly string[]): Uint8Array {
+  return Uint8Array.from(letters, (letter) => Math.max(0, ' PNBRQK  pnbrqk'.indexOf(letter || ' ')));
+}
