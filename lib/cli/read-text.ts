@@ -3,7 +3,7 @@ import { THEMES, type Theme } from '@/engine/types';
 import type { Reading, Statement } from '@/engine/reading/schema';
 import { boardText } from './board-text';
 import type { Ink } from './ink';
-import { item, wrap } from './wrap';
+import { COLUMNS, item, wrap } from './wrap';
 
 const HEADINGS: Readonly<Record<Theme, string>> = {
   structure: 'Pawns and structure',
@@ -20,7 +20,7 @@ export function readingText(reading: Reading, ink: Ink): string {
   const lead = reading.lead.flatMap((key) => reading.statements.filter((statement) => statement.key === key));
   const rest = reading.statements.filter((statement) => !reading.lead.includes(statement.key));
   const sections = [
-    [...wrap(reading.fen, 80), headline(reading)],
+    [...wrap(reading.fen, COLUMNS), headline(reading)],
     beside(boardText(reading, ink), totalsText(reading)),
     warningsText(reading, ink),
     section('What matters most', lead, ink),
@@ -43,11 +43,10 @@ const TOTALS = [
   ['safe moves', 'safeMoves'],
 ] as const;
 
-function totalsText({ totals, sideToMove }: Reading): string[] {
+function totalsText({ totals }: Reading): string[] {
   const line = (label: string, white: string | number, black: string | number): string =>
     `${label.padEnd(22)}${String(white).padStart(7)}${String(black).padStart(8)}`;
-  const mark = sideToMove === 'white' ? line('', '*', '') : line('', '', '*');
-  return [line('', 'White', 'Black'), ...TOTALS.map(([label, key]) => line(label, totals.white[key], totals.black[key])), mark.trimEnd()];
+  return [line('', 'White', 'Black'), ...TOTALS.map(([label, key]) => line(label, totals.white[key], totals.black[key]))];
 }
 
 /** Two blocks of lines side by side; the board's lines are all of one width on paper. */

@@ -1,5 +1,6 @@
 /** `waypost read`: a FEN to a page of text or to JSON. */
 import { parseArgs } from 'node:util';
+import type { Fault } from '@/engine/reading/schema';
 import { computeReading } from '@/lib/services/readings/engine';
 import { MODES, type Mode } from '@/openapi/schemas/ids';
 import { inkFor } from './ink';
@@ -40,12 +41,18 @@ export async function runRead(args: readonly string[], terminal: Terminal): Prom
   if (fen === '-') return readStream(terminal, mode);
   const result = computeReading(fen, mode);
   if (!result.ok) {
-    for (const fault of result.fault) await written(terminal.errors, `${item(`${fault.field}: `, fault.message).join('\n')}\n`);
+    await written(terminal.errors, refusalText(result.fault, mode === 'strict' && computeReading(fen, 'diagram').ok));
     return EXIT.fault;
   }
   const text = values.json ? `${JSON.stringify(result.value)}\n` : readingText(result.value, inkFor(terminal.colour));
   await written(terminal.output, text);
   return EXIT.good;
+}
+
+/** Every fault by its FEN field, and a way out where there is one. */
+function refusalText(faults: readonly Fault[], readsAsDiagram: boolean): string {
+  const lines = ['This FEN cannot be read.', ...faults.flatMap((fault) => item(`  ${fault.field}: `, fault.message))];
+  return `${[...lines, ...(readsAsDiagram ? ['As a diagram it can: add --mode diagram.'] : [])].join('\n')}\n`;
 }
 
 /** Words that are not options make the FEN, so that quotes may be forgotten. */
@@ -65,7 +72,7 @@ function argumentFault(error: unknown): string {
   const { code, message } = error as { readonly code?: string; readonly message: string };
   const option = /'(-[^' ]*)/.exec(message)?.[1] ?? '';
   if (code === 'ERR_PARSE_ARGS_UNKNOWN_OPTION') return `There is no option "${option}".`;
-  return `The option "${option}" is not used rightly.`;
+  return message.includes('argument missing') ? `The option "${option}" needs a value.` : `The option "${option}" takes no value.`;
 }
 
 function modeOf(given: string | undefined): Mode {
