@@ -4,7 +4,7 @@
  *
  * Asked for knights, bishops, rooks and queens; kings and pawns have questions of their own.
  */
-import { type AttackMap, BISHOP, KING, KNIGHT, PAWN, pinnedMask, ROOK, type SideIndex } from '../attacks';
+import { BISHOP, KING, KNIGHT, PAWN, pinnedMask, ROOK, type SideIndex } from '../attacks';
 import { DIRECTION_TO, EDGES, KNIGHT_LEAPS, LEAP_ROW, STRIDES } from '../board';
 import { isSafeMove, type Safety } from '../exchange';
 import type { Side, Square } from '../types';
@@ -66,9 +66,9 @@ export function usersOf(reach: Reach, side: Side, square: Square): User[] {
 const frontier = new Uint8Array(64);
 /** Lines already swept through a square: one bit an axis (direction >> 1). */
 const swept = new Uint8Array(64);
-/** King and direction of the pin of the man that is searched for; king -1 where it is free. */
-let pinKing = -1;
-let pinDirection = -1;
+
+/** The search under way: whose reach it is, and where it is written. It lives here so that nothing is allocated. */
+const search = { from: 0, enemyRow: 0, moves: 0, offset: 0, end: 0, pinKing: -1, pinDirection: 0 };
 
 /**
  * Fills 64 entries of `out` from `offset` with the moves that the man on `from` needs: a search in breadth,
@@ -76,63 +76,66 @@ let pinDirection = -1;
  */
 export function fillReach(safety: Safety, from: number, movesMax: number, out: Int8Array, offset: number): void {
   const { map } = safety;
-  const code = map.board[from]!;
-  const side = (code >> 3) as SideIndex;
-  const place = code & 7;
+  const side = (map.board[from]! >> 3) as SideIndex;
+  const place = map.board[from]! & 7;
   out.fill(UNKNOWN, offset, offset + 64);
   swept.fill(0);
-  pinKing = -1;
-  if (((pinnedMask(map, side) >>> map.numbers[from]!) & 1) === 1) {
-    pinKing = map.kings[side]!;
-    pinDirection = DIRECTION_TO[(pinKing << 6) | from]!;
-  }
+  search.from = from;
+  search.enemyRow = (side ^ 1) << 6;
+  search.offset = offset;
+  search.pinKing = (pinnedMask(map, side) >>> map.numbers[from]!) & 1 ? map.kings[side]! : -1;
+  search.pinDirection = search.pinKing < 0 ? 0 : DIRECTION_TO[(search.pinKing << 6) | from]!;
   out[offset + from] = isSafeMove(safety, from, from) ? 0 : UNSAFE;
   frontier[0] = from;
+  search.end = 1;
   let begin = 0;
-  let end = 1;
-  for (let moves = 1; moves <= movesMax && begin < end; moves++) {
-    const last = end;
-    for (; begin < last; begin++) {
+  for (search.moves = 1; search.moves <= movesMax && begin < search.end; search.moves++) {
+    for (const last = search.end; begin < last; begin++) {
       const at = frontier[begin]!;
-      if (place === KNIGHT) {
-        for (let row = at * LEAP_ROW, to = KNIGHT_LEAPS[row]!; to >= 0; to = KNIGHT_LEAPS[++row]!) {
-          end = visit(safety, from, to, moves, out, offset, end);
-        }
-        continue;
-      }
-      for (let direction = place === BISHOP ? 4 : 0; direction < (place === ROOK ? 4 : 8); direction++) {
-        // A line between two blockers is swept once, from the first square on it that is reached.
-        const axis = 1 << (direction >> 1);
-        if ((direction & 1) === 0 && (swept[at]! & axis) !== 0) {
-          direction++;
-          continue;
-        }
-        const stride = STRIDES[direction]!;
-        const edge = EDGES[(at << 3) | direction]!;
-        for (let to = at; to !== edge; ) {
-          to += stride;
-          end = visit(safety, from, to, moves, out, offset, end);
-          if (map.board[to] !== 0 && to !== from) break;
-          swept[to]! |= axis;
-        }
+      if (place === KNIGHT) leap(safety, at, out);
+      else slide(safety, at, out, place);
+    }
+  }
+}
+
+function leap(safety: Safety, at: number, out: Int8Array): void {
+  for (let row = at * LEAP_ROW, to = KNIGHT_LEAPS[row]!; to >= 0; to = KNIGHT_LEAPS[++row]!) {
+    if (out[search.offset + to] === UNKNOWN) visit(safety, to, out);
+  }
+}
+
+/** A line between two blockers is swept once, both ways, from the first square on it that is reached. */
+function slide(safety: Safety, at: number, out: Int8Array, place: number): void {
+  const { board } = safety.map;
+  const { from, offset } = search;
+  const last = place === ROOK ? 4 : 8;
+  for (let direction = place === BISHOP ? 4 : 0; direction < last; direction += 2) {
+    const axis = 1 << (direction >> 1);
+    if ((swept[at]! & axis) !== 0) continue;
+    for (let way = direction; way < direction + 2; way++) {
+      const stride = STRIDES[way]!;
+      const edge = EDGES[(at << 3) | way]!;
+      for (let to = at; to !== edge; ) {
+        to += stride;
+        if (out[offset + to] === UNKNOWN) visit(safety, to, out);
+        if (board[to] !== 0 && to !== from) break;
+        swept[to]! |= axis;
       }
     }
   }
 }
 
-/** Tests a square on first sight; a safe empty one joins the frontier, whose new end is returned. */
-function visit(safety: Safety, from: number, to: number, moves: number, out: Int8Array, offset: number, end: number): number {
-  if (out[offset + to] !== UNKNOWN) return end;
-  const { board }: AttackMap = safety.map;
-  const code = board[to]!;
-  if (code !== 0 && (code >> 3 === board[from]! >> 3 || (code & 7) === KING)) return end;
-  if (pinKing >= 0 && DIRECTION_TO[(pinKing << 6) | to] !== pinDirection) return end;
-  if (!isSafeMove(safety, from, to)) {
-    out[offset + to] = UNSAFE;
-    return end;
+/** Tests a square on first sight; a safe empty one joins the frontier. */
+function visit(safety: Safety, to: number, out: Int8Array): void {
+  const { map } = safety;
+  const code = map.board[to]!;
+  if (code !== 0 && (code >> 3 !== search.enemyRow >> 6 || (code & 7) === KING)) return;
+  if (search.pinKing >= 0 && DIRECTION_TO[(search.pinKing << 6) | to] !== search.pinDirection) return;
+  const free = map.attackers[search.enemyRow | to] === 0 && safety.uncovers === 0;
+  if (!free && !isSafeMove(safety, search.from, to)) {
+    out[search.offset + to] = UNSAFE;
+    return;
   }
-  out[offset + to] = moves;
-  if (code !== 0) return end;
-  frontier[end] = to;
-  return end + 1;
+  out[search.offset + to] = search.moves;
+  if (code === 0) frontier[search.end++] = to;
 }
