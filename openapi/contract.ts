@@ -41,13 +41,14 @@ export interface BytesReply {
 export type Reply = JsonReply | LinesReply | TextReply | BytesReply;
 
 /** What a handler has to give for a reply. */
-export type ReplyValue<R extends Reply> = R extends JsonReply<infer S>
-  ? z.output<S>
-  : R extends LinesReply<infer S>
-    ? Iterable<z.output<S>>
-    : R extends TextReply
-      ? string
-      : Uint8Array;
+export type ReplyValue<R extends Reply> =
+  R extends JsonReply<infer S>
+    ? z.output<S>
+    : R extends LinesReply<infer S>
+      ? Iterable<z.output<S>>
+      : R extends TextReply
+        ? string
+        : Uint8Array;
 
 /** A JSON body with its bound in bytes. */
 export interface Body<S extends z.ZodType = z.ZodType> {

@@ -109,7 +109,8 @@ function fields(
   if (!(schema instanceof z.ZodObject)) return [];
   return Object.entries(schema.shape as Record<string, z.ZodType>).map(([name, field]) => {
     const made = components.of(field);
-    const isList = field instanceof z.ZodArray || (field instanceof z.ZodOptional && field.unwrap() instanceof z.ZodArray);
+    const isList =
+      field instanceof z.ZodArray || (field instanceof z.ZodOptional && field.unwrap() instanceof z.ZodArray);
     const sample = example?.[name];
     return {
       name,
@@ -145,7 +146,9 @@ function success(call: Contract, components: Components): JsonObject {
   const headers: JsonObject = { 'X-Request-Id': REQUEST_ID };
   if (call.cached) headers.ETag = { description: 'Changes only when the answer does.', schema: { type: 'string' } };
   const about = reply.form === 'lines' ? 'One JSON value a line; the schema is that of a line.' : call.summary;
-  const unchanged: JsonObject = call.cached ? { 304: { description: 'The copy named by If-None-Match is still good.', headers } } : {};
+  const unchanged: JsonObject = call.cached
+    ? { 304: { description: 'The copy named by If-None-Match is still good.', headers } }
+    : {};
   return { 200: { description: about, headers, content: { [reply.media]: { schema } } }, ...unchanged };
 }
 
@@ -176,5 +179,14 @@ function refusals(call: Contract, components: Components): JsonObject {
 
 function problemExample(code: ProblemCode, call: Contract): Json {
   const { status, title, fix } = PROBLEMS[code];
-  return { type: problemType(code), title, status, detail: title, instance: call.path, code, requestId: 'a1b2c3d4', fix };
+  return {
+    type: problemType(code),
+    title,
+    status,
+    detail: title,
+    instance: call.path,
+    code,
+    requestId: 'a1b2c3d4',
+    fix,
+  };
 }

@@ -5,18 +5,7 @@
  * cheapest. One 32-bit mask holds a side, which is why the door admits no more than 32 men of one.
  * Attackers are those of the Laws of Chess (FIDE, article 3.1): a pinned man still attacks.
  */
-import {
-  EDGES,
-  KING_STEPS,
-  KNIGHT_LEAPS,
-  LEAP_ROW,
-  NEIGHBOURS,
-  type Position,
-  RAY_ROW,
-  RAYS,
-  
-  STRIDES,
-} from '../board';
+import { EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, NEIGHBOURS, type Position, RAY_ROW, RAYS, STRIDES } from '../board';
 
 /** Places of the kinds in a man's code (`code & 7`). */
 export const PAWN = 1;
@@ -249,7 +238,14 @@ export function fillBehind(map: AttackMap, into: Int32Array): void {
   }
 }
 
-function markBehind(map: AttackMap, into: Int32Array, side: number, from: number, direction: number, bit: number): void {
+function markBehind(
+  map: AttackMap,
+  into: Int32Array,
+  side: number,
+  from: number,
+  direction: number,
+  bit: number,
+): void {
   const { board } = map;
   const lines = firstMen(map);
   const stride = STRIDES[direction]!;
@@ -289,4 +285,3 @@ export function isHeldFrom(map: AttackMap, side: SideIndex, from: number, square
   }
   return false;
 }
-

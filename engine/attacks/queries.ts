@@ -11,7 +11,8 @@ export function sideIndex(side: Side): SideIndex {
 export function menOfMask(map: AttackMap, side: Side, mask: number): Square[] {
   const row = sideIndex(side) << 5;
   const squares: Square[] = [];
-  for (let rest = mask; rest !== 0; rest &= rest - 1) squares.push(map.squares[row | (31 - Math.clz32(rest & -rest))] as Square);
+  for (let rest = mask; rest !== 0; rest &= rest - 1)
+    squares.push(map.squares[row | (31 - Math.clz32(rest & -rest))] as Square);
   return squares;
 }
 

@@ -7,14 +7,29 @@ import { SQUARES, step } from './squares';
 
 /** The eight directions as steps of file and rank: first the four of the rook, then the four of the bishop. */
 export const DIRECTIONS: readonly (readonly [number, number])[] = [
-  [0, 1], [0, -1], [1, 0], [-1, 0],
-  [1, 1], [-1, -1], [1, -1], [-1, 1],
+  [0, 1],
+  [0, -1],
+  [1, 0],
+  [-1, 0],
+  [1, 1],
+  [-1, -1],
+  [1, -1],
+  [-1, 1],
 ];
 
 /** Direction back: north and south, east and west and so on are neighbours in the list. */
 export const OPPOSITE: Readonly<Int8Array> = Int8Array.of(1, 0, 3, 2, 5, 4, 7, 6);
 
-const KNIGHT_STEPS = [[1, 2], [2, 1], [2, -1], [1, -2], [-1, -2], [-2, -1], [-2, 1], [-1, 2]] as const;
+const KNIGHT_STEPS = [
+  [1, 2],
+  [2, 1],
+  [2, -1],
+  [1, -2],
+  [-1, -2],
+  [-2, -1],
+  [-2, 1],
+  [-1, 2],
+] as const;
 
 /** A leaper's squares from each square: row of `width` entries a square, -1 after the last. */
 function leaps(steps: readonly (readonly [number, number])[], width: number): Int8Array {
@@ -39,8 +54,25 @@ export const STRIKE_ROW = 3;
 /** Squares that a pawn attacks: row of (side << 6 | square), side 0 White, 1 Black. */
 export const PAWN_STRIKES: Readonly<Int8Array> = (() => {
   const table = new Int8Array(128 * STRIKE_ROW);
-  table.set(leaps([[-1, 1], [1, 1]], STRIKE_ROW));
-  table.set(leaps([[-1, -1], [1, -1]], STRIKE_ROW), 64 * STRIKE_ROW);
+  table.set(
+    leaps(
+      [
+        [-1, 1],
+        [1, 1],
+      ],
+      STRIKE_ROW,
+    ),
+  );
+  table.set(
+    leaps(
+      [
+        [-1, -1],
+        [1, -1],
+      ],
+      STRIKE_ROW,
+    ),
+    64 * STRIKE_ROW,
+  );
   return table;
 })();
 
@@ -88,7 +120,11 @@ export function between(from: Square, to: Square): Square[] {
   const squares: Square[] = [];
   const direction = DIRECTION_TO[(from << 6) | to] as number;
   if (direction < 0) return squares;
-  for (let at = NEIGHBOURS[(from << 3) | direction] as number; at !== to; at = NEIGHBOURS[(at << 3) | direction] as number) {
+  for (
+    let at = NEIGHBOURS[(from << 3) | direction] as number;
+    at !== to;
+    at = NEIGHBOURS[(at << 3) | direction] as number
+  ) {
     squares.push(at as Square);
   }
   return squares;

@@ -1,5 +1,14 @@
 /** Squares: names, files, ranks, colours, steps. */
-import { type Colour, FILES, type FileName, RANKS, type RankName, type Side, type Square, type SquareName } from '../types';
+import {
+  type Colour,
+  FILES,
+  type FileName,
+  RANKS,
+  type RankName,
+  type Side,
+  type Square,
+  type SquareName,
+} from '../types';
 
 /** All 64 squares, a1, b1 … h8. */
 export const SQUARES: readonly Square[] = Array.from({ length: 64 }, (_, index) => index as Square);

@@ -75,10 +75,7 @@ function isPlain(from: number): boolean {
   }
   const white = map.kings[0]!;
   const black = map.kings[1]!;
-  return (
-    (white < 0 || DIRECTION_TO[(white << 6) | from]! < 0) &&
-    (black < 0 || DIRECTION_TO[(black << 6) | from]! < 0)
-  );
+  return (white < 0 || DIRECTION_TO[(white << 6) | from]! < 0) && (black < 0 || DIRECTION_TO[(black << 6) | from]! < 0);
 }
 
 /** No capture is possible: told apart from a capture that gains nothing. */

@@ -64,7 +64,8 @@ export function pawnReach(pawns: PawnMap, side: Side, square: Square): PawnReach
   const view = pawns[side];
   const lane = (square & 7) + 1;
   const landing = ((square ^ view.flip) >> 3) - 1;
-  if (hold === 'fixed') return { hold, attackedNow: NO_SQUARES, soonest: null, stopped: stoppedPawns(view, lane, landing) };
+  if (hold === 'fixed')
+    return { hold, attackedNow: NO_SQUARES, soonest: null, stopped: stoppedPawns(view, lane, landing) };
 
   const outer = lane < 5 ? lane - 1 : lane + 1;
   const inner = lane < 5 ? lane + 1 : lane - 1;

@@ -3,7 +3,15 @@ import { type AttackMap, attackersOf, heldFrom, kindOn, pinnedMask } from '../at
 import { manOn, type Position, SQUARES, squareName } from '../board';
 import type { PawnSideValue, PawnValues } from '../pawns';
 import type { User } from '../reach';
-import { behind, type ColourComplex, commandOf, exchangeGain, type OutpostValue, type SquareTable, type WeakSquareValue } from '../squares';
+import {
+  behind,
+  type ColourComplex,
+  commandOf,
+  exchangeGain,
+  type OutpostValue,
+  type SquareTable,
+  type WeakSquareValue,
+} from '../squares';
 import type { StructureMatch } from '../structures';
 import type { BySide, Side, Square, SquareName } from '../types';
 import type { Reading } from './schema';
@@ -94,7 +102,12 @@ export function encodePawns(pawns: PawnValues, structure: StructureMatch | null)
       supported,
     })),
     fixedness: { all: pawns.fixedness.all, centre: pawns.fixedness.centre },
-    structure: structure && { id: structure.id, name: structure.name, side: structure.side, differs: structure.differs },
+    structure: structure && {
+      id: structure.id,
+      name: structure.name,
+      side: structure.side,
+      differs: structure.differs,
+    },
   };
 }
 

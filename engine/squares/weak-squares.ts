@@ -31,7 +31,12 @@ export interface WeakSquareValue {
 }
 
 /** Weak squares of both sides, in square order, White's before Black's on one square. */
-export function weakSquares(pawns: PawnMap, board: Readonly<Uint8Array>, table: SquareTable, reach: Reach): WeakSquareValue[] {
+export function weakSquares(
+  pawns: PawnMap,
+  board: Readonly<Uint8Array>,
+  table: SquareTable,
+  reach: Reach,
+): WeakSquareValue[] {
   const found: WeakSquareValue[] = [];
   for (let square = 16; square < 48; square++) {
     for (const side of ['white', 'black'] as const) {
@@ -87,7 +92,8 @@ export function colourComplexes(weak: readonly WeakSquareValue[], board: Readonl
     for (const colour of ['light', 'dark'] as const) {
       const squares: Square[] = [];
       for (const one of weak) {
-        if (one.side === side && one.complex === colour && relativeRank(one.square, side) <= 4) squares.push(one.square);
+        if (one.side === side && one.complex === colour && relativeRank(one.square, side) <= 4)
+          squares.push(one.square);
       }
       if (squares.length < 3) continue;
       found.push({

@@ -46,7 +46,13 @@ export function nameStructure(position: Position): StructureMatch | null {
   return { id: model.id, name: model.name, side, differs: bestDiffers, reversed, model };
 }
 
-function isBetter(a: PreparedStructure, aDiffers: number, b: PreparedStructure, bDiffers: number, toMove: Side): boolean {
+function isBetter(
+  a: PreparedStructure,
+  aDiffers: number,
+  b: PreparedStructure,
+  bDiffers: number,
+  toMove: Side,
+): boolean {
   const fit = a.specificity - aDiffers - (b.specificity - bDiffers);
   if (fit !== 0) return fit > 0;
   if (aDiffers !== bDiffers) return aDiffers < bDiffers;

@@ -15,7 +15,11 @@ export async function readBody<S extends z.ZodType>(request: Request, body: Body
   if (parsed.success) return parsed.data;
   const faults = faultsOf(parsed.error, 'body');
   const first = faults[0];
-  throw new AppError('invalid-request', first ? `At ${first.path || 'the top'}: ${first.message}` : 'The body is not as promised.', { faults });
+  throw new AppError(
+    'invalid-request',
+    first ? `At ${first.path || 'the top'}: ${first.message}` : 'The body is not as promised.',
+    { faults },
+  );
 }
 
 function isJson(contentType: string | null): boolean {
@@ -53,6 +57,9 @@ function parseJson(bytes: Uint8Array): unknown {
   try {
     return JSON.parse(utf8.decode(bytes));
   } catch {
-    throw new AppError('not-json', bytes.byteLength === 0 ? 'The body is empty.' : 'The body could not be read as JSON in UTF-8.');
+    throw new AppError(
+      'not-json',
+      bytes.byteLength === 0 ? 'The body is empty.' : 'The body could not be read as JSON in UTF-8.',
+    );
   }
 }

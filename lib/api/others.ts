@@ -13,7 +13,12 @@ export function others(routes: { readonly GET?: Route; readonly POST?: Route }):
   const { GET } = routes;
   const allow = [...(GET ? ['GET', 'HEAD'] : []), ...(routes.POST ? ['POST'] : []), 'OPTIONS'].join(', ');
   const refuse: Handler = (request) =>
-    refused(request, new AppError('method-not-allowed', `This address takes ${allow}, not ${request.method}.`, { headers: { Allow: allow } }));
+    refused(
+      request,
+      new AppError('method-not-allowed', `This address takes ${allow}, not ${request.method}.`, {
+        headers: { Allow: allow },
+      }),
+    );
   return {
     GET: GET ?? refuse,
     HEAD: GET ? headOf(GET) : refuse,
@@ -50,7 +55,12 @@ function headOf(get: Handler): Handler {
 }
 
 async function preflight(request: Request, allow: string): Promise<Response> {
-  const headers = { ...commonHeaders(requestIdOf(request)), ...PREFLIGHT, Allow: allow, 'Access-Control-Allow-Methods': allow };
+  const headers = {
+    ...commonHeaders(requestIdOf(request)),
+    ...PREFLIGHT,
+    Allow: allow,
+    'Access-Control-Allow-Methods': allow,
+  };
   return new Response(null, { status: 204, headers });
 }
 

@@ -15,7 +15,8 @@ export function readQuery<S extends z.ZodType>(params: URLSearchParams, schema: 
       continue;
     }
     given[name] = values[0] ?? '';
-    if (values.length > 1) faults.push({ in: 'query', path: `/${name}`, code: 'repeated', message: 'Give this parameter once.' });
+    if (values.length > 1)
+      faults.push({ in: 'query', path: `/${name}`, code: 'repeated', message: 'Give this parameter once.' });
   }
   return parsed(given, schema, 'query', faults);
 }
@@ -25,12 +26,19 @@ export function readParams<S extends z.ZodType>(params: unknown, schema: S): z.o
   return parsed(params, schema, 'path', []);
 }
 
-function parsed<S extends z.ZodType>(given: unknown, schema: S, place: 'query' | 'path', before: readonly ProblemFault[]): z.output<S> {
+function parsed<S extends z.ZodType>(
+  given: unknown,
+  schema: S,
+  place: 'query' | 'path',
+  before: readonly ProblemFault[],
+): z.output<S> {
   const result = schema.safeParse(given);
   const faults = result.success ? before : [...before, ...faultsOf(result.error, place)];
   const first = faults[0];
   if (result.success && !first) return result.data;
-  throw new AppError('invalid-request', `At ${first?.path ?? 'the top'}: ${first?.message ?? 'Not as promised.'}`, { faults });
+  throw new AppError('invalid-request', `At ${first?.path ?? 'the top'}: ${first?.message ?? 'Not as promised.'}`, {
+    faults,
+  });
 }
 
 function isList(schema: z.ZodType, name: string): boolean {

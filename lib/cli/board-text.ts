@@ -3,7 +3,14 @@ import { FILES, type Kind, RANKS, type Side } from '@/engine/types';
 import type { Reading } from '@/engine/reading/schema';
 import type { Ink } from './ink';
 
-const LETTERS: Readonly<Record<Kind, string>> = { pawn: 'P', knight: 'N', bishop: 'B', rook: 'R', queen: 'Q', king: 'K' };
+const LETTERS: Readonly<Record<Kind, string>> = {
+  pawn: 'P',
+  knight: 'N',
+  bishop: 'B',
+  rook: 'R',
+  queen: 'Q',
+  king: 'K',
+};
 
 /** Ten lines: eight ranks, the frame's foot and the files. White stands below. */
 export function boardText(reading: Reading, ink: Ink): string[] {

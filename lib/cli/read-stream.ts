@@ -20,9 +20,16 @@ export async function readStream({ input, output, errors }: Terminal, mode: Mode
   return EXIT.fault;
 }
 
-function lineAnswer(text: string, mode: Mode, line: number): Reading | { readonly error: Fault; readonly line: number } {
+function lineAnswer(
+  text: string,
+  mode: Mode,
+  line: number,
+): Reading | { readonly error: Fault; readonly line: number } {
   if (text.length > FEN_LENGTH_MAX) {
-    return { error: { code: 'too-long', field: 'text', message: `A line has at most ${FEN_LENGTH_MAX} characters.` }, line };
+    return {
+      error: { code: 'too-long', field: 'text', message: `A line has at most ${FEN_LENGTH_MAX} characters.` },
+      line,
+    };
   }
   const result = computeReading(text, mode);
   return result.ok ? result.value : { error: result.fault[0], line };
@@ -33,7 +40,9 @@ async function* textLines(input: Readable): AsyncGenerator<string> {
   const decoder = new TextDecoder();
   let rest = '';
   for await (const chunk of input) {
-    const parts = (rest + (typeof chunk === 'string' ? chunk : decoder.decode(chunk as Uint8Array, { stream: true }))).split('\n');
+    const parts = (
+      rest + (typeof chunk === 'string' ? chunk : decoder.decode(chunk as Uint8Array, { stream: true }))
+    ).split('\n');
     rest = (parts.pop() ?? '').slice(0, FEN_LENGTH_MAX + 2);
     for (const part of parts) yield part.replace(/\r$/, '');
   }

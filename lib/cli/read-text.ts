@@ -24,9 +24,18 @@ export function readingText(reading: Reading, ink: Ink): string {
     beside(boardText(reading, ink), totalsText(reading)),
     warningsText(reading, ink),
     section('What matters most', lead, ink),
-    ...THEMES.map((theme) => section(HEADINGS[theme], rest.filter((statement) => statement.theme === theme), ink)),
+    ...THEMES.map((theme) =>
+      section(
+        HEADINGS[theme],
+        rest.filter((statement) => statement.theme === theme),
+        ink,
+      ),
+    ),
   ];
-  return `${sections.filter((lines) => lines.length > 0).map((lines) => lines.join('\n')).join('\n\n')}\n`;
+  return `${sections
+    .filter((lines) => lines.length > 0)
+    .map((lines) => lines.join('\n'))
+    .join('\n\n')}\n`;
 }
 
 function headline({ sideToMove, pawns }: Reading): string {
@@ -46,7 +55,10 @@ const TOTALS = [
 function totalsText({ totals }: Reading): string[] {
   const line = (label: string, white: string | number, black: string | number): string =>
     `${label.padEnd(22)}${String(white).padStart(7)}${String(black).padStart(8)}`;
-  return [line('', 'White', 'Black'), ...TOTALS.map(([label, key]) => line(label, totals.white[key], totals.black[key]))];
+  return [
+    line('', 'White', 'Black'),
+    ...TOTALS.map(([label, key]) => line(label, totals.white[key], totals.black[key])),
+  ];
 }
 
 /** Two blocks of lines side by side; the board's lines are all of one width on paper. */

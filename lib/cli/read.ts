@@ -37,7 +37,8 @@ export async function runRead(args: readonly string[], terminal: Terminal): Prom
   }
   const mode = modeOf(values.mode);
   const fen = positionals.join(' ');
-  if (fen === '') throw new UsageError('A FEN is missing. Put it in quotes, or give "-" to read FENs from standard input.');
+  if (fen === '')
+    throw new UsageError('A FEN is missing. Put it in quotes, or give "-" to read FENs from standard input.');
   if (fen === '-') return readStream(terminal, mode);
   const result = computeReading(fen, mode);
   if (!result.ok) {
@@ -72,7 +73,9 @@ function argumentFault(error: unknown): string {
   const { code, message } = error as { readonly code?: string; readonly message: string };
   const option = /'(-[^' ]*)/.exec(message)?.[1] ?? '';
   if (code === 'ERR_PARSE_ARGS_UNKNOWN_OPTION') return `There is no option "${option}".`;
-  return message.includes('argument missing') ? `The option "${option}" needs a value.` : `The option "${option}" takes no value.`;
+  return message.includes('argument missing')
+    ? `The option "${option}" needs a value.`
+    : `The option "${option}" takes no value.`;
 }
 
 function modeOf(given: string | undefined): Mode {

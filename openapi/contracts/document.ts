@@ -15,7 +15,13 @@ export const getIndex = contract({
   scope: 'open',
   summary: 'List the calls',
   description: 'A small index: every call with its address, and where the document is.',
-  reply: json(z.object({ engine: z.string().describe('Version of the computations.'), document: z.string(), calls: z.array(linkSchema) })),
+  reply: json(
+    z.object({
+      engine: z.string().describe('Version of the computations.'),
+      document: z.string(),
+      calls: z.array(linkSchema),
+    }),
+  ),
   cached: true,
   errors: [],
   example: {},
@@ -29,7 +35,9 @@ export const getDocument = contract({
   scope: 'open',
   summary: 'The OpenAPI document',
   description: 'This document, generated from the schemas that check requests and replies.',
-  reply: json(z.object({ openapi: z.string(), info: z.looseObject({ title: z.string(), version: z.string() }) }).loose()),
+  reply: json(
+    z.object({ openapi: z.string(), info: z.looseObject({ title: z.string(), version: z.string() }) }).loose(),
+  ),
   cached: true,
   errors: [],
   example: {},

@@ -20,11 +20,21 @@ export const plateQueryShape = {
   fen: fenSchema,
   mode: modeSchema.default('diagram'),
   layer: z.enum(plateLayers).default('command').describe('What is drawn over the board.'),
-  width: z.coerce.number().int().min(plateWidthMin).max(plateWidthMax).default(720).describe('Width of the whole figure in pixels.'),
+  width: z.coerce
+    .number()
+    .int()
+    .min(plateWidthMin)
+    .max(plateWidthMax)
+    .default(720)
+    .describe('Width of the whole figure in pixels.'),
   theme: z.enum(plateThemes).default('light'),
   side: sideSchema.default('white').describe('The side at the foot of the board.'),
   man: squareSchema.optional().describe('For the layer "mobility": the square of the man.'),
-  caption: z.string().max(plateCaptionMax).optional().describe('A line of text under the board, instead of the one from the reading.'),
+  caption: z
+    .string()
+    .max(plateCaptionMax)
+    .optional()
+    .describe('A line of text under the board, instead of the one from the reading.'),
   notes: yesNoSchema.default('no').describe('Whether the leading statements stand beside the board.'),
 };
 

@@ -64,7 +64,9 @@ export type ProblemCode = keyof typeof PROBLEMS;
 /** All problem codes, in the order of their status. */
 export const PROBLEM_CODES = Object.keys(PROBLEMS) as [ProblemCode, ...ProblemCode[]];
 
-export const problemCodeSchema = z.enum(PROBLEM_CODES).meta({ id: 'ProblemCode', description: 'A stable code of a problem.' });
+export const problemCodeSchema = z
+  .enum(PROBLEM_CODES)
+  .meta({ id: 'ProblemCode', description: 'A stable code of a problem.' });
 
 /** The stable `type` of a problem: an address of this API that explains it. */
 export function problemType(code: ProblemCode): string {

@@ -8,8 +8,15 @@ import { type AnyMethod, call, mediaOf, ORIGIN, promisedJson, routeFiles, routeM
 
 const REFUSED: readonly AnyMethod[] = ['GET', 'POST', 'PUT', 'PATCH', 'DELETE'];
 
-async function asked(file: string, method: AnyMethod, headers: Readonly<Record<string, string>> = {}): Promise<Response> {
-  const path = file.replace(/^app|\/route\.ts$/g, '').replace('[[...path]]', 'nowhere').replace('[code]', 'internal');
+async function asked(
+  file: string,
+  method: AnyMethod,
+  headers: Readonly<Record<string, string>> = {},
+): Promise<Response> {
+  const path = file
+    .replace(/^app|\/route\.ts$/g, '')
+    .replace('[[...path]]', 'nowhere')
+    .replace('[code]', 'internal');
   const handler = (await routeModule(file))[method];
   if (!handler) throw new Error(`${file} exports no ${method}`);
   return handler(new Request(ORIGIN + path, { method, headers }), { params: Promise.resolve({ code: 'internal' }) });
@@ -33,7 +40,10 @@ describe('every address', () => {
   });
 
   it.each(addresses)('%s may be called from any site', async (file) => {
-    const response = await asked(file, 'OPTIONS', { origin: 'https://example.org', 'access-control-request-method': 'POST' });
+    const response = await asked(file, 'OPTIONS', {
+      origin: 'https://example.org',
+      'access-control-request-method': 'POST',
+    });
     expect(response.status).toBe(204);
     expect(response.headers.get('access-control-allow-origin')).toBe('*');
     expect(response.headers.get('access-control-allow-methods')).toBe(response.headers.get('allow'));
@@ -62,13 +72,17 @@ describe('an address where nothing is', () => {
 
 describe('request ids', () => {
   it('are made anew for each answer', async () => {
-    const ids = await Promise.all([1, 2].map(async () => (await call(contracts.getHealth)).headers.get('x-request-id')));
+    const ids = await Promise.all(
+      [1, 2].map(async () => (await call(contracts.getHealth)).headers.get('x-request-id')),
+    );
     expect(ids[0]).toMatch(/^[\w-]{36}$/);
     expect(ids[0]).not.toBe(ids[1]);
   });
 
   it('are the caller’s own when they are harmless', async () => {
-    expect((await call(contracts.getHealth, { headers: { 'x-request-id': 'abc.123' } })).headers.get('x-request-id')).toBe('abc.123');
+    expect(
+      (await call(contracts.getHealth, { headers: { 'x-request-id': 'abc.123' } })).headers.get('x-request-id'),
+    ).toBe('abc.123');
     const odd = await call(contracts.getHealth, { headers: { 'x-request-id': '{"level":60}' } });
     expect(odd.headers.get('x-request-id')).toMatch(/^[\w-]{36}$/);
   });
@@ -81,7 +95,10 @@ describe('what the API says of itself', () => {
   });
 
   it('index: every call, with the address of the document', async () => {
-    const index = await promisedJson<{ calls: { id: string }[]; document: string }>(contracts.getIndex, await call(contracts.getIndex));
+    const index = await promisedJson<{ calls: { id: string }[]; document: string }>(
+      contracts.getIndex,
+      await call(contracts.getIndex),
+    );
     expect(index.calls.map(({ id }) => id)).toEqual(Object.keys(contracts));
     expect(index.document).toBe(contracts.getDocument.path);
   });
@@ -93,11 +110,18 @@ describe('what the API says of itself', () => {
 
   it.each(PROBLEM_CODES)('the type of the problem %s is an address that explains it', async (code) => {
     const refused = await call(contracts.getProblem, { params: { code } });
-    expect(await promisedJson(contracts.getProblem, refused)).toEqual({ type: `/api/v1/problems/${code}`, code, ...PROBLEMS[code] });
+    expect(await promisedJson(contracts.getProblem, refused)).toEqual({
+      type: `/api/v1/problems/${code}`,
+      code,
+      ...PROBLEMS[code],
+    });
   });
 
   it('a code that only an object’s prototype knows is not found', async () => {
     const response = await call(contracts.getProblem, { params: { code: 'constructor' } });
-    expect(await promisedJson<Problem>(contracts.getProblem, response)).toMatchObject({ status: 404, code: 'not-found' });
+    expect(await promisedJson<Problem>(contracts.getProblem, response)).toMatchObject({
+      status: 404,
+      code: 'not-found',
+    });
   });
 });

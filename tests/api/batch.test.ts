@@ -28,7 +28,9 @@ beforeEach(() => {
 });
 
 function thousand(): string[] {
-  return Array.from({ length: 1000 }, (_, index) => (index % 2 === 0 ? EXAMPLE_FEN.replace(/\d+$/, String(index + 1)) : `bad ${index}`));
+  return Array.from({ length: 1000 }, (_, index) =>
+    index % 2 === 0 ? EXAMPLE_FEN.replace(/\d+$/, String(index + 1)) : `bad ${index}`,
+  );
 }
 
 describe('POST /readings/batch', () => {
@@ -39,12 +41,19 @@ describe('POST /readings/batch', () => {
     expect(lines).toHaveLength(1000);
     for (const [index, line] of lines.entries()) {
       if (index % 2 === 0) expect(line).toMatchObject({ fen: expect.stringMatching(new RegExp(` ${index + 1}$`)) });
-      else expect(line).toMatchObject({ line: index + 1, error: { code: expect.any(String), message: expect.any(String) } });
+      else
+        expect(line).toMatchObject({
+          line: index + 1,
+          error: { code: expect.any(String), message: expect.any(String) },
+        });
     }
   });
 
   it('answers whole readings when no parts are picked', async () => {
-    const [line] = await promisedLines<BatchLine>(createReadings, await call(createReadings, { body: { fens: [EXAMPLE_ENDING] } }));
+    const [line] = await promisedLines<BatchLine>(
+      createReadings,
+      await call(createReadings, { body: { fens: [EXAMPLE_ENDING] } }),
+    );
     expect(line).toHaveProperty('squares.63');
   });
 

@@ -69,8 +69,19 @@ ajv.addSchema({ ...document, $id: 'waypost' });
 
 /** Holds a value against what the document promises for a call, status and media type. */
 export function expectPromised(contract: Contract, status: number, media: string, value: unknown): void {
-  const steps = ['paths', contract.path, contract.method.toLowerCase(), 'responses', String(status), 'content', media, 'schema'];
-  const pointer = steps.map((step) => `/${encodeURIComponent(step.replaceAll('~', '~0').replaceAll('/', '~1'))}`).join('');
+  const steps = [
+    'paths',
+    contract.path,
+    contract.method.toLowerCase(),
+    'responses',
+    String(status),
+    'content',
+    media,
+    'schema',
+  ];
+  const pointer = steps
+    .map((step) => `/${encodeURIComponent(step.replaceAll('~', '~0').replaceAll('/', '~1'))}`)
+    .join('');
   const validate = ajv.getSchema(`waypost#${pointer}`);
   if (!validate) throw new Error(`The document promises nothing for ${contract.id} ${status} ${media}.`);
   expect(validate(value), `${contract.id} ${status}: ${JSON.stringify(validate.errors)}`).toBe(true);
@@ -82,14 +93,20 @@ export function mediaOf(response: Response): string {
 }
 
 /** The JSON of an answer, after it has been held against the document. */
-export async function promisedJson<T = { readonly [key: string]: unknown }>(contract: Contract, response: Response): Promise<T> {
+export async function promisedJson<T = { readonly [key: string]: unknown }>(
+  contract: Contract,
+  response: Response,
+): Promise<T> {
   const value: unknown = await response.json();
   expectPromised(contract, response.status, mediaOf(response), value);
   return value as T;
 }
 
 /** The lines of an NDJSON answer, each held against the document. */
-export async function promisedLines<T = { readonly [key: string]: unknown }>(contract: Contract, response: Response): Promise<T[]> {
+export async function promisedLines<T = { readonly [key: string]: unknown }>(
+  contract: Contract,
+  response: Response,
+): Promise<T[]> {
   const text = await response.text();
   expect(text.endsWith('\n')).toBe(true);
   return text

@@ -17,7 +17,10 @@ describe('the OpenAPI document', () => {
 
   it('as committed, with its types, is what `npm run generate` writes', async () => {
     for (const [name, text] of Object.entries(await generatedFiles())) {
-      expect(readFileSync(`openapi/${name}`, 'utf8') === text, `openapi/${name} is stale: run \`npm run generate\``).toBe(true);
+      expect(
+        readFileSync(`openapi/${name}`, 'utf8') === text,
+        `openapi/${name} is stale: run \`npm run generate\``,
+      ).toBe(true);
     }
   });
 
@@ -29,18 +32,22 @@ describe('the OpenAPI document', () => {
   });
 
   it('describes every field of a request and keeps unknown ones out', () => {
-    const schemas = (apiDocument().components as { schemas: Record<string, { additionalProperties?: boolean }> }).schemas;
+    const schemas = (apiDocument().components as { schemas: Record<string, { additionalProperties?: boolean }> })
+      .schemas;
     expect(schemas.ReadingRequest?.additionalProperties).toBe(false);
     expect(schemas.BatchRequest?.additionalProperties).toBe(false);
     // Replies promise that fields may be added, so a client may not refuse them.
     expect(schemas.Reading?.additionalProperties).toBeUndefined();
   });
 
-  it.each(contractList.map((contract) => [contract.id, contract] as const))('the example of %s is answered as promised', async (_, contract) => {
-    const response = await call(contract, contract.example);
-    expect(response.status).toBe(200);
-    expect(mediaOf(response)).toBe(contract.reply.media);
-    if (contract.reply.form === 'json') await promisedJson(contract, response);
-    if (contract.reply.form === 'lines') expect(await promisedLines(contract, response)).toHaveLength(3);
-  });
+  it.each(contractList.map((contract) => [contract.id, contract] as const))(
+    'the example of %s is answered as promised',
+    async (_, contract) => {
+      const response = await call(contract, contract.example);
+      expect(response.status).toBe(200);
+      expect(mediaOf(response)).toBe(contract.reply.media);
+      if (contract.reply.form === 'json') await promisedJson(contract, response);
+      if (contract.reply.form === 'lines') expect(await promisedLines(contract, response)).toHaveLength(3);
+    },
+  );
 });

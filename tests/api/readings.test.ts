@@ -27,7 +27,9 @@ describe('POST /readings', () => {
   });
 
   it('completes a FEN of four fields, as in EPD', async () => {
-    const response = await call(createReading, { body: { fen: EXAMPLE_ENDING.split(' ').slice(0, 4).join(' '), include: ['lead'] } });
+    const response = await call(createReading, {
+      body: { fen: EXAMPLE_ENDING.split(' ').slice(0, 4).join(' '), include: ['lead'] },
+    });
     expect(await promisedJson(createReading, response)).toMatchObject({ fen: EXAMPLE_ENDING });
   });
 
@@ -35,7 +37,10 @@ describe('POST /readings', () => {
     const fen = '8/8/8/3p4/3P4/8/8/8 w - - 0 1';
     const strict = await promisedJson<Problem>(createReading, await call(createReading, { body: { fen } }));
     expect(strict).toMatchObject({ code: 'fen-refused', path: '/fen', faults: [{ in: 'body', field: 'board' }] });
-    const diagram = await promisedJson<Reading>(createReading, await call(createReading, { body: { fen, mode: 'diagram' } }));
+    const diagram = await promisedJson<Reading>(
+      createReading,
+      await call(createReading, { body: { fen, mode: 'diagram' } }),
+    );
     expect(diagram.kings).toEqual({ white: null, black: null });
     expect(diagram.warnings.length).toBeGreaterThan(0);
   });
@@ -74,7 +79,9 @@ describe('POST /readings', () => {
     const init = { method: 'POST', headers: { 'content-type': 'application/json' }, body: endless, duplex: 'half' };
     const response = await POST(new Request('http://waypost.test/api/v1/readings', init as RequestInit));
     expect(response.status).toBe(413);
-    expect(await promisedJson<Problem>(createReading, response)).toMatchObject({ bound: { name: 'bodyBytes', max: 4096 } });
+    expect(await promisedJson<Problem>(createReading, response)).toMatchObject({
+      bound: { name: 'bodyBytes', max: 4096 },
+    });
     expect(sent).toBeLessThanOrEqual(4096 + 3 * 1024);
   });
 
@@ -84,22 +91,40 @@ describe('POST /readings', () => {
     ['ten thousand brackets', '['.repeat(4000)],
   ] as const)('refuses %s as not JSON', async (_, body) => {
     const { POST } = await import('@/app/api/v1/readings/route');
-    const response = await POST(new Request('http://waypost.test/api/v1/readings', { method: 'POST', headers: { 'content-type': 'application/json' }, body }));
+    const response = await POST(
+      new Request('http://waypost.test/api/v1/readings', {
+        method: 'POST',
+        headers: { 'content-type': 'application/json' },
+        body,
+      }),
+    );
     expect(response.status).toBe(400);
   });
 
-  it.each(['application/json; charset=utf-8', 'Application/JSON', 'application/vnd.chess+json'])('takes the content type %s', async (type) => {
-    const response = await call(createReading, { body: { fen: EXAMPLE_FEN, include: ['lead'] }, headers: { 'content-type': type } });
-    expect(response.status).toBe(200);
-  });
+  it.each(['application/json; charset=utf-8', 'Application/JSON', 'application/vnd.chess+json'])(
+    'takes the content type %s',
+    async (type) => {
+      const response = await call(createReading, {
+        body: { fen: EXAMPLE_FEN, include: ['lead'] },
+        headers: { 'content-type': type },
+      });
+      expect(response.status).toBe(200);
+    },
+  );
 
-  it.each(['text/json-ish', 'application/jsonp', 'multipart/form-data', 'text/plain; application/json'])('refuses the content type %s', async (type) => {
-    expect((await call(createReading, { body: { fen: EXAMPLE_FEN }, headers: { 'content-type': type } })).status).toBe(415);
-  });
+  it.each(['text/json-ish', 'application/jsonp', 'multipart/form-data', 'text/plain; application/json'])(
+    'refuses the content type %s',
+    async (type) => {
+      expect(
+        (await call(createReading, { body: { fen: EXAMPLE_FEN }, headers: { 'content-type': type } })).status,
+      ).toBe(415);
+    },
+  );
 });
 
 describe('GET /readings', () => {
-  const get = (query: string | Readonly<Record<string, string>>, headers: Readonly<Record<string, string>> = {}) => call(getReading, { query, headers });
+  const get = (query: string | Readonly<Record<string, string>>, headers: Readonly<Record<string, string>> = {}) =>
+    call(getReading, { query, headers });
 
   it('answers the same reading as POST', async () => {
     const got = await promisedJson(getReading, await get({ fen: EXAMPLE_FEN }));
@@ -124,7 +149,12 @@ describe('GET /readings', () => {
     const etag = async (query: Readonly<Record<string, string>>) => (await get(query)).headers.get('etag');
     const own = await etag({ fen: EXAMPLE_FEN });
     expect(await etag({ fen: `  ${EXAMPLE_FEN.replaceAll(' ', '  ')} ` })).toBe(own);
-    const different = [own, await etag({ fen: EXAMPLE_ENDING }), await etag({ fen: EXAMPLE_FEN, mode: 'diagram' }), await etag({ fen: EXAMPLE_FEN, include: 'men' })];
+    const different = [
+      own,
+      await etag({ fen: EXAMPLE_ENDING }),
+      await etag({ fen: EXAMPLE_FEN, mode: 'diagram' }),
+      await etag({ fen: EXAMPLE_FEN, include: 'men' }),
+    ];
     expect(new Set(different).size).toBe(4);
   });
 

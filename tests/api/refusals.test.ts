@@ -43,21 +43,31 @@ describe('declared problems', () => {
     expect(response.status).toBe(PROBLEMS[code].status);
     expect(response.headers.get('content-type')).toBe('application/problem+json');
     const problem = await promisedJson<Problem>(contract, response);
-    expect(problem).toMatchObject({ code, type: problemType(code), status: response.status, title: PROBLEMS[code].title });
+    expect(problem).toMatchObject({
+      code,
+      type: problemType(code),
+      status: response.status,
+      title: PROBLEMS[code].title,
+    });
     expect(problem.requestId).toBe(response.headers.get('x-request-id'));
-    expect(problem.instance).toBe(contract.path.replace('{code}', code === 'not-found' ? 'no-such-code' : 'x'.repeat(65)));
+    expect(problem.instance).toBe(
+      contract.path.replace('{code}', code === 'not-found' ? 'no-such-code' : 'x'.repeat(65)),
+    );
   });
 
-  it.each(contractList.map((contract) => [contract.id, contract] as const))('%s answers our own mistakes blankly', async (_, contract) => {
-    const broken = route({ ...contract, params: undefined, query: undefined, body: undefined }, () => {
-      throw new Error('secret of the house');
-    });
-    const response = await broken(new Request(ORIGIN + contract.path, { method: contract.method }));
-    expect(response.status).toBe(500);
-    const text = await response.text();
-    expect(text).not.toContain('secret');
-    expect(JSON.parse(text)).toMatchObject({ code: 'internal', requestId: response.headers.get('x-request-id') });
-  });
+  it.each(contractList.map((contract) => [contract.id, contract] as const))(
+    '%s answers our own mistakes blankly',
+    async (_, contract) => {
+      const broken = route({ ...contract, params: undefined, query: undefined, body: undefined }, () => {
+        throw new Error('secret of the house');
+      });
+      const response = await broken(new Request(ORIGIN + contract.path, { method: contract.method }));
+      expect(response.status).toBe(500);
+      const text = await response.text();
+      expect(text).not.toContain('secret');
+      expect(JSON.parse(text)).toMatchObject({ code: 'internal', requestId: response.headers.get('x-request-id') });
+    },
+  );
 
   it('a reply that was never promised is not sent', async () => {
     const health = contractList.find(({ id }) => id === 'getHealth') as Contract;
@@ -68,6 +78,10 @@ describe('declared problems', () => {
   it('a field that was never promised does not leave', async () => {
     const health = contractList.find(({ id }) => id === 'getHealth') as Contract;
     const loose = route(health, () => ({ status: 'ready', engine: '1', uptimeSeconds: 2, password: 'x' }));
-    expect(await (await loose(new Request(ORIGIN + health.path))).json()).toEqual({ status: 'ready', engine: '1', uptimeSeconds: 2 });
+    expect(await (await loose(new Request(ORIGIN + health.path))).json()).toEqual({
+      status: 'ready',
+      engine: '1',
+      uptimeSeconds: 2,
+    });
   });
 });

@@ -14,10 +14,13 @@ describe('contracts and route files', () => {
     expect(routeFiles()).toEqual([...wanted, NOTHING_HERE].sort());
   });
 
-  it.each(contractList.map((contract) => [contract.id, contract] as const))('%s is what its file serves', async (_, contract) => {
-    const served = (await routeModule(routeFileOf(contract.path)))[contract.method] as Route;
-    expect(served.contract).toBe(contract);
-  });
+  it.each(contractList.map((contract) => [contract.id, contract] as const))(
+    '%s is what its file serves',
+    async (_, contract) => {
+      const served = (await routeModule(routeFileOf(contract.path)))[contract.method] as Route;
+      expect(served.contract).toBe(contract);
+    },
+  );
 
   it.each(routeFiles())('%s serves no call that has no contract', async (file) => {
     const module = await routeModule(file);

@@ -37,13 +37,18 @@ const START_TIMEOUT_MS = 30_000;
 export async function startBuiltServer(): Promise<BuiltServer> {
   const port = await freePort();
   const url = `http://127.0.0.1:${port}`;
-  const child = spawn(process.execPath, ['node_modules/next/dist/bin/next', 'start', '-H', '127.0.0.1', '-p', String(port)], {
-    stdio: ['ignore', 'ignore', 'inherit'],
-    env: { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
-  });
+  const child = spawn(
+    process.execPath,
+    ['node_modules/next/dist/bin/next', 'start', '-H', '127.0.0.1', '-p', String(port)],
+    {
+      stdio: ['ignore', 'ignore', 'inherit'],
+      env: { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
+    },
+  );
   const deadline = Date.now() + START_TIMEOUT_MS;
   while (!(await isLive(url))) {
-    if (child.exitCode !== null || Date.now() > deadline) throw new Error('The built server does not start; run `npm run build` first.');
+    if (child.exitCode !== null || Date.now() > deadline)
+      throw new Error('The built server does not start; run `npm run build` first.');
     await new Promise((resolve) => setTimeout(resolve, 100));
   }
   return { url, stop: () => stopped(child) };
@@ -55,7 +60,10 @@ export async function httpFigures(url: string, options: HttpBenchOptions): Promi
 }
 
 /** POST /readings beside GET /api/health, requests a second. */
-export async function readingsBesideTrivial(url: string, { fens, rounds, roundSeconds, connections }: HttpBenchOptions): Promise<Figure[]> {
+export async function readingsBesideTrivial(
+  url: string,
+  { fens, rounds, roundSeconds, connections }: HttpBenchOptions,
+): Promise<Figure[]> {
   let asked = 0;
   const nextBody = (): string => JSON.stringify({ fen: fens[asked++ % fens.length] });
   const trivial = { url: `${url}/api/health`, connections, duration: roundSeconds };
@@ -79,8 +87,18 @@ export async function readingsBesideTrivial(url: string, { fens, rounds, roundSe
   }
   const beside = `GET /api/health of the same server, ${round(median(pairs.map((pair) => pair.trivial)))} requests a second`;
   return [
-    { name: 'http-readings-per-second', value: round(median(pairs.map((pair) => pair.readings))), unit: 'requests/s', beside },
-    { name: 'http-readings-vs-trivial', value: round(median(pairs.map((pair) => pair.readings / pair.trivial)), 3), unit: 'ratio', beside },
+    {
+      name: 'http-readings-per-second',
+      value: round(median(pairs.map((pair) => pair.readings))),
+      unit: 'requests/s',
+      beside,
+    },
+    {
+      name: 'http-readings-vs-trivial',
+      value: round(median(pairs.map((pair) => pair.readings / pair.trivial)), 3),
+      unit: 'ratio',
+      beside,
+    },
   ];
 }
 
@@ -103,9 +121,24 @@ export async function batchFigures(url: string, fens: readonly string[]): Promis
   if (lines !== fens.length) throw new Error(`${fens.length} FENs were answered by ${lines} lines.`);
   const times = await others.stop();
   return [
-    { name: 'http-batch-positions-per-second', value: round(fens.length / seconds), unit: 'positions/s', beside: `one batch of ${fens.length}` },
-    { name: 'http-batch-first-line-ms', value: round(firstLineMs, 1), unit: 'ms', beside: `whole batch ${round(seconds * 1000)} ms` },
-    { name: 'http-health-during-batch-ms-p50', value: round(median(times), 1), unit: 'ms', beside: `${times.length} requests during the batch` },
+    {
+      name: 'http-batch-positions-per-second',
+      value: round(fens.length / seconds),
+      unit: 'positions/s',
+      beside: `one batch of ${fens.length}`,
+    },
+    {
+      name: 'http-batch-first-line-ms',
+      value: round(firstLineMs, 1),
+      unit: 'ms',
+      beside: `whole batch ${round(seconds * 1000)} ms`,
+    },
+    {
+      name: 'http-health-during-batch-ms-p50',
+      value: round(median(times), 1),
+      unit: 'ms',
+      beside: `${times.length} requests during the batch`,
+    },
   ];
 }
 
@@ -131,7 +164,8 @@ function healthTimes(url: string): { readonly stop: () => Promise<number[]> } {
 
 async function perSecond(options: autocannon.Options): Promise<number> {
   const result = await autocannon(options);
-  if (result.non2xx > 0 || result.errors > 0) throw new Error(`${options.url}: ${result.non2xx} refusals, ${result.errors} errors.`);
+  if (result.non2xx > 0 || result.errors > 0)
+    throw new Error(`${options.url}: ${result.non2xx} refusals, ${result.errors} errors.`);
   return result.requests.total / result.duration;
 }
 
@@ -158,7 +192,9 @@ function freePort(): Promise<number> {
     server.once('error', reject);
     server.listen(0, '127.0.0.1', () => {
       const address = server.address();
-      server.close(() => (address !== null && typeof address === 'object' ? resolve(address.port) : reject(new Error('No port.'))));
+      server.close(() =>
+        address !== null && typeof address === 'object' ? resolve(address.port) : reject(new Error('No port.')),
+      );
     });
   });
 }

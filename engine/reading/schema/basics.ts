@@ -4,7 +4,9 @@ import { FILES, KINDS, RANKS, SIDES, type SquareName } from '../../types';
 
 const SQUARE_NAMES = RANKS.flatMap((rank) => FILES.map((file): SquareName => `${file}${rank}`));
 
-export const squareSchema = z.enum(SQUARE_NAMES).meta({ id: 'Square', description: 'A square by its name, "a1" to "h8".' });
+export const squareSchema = z
+  .enum(SQUARE_NAMES)
+  .meta({ id: 'Square', description: 'A square by its name, "a1" to "h8".' });
 export const sideSchema = z.enum(SIDES).meta({ id: 'Side', description: 'A side.' });
 export const kindSchema = z.enum(KINDS).meta({ id: 'Kind', description: 'A kind of man.' });
 export const fileSchema = z.enum(FILES).meta({ id: 'File', description: 'A file by its letter.' });

@@ -15,17 +15,24 @@ import { statementSchema } from './statement';
 const userSchema = z.object({
   from: squareSchema.describe('Where the man stands now.'),
   kind: kindSchema,
-  moves: z.int().min(0).describe('Own moves needed to stand there safely, the enemy standing still; 0: it stands there.'),
+  moves: z
+    .int()
+    .min(0)
+    .describe('Own moves needed to stand there safely, the enemy standing still; 0: it stands there.'),
 });
 
 export const squareReadingSchema = z
   .object({
     square: squareSchema,
     occupant: z.object({ side: sideSchema, kind: kindSchema }).nullable(),
-    attackers: squaresBySideSchema.describe('Men that attack the square, cheapest first, pinned men included (FIDE Laws 3.1).'),
+    attackers: squaresBySideSchema.describe(
+      'Men that attack the square, cheapest first, pinned men included (FIDE Laws 3.1).',
+    ),
     held: squaresBySideSchema.describe('Attackers that an absolute pin keeps from capturing here.'),
     behind: squaresBySideSchema.describe('Sliders that would join after a friendly man in front has captured here.'),
-    command: z.enum(['white', 'black', 'open', 'disputed']).describe('Whose knight would be safe here: one side’s, both (open) or neither (disputed).'),
+    command: z
+      .enum(['white', 'black', 'open', 'disputed'])
+      .describe('Whose knight would be safe here: one side’s, both (open) or neither (disputed).'),
     exchange: z
       .object({ white: z.number().nullable(), black: z.number().nullable() })
       .describe('Gain in pawns for the side that begins to capture here; null where it cannot.'),
@@ -48,7 +55,9 @@ export const manReadingSchema = z
       .array(z.object({ square: squareSchema, loses: z.number().describe('Pawns lost there if the man leaves.') }))
       .describe('What falls if it leaves.'),
     trapped: z.boolean().describe('Attackable and without a safe square.'),
-    notes: z.array(z.string()).describe('Named traits: bad-bishop, bad-but-active, rim, outpost, overloaded and others.'),
+    notes: z
+      .array(z.string())
+      .describe('Named traits: bad-bishop, bad-but-active, rim, outpost, overloaded and others.'),
   })
   .meta({ id: 'ManReading', description: 'One man and what it can do from where it stands.' });
 
@@ -63,7 +72,9 @@ export const pawnSideSchema = z
     candidates: squaresSchema,
     onLight: z.int(),
     onDark: z.int(),
-    majorities: z.array(z.enum(['queenside', 'centre', 'kingside'])).describe('Wings (a to c, d to e, f to h) where this side has more pawns.'),
+    majorities: z
+      .array(z.enum(['queenside', 'centre', 'kingside']))
+      .describe('Wings (a to c, d to e, f to h) where this side has more pawns.'),
   })
   .meta({ id: 'PawnSide', description: 'The pawns of one side.' });
 
@@ -85,11 +96,16 @@ export const outpostSchema = z
   .object({
     square: squareSchema,
     side: sideSchema.describe('The side that may use it.'),
-    rank: z.enum(['outpost', 'advanced']).describe('"advanced": a pawn may still challenge it, or no pawn supports it.'),
+    rank: z
+      .enum(['outpost', 'advanced'])
+      .describe('"advanced": a pawn may still challenge it, or no pawn supports it.'),
     deep: z.boolean().describe('On the side’s 7th rank.'),
     hold: z.enum(['permanent', 'fixed', 'open']),
     challenge: pawnDistance.nullable().describe('The soonest enemy pawn that can attack it.'),
-    support: z.object({ pawn: squareSchema, moves: z.int() }).nullable().describe('The soonest own pawn that can guard it; moves 0: it does now.'),
+    support: z
+      .object({ pawn: squareSchema, moves: z.int() })
+      .nullable()
+      .describe('The soonest own pawn that can guard it; moves 0: it does now.'),
     occupant: squareSchema.nullable().describe('The square itself when an own man stands there.'),
     users: z.array(userSchema),
     tradable: z.boolean().describe('The enemy has a minor piece that can challenge it.'),
@@ -162,7 +178,13 @@ export const readingSchema = z
       black: pawnSideSchema,
       rams: z.array(z.object({ white: squareSchema, black: squareSchema })),
       levers: z.array(
-        z.object({ from: squareSchema, against: squareSchema, side: sideSchema, moves: z.int(), supported: z.boolean() }),
+        z.object({
+          from: squareSchema,
+          against: squareSchema,
+          side: sideSchema,
+          moves: z.int(),
+          supported: z.boolean(),
+        }),
       ),
       fixedness: z.object({ all: z.number().nullable(), centre: z.number().nullable() }),
       structure: structureMatchSchema.nullable(),
@@ -172,7 +194,13 @@ export const readingSchema = z
     files: z.array(fileReadingSchema).describe('8, a first.'),
     diagonals: z.array(diagonalReadingSchema),
     colourComplexes: z.array(
-      z.object({ side: sideSchema, colour: colourSchema, squares: squaresSchema, ownBishop: z.boolean(), enemyBishop: z.boolean() }),
+      z.object({
+        side: sideSchema,
+        colour: colourSchema,
+        squares: squaresSchema,
+        ownBishop: z.boolean(),
+        enemyBishop: z.boolean(),
+      }),
     ),
     kings: z.object({ white: kingReadingSchema.nullable(), black: kingReadingSchema.nullable() }),
     totals: z.object({ white: totalsSchema, black: totalsSchema }),

@@ -6,5 +6,9 @@ const startedAt = Date.now();
 
 /** It answers, and it needs nothing that could be missing: so it is ready. */
 export async function health(ctx: Context) {
-  return { status: 'ready' as const, engine: engineVersion, uptimeSeconds: Math.max(0, ctx.now().getTime() - startedAt) / 1000 };
+  return {
+    status: 'ready' as const,
+    engine: engineVersion,
+    uptimeSeconds: Math.max(0, ctx.now().getTime() - startedAt) / 1000,
+  };
 }

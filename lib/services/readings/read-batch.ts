@@ -19,7 +19,10 @@ function* linesOf(ctx: Context, { fens, mode, include }: BatchRequest): Generato
       yield result.ok ? partsOf(result.value, include) : { error: result.fault[0], line };
     } catch (error) {
       log.error({ err: error, requestId: ctx.requestId, line }, 'our own mistake');
-      yield { error: { code: 'internal', field: 'text', message: 'This position could not be read, by our mistake.' }, line };
+      yield {
+        error: { code: 'internal', field: 'text', message: 'This position could not be read, by our mistake.' },
+        line,
+      };
     }
   }
 }

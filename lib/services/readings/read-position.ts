@@ -7,7 +7,10 @@ import { computeReading } from './engine';
 import { recentReadings } from './recent';
 
 /** The reading of a FEN. Throws `fen-refused` with every fault that the engine found. */
-export async function readPosition(_ctx: Context, { fen, mode }: { readonly fen: string; readonly mode: Mode }): Promise<Reading> {
+export async function readPosition(
+  _ctx: Context,
+  { fen, mode }: { readonly fen: string; readonly mode: Mode },
+): Promise<Reading> {
   const key = `${mode} ${fen}`;
   const kept = recentReadings.get(key);
   if (kept) return kept;
@@ -19,6 +22,12 @@ export async function readPosition(_ctx: Context, { fen, mode }: { readonly fen:
 
 function fenRefused(faults: readonly [Fault, ...Fault[]]): AppError {
   return new AppError('fen-refused', faults.map((fault) => fault.message).join(' '), {
-    faults: faults.map(({ code, field, message, square }) => ({ path: '/fen', code, field, message, ...(square && { square }) })),
+    faults: faults.map(({ code, field, message, square }) => ({
+      path: '/fen',
+      code,
+      field,
+      message,
+      ...(square && { square }),
+    })),
   });
 }

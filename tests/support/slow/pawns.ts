@@ -23,7 +23,9 @@ const forward = (side: Side, square: Square, files: number, ranks: number) =>
 
 /** Whether a pawn of the side attacks the square now. */
 export function slowAttacked(position: Position, side: Side, square: Square): boolean {
-  return slowPawns(position, side).some((pawn) => forward(side, pawn, -1, 1) === square || forward(side, pawn, 1, 1) === square);
+  return slowPawns(position, side).some(
+    (pawn) => forward(side, pawn, -1, 1) === square || forward(side, pawn, 1, 1) === square,
+  );
 }
 
 /** The claims about one pawn, by the definitions of the handbooks as engine/pawns states them. */
@@ -64,7 +66,8 @@ export function slowPawn(position: Position, side: Side, pawn: Square) {
 function wayAttacked(position: Position, side: Side, pawn: Square, neighbours: Square[]): boolean {
   const level = Math.min(...neighbours.map((one) => rankFor(side, one)));
   return SQUARES.some((square) => {
-    const onTheWay = sameFile(square, pawn) && rankFor(side, square) > rankFor(side, pawn) && rankFor(side, square) <= level;
+    const onTheWay =
+      sameFile(square, pawn) && rankFor(side, square) > rankFor(side, pawn) && rankFor(side, square) <= level;
     return onTheWay && slowAttacked(position, other(side), square);
   });
 }

@@ -10,7 +10,10 @@ type Line = { readonly fen?: string; readonly line?: number; readonly error?: { 
 
 function parsed(output: string): Line[] {
   expect(output.endsWith('\n')).toBe(true);
-  return output.slice(0, -1).split('\n').map((line) => JSON.parse(line) as Line);
+  return output
+    .slice(0, -1)
+    .split('\n')
+    .map((line) => JSON.parse(line) as Line);
 }
 
 describe('waypost read -', () => {
@@ -43,7 +46,10 @@ describe('waypost read -', () => {
   });
 
   it('refuses a line without end without keeping it', async () => {
-    const { output } = await ran(['read', '-'], [...Array.from({ length: 1000 }, () => 'p'.repeat(10_000)), `\n${EXAMPLE_FEN}\n`]);
+    const { output } = await ran(
+      ['read', '-'],
+      [...Array.from({ length: 1000 }, () => 'p'.repeat(10_000)), `\n${EXAMPLE_FEN}\n`],
+    );
     expect(parsed(output)).toMatchObject([{ line: 1, error: { code: 'too-long' } }, { fen: EXAMPLE_FEN }]);
   });
 
@@ -69,7 +75,9 @@ describe('waypost read -', () => {
 
 describe('the command as a process', () => {
   it('ends quietly when its reader stops early', async () => {
-    const child = spawn(process.execPath, ['--import', 'tsx', 'lib/cli/waypost.ts', 'read', '-'], { stdio: ['pipe', 'pipe', 'pipe'] });
+    const child = spawn(process.execPath, ['--import', 'tsx', 'lib/cli/waypost.ts', 'read', '-'], {
+      stdio: ['pipe', 'pipe', 'pipe'],
+    });
     let errors = '';
     child.stderr.on('data', (chunk) => {
       errors += String(chunk);

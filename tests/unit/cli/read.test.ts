@@ -18,7 +18,8 @@ describe('waypost read "<FEN>"', () => {
     expect(page.output).toContain('8 | r : b q r : k : |');
     expect(page.output).toContain('1 | R   :   : R K   |');
     const flowing = page.output.replace(/\s+/g, ' ');
-    for (const { text } of readingSchema.parse(JSON.parse(data.output)).statements) expect(flowing).toContain(text.replace(/\s+/g, ' '));
+    for (const { text } of readingSchema.parse(JSON.parse(data.output)).statements)
+      expect(flowing).toContain(text.replace(/\s+/g, ' '));
   });
 
   it('prints the leading statements first', async () => {
@@ -83,10 +84,13 @@ describe('waypost on commands that it does not understand', () => {
     expect(errors).toContain('--help');
   });
 
-  it.each([[['--help']], [['help']], [['read', '--help']], [['read', '-h']]])('%j explains the command within 80 columns', async (args) => {
-    const { code, output } = await ran(args);
-    expect(code).toBe(0);
-    expect(output).toContain('--mode diagram');
-    for (const line of output.split('\n')) expect(line.length).toBeLessThanOrEqual(80);
-  });
+  it.each([[['--help']], [['help']], [['read', '--help']], [['read', '-h']]])(
+    '%j explains the command within 80 columns',
+    async (args) => {
+      const { code, output } = await ran(args);
+      expect(code).toBe(0);
+      expect(output).toContain('--mode diagram');
+      for (const line of output.split('\n')) expect(line.length).toBeLessThanOrEqual(80);
+    },
+  );
 });

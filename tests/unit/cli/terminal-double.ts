@@ -22,6 +22,11 @@ function kept(): { readonly stream: Writable; readonly text: () => string } {
 /** Runs the command as the terminal would. Input may come in pieces, as from a pipe. */
 export async function ran(args: readonly string[], input: readonly string[] = [], colour = false): Promise<Ran> {
   const [output, errors] = [kept(), kept()];
-  const code = await runWaypost(args, { input: Readable.from(input), output: output.stream, errors: errors.stream, colour });
+  const code = await runWaypost(args, {
+    input: Readable.from(input),
+    output: output.stream,
+    errors: errors.stream,
+    colour,
+  });
   return { code, output: output.text(), errors: errors.text() };
 }

@@ -6,11 +6,16 @@ import { readPosition } from '@/lib/services/readings/read-position';
 import { readingEtag } from '@/lib/services/readings/reading-etag';
 import { contracts } from '@/openapi/contracts';
 
-export const POST = route(contracts.createReading, async ({ ctx, body }) => partsOf(await readPosition(ctx, body), body.include));
+export const POST = route(contracts.createReading, async ({ ctx, body }) =>
+  partsOf(await readPosition(ctx, body), body.include),
+);
 
 export const GET = route(contracts.getReading, async ({ ctx, query }) => {
   const reading = await readPosition(ctx, query);
-  return cacheable({ etag: readingEtag(reading, ...(query.include ?? [])), value: () => partsOf(reading, query.include) });
+  return cacheable({
+    etag: readingEtag(reading, ...(query.include ?? [])),
+    value: () => partsOf(reading, query.include),
+  });
 });
 
 export const { HEAD, OPTIONS, PUT, PATCH, DELETE } = others({ GET, POST });
