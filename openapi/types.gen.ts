@@ -330,6 +330,8 @@ export interface components {
              * @enum {string}
              */
             readonly rank: "outpost" | "advanced";
+            /** @description On the side’s 7th rank. */
+            readonly deep: boolean;
             /** @enum {string} */
             readonly hold: "permanent" | "fixed" | "open";
             /** @description The soonest enemy pawn that can attack it. */
@@ -674,7 +676,7 @@ export interface operations {
             readonly query: {
                 /**
                  * @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four.
-                 * @example r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10
+                 * @example r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11
                  */
                 readonly fen: components["schemas"]["Fen"];
                 readonly mode?: components["schemas"]["Mode"];
@@ -752,7 +754,7 @@ export interface operations {
             readonly content: {
                 /**
                  * @example {
-                 *       "fen": "r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10",
+                 *       "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11",
                  *       "include": [
                  *         "statements",
                  *         "lead"
@@ -844,7 +846,7 @@ export interface operations {
                 /**
                  * @example {
                  *       "fens": [
-                 *         "r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10",
+                 *         "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11",
                  *         "8/5ppp/4k3/3p4/3P1K2/4P3/5PPP/8 w - - 0 1",
                  *         "not a position"
                  *       ],
@@ -930,7 +932,7 @@ export interface operations {
             readonly query: {
                 /**
                  * @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four.
-                 * @example r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10
+                 * @example r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11
                  */
                 readonly fen: components["schemas"]["Fen"];
                 readonly mode?: components["schemas"]["Mode"];
@@ -1010,7 +1012,7 @@ export interface operations {
             readonly query: {
                 /**
                  * @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four.
-                 * @example r1bq1rk1/pp2bppp/2n1pn2/3p4/3P1B2/2NBPN2/PP3PPP/R2Q1RK1 w - - 0 10
+                 * @example r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11
                  */
                 readonly fen: components["schemas"]["Fen"];
                 readonly mode?: components["schemas"]["Mode"];

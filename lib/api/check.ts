@@ -1,9 +1,11 @@
 /**
  * Replies held against their schema.
  *
- * A reply marked `always` passes through its schema each time, so that what was never promised never leaves. One marked
- * `sampled` holds nothing but what the engine computed from the request itself; checking all of it costs about as much as
- * computing it, so in production the first reply of each call and then every hundredth is checked, and elsewhere each one.
+ * Every reply is written by its schema (lib/api/writer.ts), so fields that were never promised never leave. Whether the fields
+ * that do leave have the promised types is checked here: for replies marked `always` each time, for those marked
+ * `sampled` in production at the first reply of each call and then at every hundredth, and elsewhere each time too.
+ * Sampled are the readings: the engine alone makes them, from the request alone, and a check of one takes as long as a
+ * good part of computing it.
  */
 import type { z } from 'zod';
 
@@ -11,7 +13,11 @@ import type { z } from 'zod';
 const SAMPLE_EVERY = 100;
 
 /** A function that passes replies through their schema, or now and then only. Throws on a reply that was never promised. */
-export function replyCheck<S extends z.ZodType>(schema: S, how: 'always' | 'sampled', production: boolean): (value: z.output<S>) => z.output<S> {
+export function replyCheck<S extends z.ZodType>(
+  schema: S,
+  how: 'always' | 'sampled',
+  production: boolean,
+): (value: z.output<S>) => z.output<S> {
   if (how === 'always' || !production) return (value) => schema.parse(value);
   let count = 0;
   return (value) => {

@@ -13,6 +13,7 @@ import { commonHeaders, requestIdOf } from './headers';
 import { lineStream } from './lines';
 import { problemResponse } from './problem';
 import { readParams, readQuery } from './query';
+import { jsonWriter } from './writer';
 
 /** What a handler is given: the parsed request and the outside world. */
 export interface Call<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType> {
@@ -40,7 +41,7 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
   contract: Contract<P, Q, B, R>,
   handler: (call: Call<P, Q, B>) => Given<R> | Promise<Given<R>>,
 ): Route {
-  const write = writer(contract.reply);
+  const write = bodyWriter(contract.reply);
   const faultsIn = contract.body ? 'body' : 'query';
 
   async function answer(request: Request, requestId: string, segments?: Segments): Promise<Response> {
@@ -52,10 +53,15 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
       body: (contract.body && (await readBody(request, contract.body))) as z.output<B>,
     };
     const given = await handler(call);
-    const { value, etag, headers } = given instanceof Answer ? given : new Answer<ReplyValue<R>>({ value: () => given });
+    const { value, etag, headers } =
+      given instanceof Answer ? given : new Answer<ReplyValue<R>>({ value: () => given });
     const allHeaders = { ...commonHeaders(requestId), ...(etag && { ETag: etag }), ...headers };
-    if (etag && isUnchanged(request.headers.get('if-none-match'), etag)) return new Response(null, { status: 304, headers: allHeaders });
-    return new Response(write(await value()), { status: 200, headers: { 'Content-Type': mediaOf(contract.reply), ...allHeaders } });
+    if (etag && isUnchanged(request.headers.get('if-none-match'), etag))
+      return new Response(null, { status: 304, headers: allHeaders });
+    return new Response(write(await value()), {
+      status: 200,
+      headers: { 'Content-Type': mediaOf(contract.reply), ...allHeaders },
+    });
   }
 
   async function served(request: Request, segments?: Segments): Promise<Response> {
@@ -68,7 +74,10 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
       if (!(error instanceof AppError)) log.error({ err: error, requestId, call: contract.id }, 'our own mistake');
       response = problemResponse(error, { request, requestId, faultsIn });
     }
-    log.info({ requestId, call: contract.id, status: response.status, ms: Math.round((performance.now() - begun) * 10) / 10 }, 'answered');
+    log.info(
+      { requestId, call: contract.id, status: response.status, ms: Math.round((performance.now() - begun) * 10) / 10 },
+      'answered',
+    );
     return response;
   }
 
@@ -76,19 +85,12 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
 }
 
 /** How a reply's value becomes a body, checked on the way. Made once a route. */
-function writer(reply: Reply): (value: unknown) => BodyInit {
-  switch (reply.form) {
-    case 'json': {
-      const checked = replyCheck(reply.schema, reply.check, env.isProduction);
-      return (value) => JSON.stringify(checked(value));
-    }
-    case 'lines': {
-      const checked = replyCheck(reply.schema, reply.check, env.isProduction);
-      return (value) => lineStream(value as Iterable<unknown>, checked);
-    }
-    default:
-      return (value) => value as BodyInit;
-  }
+function bodyWriter(reply: Reply): (value: unknown) => BodyInit {
+  if (reply.form !== 'json' && reply.form !== 'lines') return (value) => value as BodyInit;
+  const checked = replyCheck(reply.schema, reply.check, env.isProduction);
+  const write = jsonWriter(reply.schema);
+  const text = (value: unknown): string => write(checked(value)) ?? 'null';
+  return reply.form === 'json' ? text : (value) => lineStream(value as Iterable<unknown>, text);
 }
 
 /** Text types say their encoding; JSON has only one (RFC 8259, 8.1). */
