@@ -27,7 +27,7 @@ export const LEVER_MOVES_MAX = 3;
 
 const NONE: readonly Lever[] = [];
 
-/** The levers of the pawn on a lane and rank of the view, soonest first; of two equally soon the one against the lower file. */
+/** The levers of the pawn on a lane and rank of the view, soonest first; of two equally soon the lower file's. */
 export function leversOf(view: PawnView, lane: number, rank: number): readonly Lever[] {
   const { own, enemy } = view;
   const landings = at(view.enemyAttacks, lane) & (at(AHEAD, rank) | (1 << rank));

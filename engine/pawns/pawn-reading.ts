@@ -34,7 +34,10 @@ export interface PawnReading {
   readonly passed: boolean;
   /** Passed and guarded by a pawn. */
   readonly protectedPassed: boolean;
-  /** Not passed, no pawn ahead on its file, and at least as many own pawns level or behind on the next files as enemy pawns ahead on them. */
+  /**
+   * Not passed, no pawn ahead on its file, and on the next files at least as many own pawns level or behind as
+   * enemy pawns ahead.
+   */
   readonly candidate: boolean;
   /** An enemy pawn stands on its stop square. */
   readonly rammed: boolean;
@@ -68,6 +71,7 @@ export function pawnReading(position: Position, view: PawnView, lane: number, ra
   const guarded = (at(view.attacks, lane) & bit) !== 0;
   const guards = (neighbours & (bit << 1)) !== 0;
   const passed = (ahead & enemyOnFile) === 0 && sentries === 0;
+  const helpers = at(COUNT, left & upTo) + at(COUNT, right & upTo);
   const stop = rank < 7 ? squareIn(view, lane, rank + 1) : null;
   const blockedBy = stop !== null && position.board[stop] !== 0 ? stop : null;
 
@@ -81,7 +85,7 @@ export function pawnReading(position: Position, view: PawnView, lane: number, ra
     halfOpen: enemyOnFile === 0,
     passed,
     protectedPassed: passed && guarded,
-    candidate: !passed && ((enemyOnFile | at(own, lane)) & ahead) === 0 && at(COUNT, left & upTo) + at(COUNT, right & upTo) >= countSentries(enemy, lane, ahead),
+    candidate: !passed && ((enemyOnFile | at(own, lane)) & ahead) === 0 && helpers >= countSentries(enemy, lane, ahead),
     rammed: (enemyOnFile & (bit << 1)) !== 0,
     stop,
     blockedBy,

@@ -1,4 +1,4 @@
-/** The pawns of one side together: islands, majorities, hanging pawns, minority attacks, and lists of its weak and passed pawns. */
+/** The pawns of one side together: islands, majorities, hanging pawns, minority attacks, weak and passed pawns. */
 import { colourOf } from '../board';
 import type { Side, Square } from '../types';
 import type { Lever } from './levers';
@@ -44,7 +44,10 @@ export interface PawnSideValue {
   readonly candidates: readonly Square[];
   /** Wings where this side has more pawns than the other. */
   readonly majorities: readonly Wing[];
-  /** Majorities that stand on no more files than the enemy's pawns there, being doubled, and so cannot make a passed pawn by themselves. */
+  /**
+   * Majorities that, being doubled, stand on no more files than the enemy's pawns there and so cannot make a
+   * passed pawn by themselves (so Edward Lasker, Chess Strategy, 1915, diagram 66).
+   */
   readonly crippledMajorities: readonly Wing[];
   readonly onLight: number;
   readonly onDark: number;
@@ -170,14 +173,24 @@ function minorityAttacks(view: PawnView, readings: readonly PawnReading[]): read
 
 const FIFTH_RANK = 4;
 
-/** The soonest lever of a pawn of one lane against a pawn of another that is reached by the side's fifth rank. */
-function soonestLever(view: PawnView, readings: readonly PawnReading[], from: number, against: number): Lever | undefined {
+/**
+ * The soonest lever of a pawn of one lane against a pawn of another that is reached by the side's fifth rank; of
+ * two equally soon the one further forward as the side sees it.
+ */
+function soonestLever(
+  view: PawnView,
+  readings: readonly PawnReading[],
+  from: number,
+  against: number,
+): Lever | undefined {
+  const rankOn = (lever: Lever) => (lever.on ^ view.flip) >> 3;
   let soonest: Lever | undefined;
   for (const pawn of readings) {
     if ((pawn.square & 7) + 1 !== from) continue;
     for (const lever of pawn.levers) {
-      if ((lever.against & 7) + 1 !== against || (lever.on ^ view.flip) >> 3 > FIFTH_RANK) continue;
-      if (!soonest || lever.moves < soonest.moves) soonest = lever;
+      if ((lever.against & 7) + 1 !== against || rankOn(lever) > FIFTH_RANK) continue;
+      const isSooner = !soonest || lever.moves < soonest.moves;
+      if (isSooner || (soonest && lever.moves === soonest.moves && rankOn(lever) > rankOn(soonest))) soonest = lever;
     }
   }
   return soonest;

@@ -1,13 +1,13 @@
 /**
  * How a named structure is written down, and how it is made ready for matching.
  *
- * A list of pawns is text, as one would note it: `d4` a pawn on d4, `e2|e3` one on either, `f` one anywhere on the
- * f-file. What is in `core` must be there, and no other pawn of that side on those files; files and squares in `bare` must hold no
- * pawn of that side; pawns of `usual` may be missing or stand elsewhere, and are counted. Core and usual pawns together are
- * the whole set of the model.
+ * A list of pawns is text, as one would note it: `d4` a pawn on d4, `e2|e3` one on either, `f` one anywhere on
+ * the f-file. What is in `core` must be there, and no other pawn of that side on those files; files and squares
+ * in `bare` must hold no pawn of that side; pawns of `usual` may be missing or stand elsewhere, and are counted.
+ * Core and usual pawns together are the whole set of the model.
  */
-import { FILES, type Side, type Square } from '../types';
 import { mirrored, sq, squareNamed } from '../board';
+import { type FileName, FILES, RANKS, type Side, type Square } from '../types';
 
 export interface StructureSide {
   readonly core?: string;
@@ -24,7 +24,7 @@ export interface StructureModel {
   readonly white: StructureSide;
   readonly black: StructureSide;
   /**
-   * What the structure means, as a clause that its core alone makes true. `{side}` is the leader, `{enemy}` the
+   * What the structure means, as a clause that core and bare files alone make true. `{side}` is the leader, `{enemy}` the
    * other, `{c6}` a square of the model: turned over when the colours are exchanged.
    */
   readonly lead: string;
@@ -38,7 +38,10 @@ export interface PawnWords {
   high: number;
 }
 
-/** Demands on one side: all of `core`, none of `bare` (the empty squares of core files included), one square each of `either`; `usual` is counted. */
+/**
+ * Demands on one side: all of `core`, none of `bare` (the other squares of core files included), one square each
+ * of `either`; `usual` is counted.
+ */
 export interface SideDemands {
   readonly core: PawnWords;
   readonly bare: PawnWords;
@@ -55,7 +58,7 @@ export interface PreparedStructure {
   readonly reversed: boolean;
   /** Equal to itself with colours exchanged: then neither side leads. */
   readonly symmetric: boolean;
-  /** Demands that must be met: the more, the more telling the name. */
+  /** Demands that must be met: the more, the more telling the name. The same for both assignments of colours. */
   readonly specificity: number;
   readonly white: SideDemands;
   readonly black: SideDemands;
@@ -68,11 +71,15 @@ export function prepared(model: StructureModel): PreparedStructure[] {
   const turnedWhite = demands(model.black, mirrored);
   const turnedBlack = demands(model.white, mirrored);
   const symmetric = sameDemands(white, turnedWhite) && sameDemands(black, turnedBlack);
-  const specificity = [model.white, model.black].reduce((sum, side) => sum + tokens(side.core).length + tokens(side.bare).length, 0);
+  const specificity = demandsOf(model.white) + demandsOf(model.black);
   const written = { model, leader: model.leader, reversed: false, symmetric, specificity, white, black };
   if (symmetric) return [written];
   const leader: Side = model.leader === 'white' ? 'black' : 'white';
   return [written, { ...written, leader, reversed: true, white: turnedWhite, black: turnedBlack }];
+}
+
+function demandsOf(side: StructureSide): number {
+  return tokens(side.core).length + tokens(side.bare).length;
 }
 
 function tokens(text = ''): string[] {
@@ -85,7 +92,8 @@ function demands(side: StructureSide, turn: Turn): SideDemands {
   const core = tokens(side.core);
   const usual = tokens(side.usual);
   const coreSquares = core.flatMap((token) => squares(token, turn));
-  const besideCore = core.flatMap((token) => squares(token.charAt(0), turn)).filter((square) => !coreSquares.includes(square));
+  const coreFiles = core.flatMap((token) => squares(token.charAt(0), turn));
+  const besideCore = coreFiles.filter((square) => !coreSquares.includes(square));
   return {
     core: words(core.filter((token) => !token.includes('|')).flatMap((token) => squares(token, turn))),
     bare: words([...tokens(side.bare).flatMap((token) => squares(token, turn)), ...besideCore]),
@@ -98,14 +106,14 @@ function demands(side: StructureSide, turn: Turn): SideDemands {
 /** The squares of a token: a file letter, a square, or squares joined by bars. */
 function squares(token: string, turn: Turn): Square[] {
   return token.split('|').flatMap((part) => {
-    if (part.length === 1) return ([1, 2, 3, 4, 5, 6, 7, 8] as const).map((rank) => turn(sq(`${fileOfToken(part)}${rank}`)));
+    if (part.length === 1) return RANKS.map((rank) => turn(sq(`${fileNamed(part)}${rank}`)));
     const square = squareNamed(part);
     if (square === undefined) throw new Error(`not a square in the table of structures: ${part}`);
     return [turn(square)];
   });
 }
 
-function fileOfToken(part: string) {
+function fileNamed(part: string): FileName {
   const file = FILES.find((name) => name === part);
   if (file === undefined) throw new Error(`not a file in the table of structures: ${part}`);
   return file;

@@ -3,7 +3,10 @@ import type { StructureMatch } from './name-structure';
 
 const SIDE_WORDS = { white: 'White', black: 'Black' } as const;
 
-/** The clause that says what the structure means, without a full stop: sides named, squares turned over where the colours are exchanged. */
+/**
+ * The clause that says what the structure means, without a full stop: sides named, squares turned over where
+ * the colours are exchanged.
+ */
 export function structureLead({ model, side, reversed }: StructureMatch): string {
   return model.lead.replace(/\{(\w+)\}/g, (_, word: string) => {
     if (word === 'side') return SIDE_WORDS[side];
