@@ -55,8 +55,10 @@ class Components {
   /** The schema as JSON Schema; named parts are moved to the components and referred to. */
   of(schema: z.ZodType): Json {
     const made = JSON.parse(JSON.stringify(z.toJSONSchema(schema, { io: 'input' }))) as JsonObject;
-    const { $schema: _, $defs, id, ...own } = moved(made) as JsonObject;
-    if ($defs) for (const [name, part] of Object.entries($defs as JsonObject)) this.#schemas.set(name, withoutId(part));
+    const { $defs, id, ...own } = without('$schema', moved(made) as JsonObject);
+    if ($defs)
+      for (const [name, part] of Object.entries($defs as JsonObject))
+        this.#schemas.set(name, without('id', part as JsonObject));
     if (typeof id !== 'string') return own;
     this.#schemas.set(id, own);
     return { $ref: SHARED + id };
@@ -79,9 +81,8 @@ function moved(value: Json): Json {
   );
 }
 
-function withoutId(value: Json): Json {
-  const { id: _, ...rest } = value as JsonObject;
-  return rest;
+function without(name: string, object: JsonObject): JsonObject {
+  return Object.fromEntries(Object.entries(object).filter(([key]) => key !== name));
 }
 
 function operation(call: Contract, components: Components): JsonObject {

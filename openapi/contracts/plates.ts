@@ -1,8 +1,7 @@
 /** A figure of a position, as SVG or PNG, at an address that an `img` element can hold. */
-import { z } from 'zod';
 import { contract } from '../contract';
 import { EXAMPLE_FEN } from '../schemas/examples';
-import { plateQueryShape, plateWidthMax } from '../schemas/plates';
+import { plateQuerySchema, plateWidthMax } from '../schemas/plates';
 
 const description =
   'Draws the position with one layer of its reading and, if asked, the leading statements beside the board. The same marks draw the page.';
@@ -15,7 +14,7 @@ export const getPlateSvg = contract({
   scope: 'compute',
   summary: 'Draw a plate as SVG',
   description,
-  query: z.strictObject(plateQueryShape),
+  query: plateQuerySchema,
   reply: { form: 'text', media: 'image/svg+xml' },
   cached: true,
   errors: ['fen-refused'],
@@ -30,7 +29,7 @@ export const getPlatePng = contract({
   scope: 'compute',
   summary: 'Draw a plate as PNG',
   description: `${description} The PNG is at most ${plateWidthMax} pixels wide.`,
-  query: z.strictObject(plateQueryShape),
+  query: plateQuerySchema,
   reply: { form: 'bytes', media: 'image/png' },
   cached: true,
   errors: ['fen-refused'],

@@ -16,7 +16,7 @@ export const plateCaptionMax = 240;
 const yesNoSchema = z.enum(['yes', 'no']);
 
 /** The query of both plate calls. */
-export const plateQueryShape = {
+const plateQueryShape = {
   fen: fenSchema,
   mode: modeSchema.default('diagram'),
   layer: z.enum(plateLayers).default('command').describe('What is drawn over the board.'),
@@ -38,5 +38,5 @@ export const plateQueryShape = {
   notes: yesNoSchema.default('no').describe('Whether the leading statements stand beside the board.'),
 };
 
-const plateQuerySchema = z.strictObject(plateQueryShape);
+export const plateQuerySchema = z.strictObject(plateQueryShape);
 export type PlateQuery = z.infer<typeof plateQuerySchema>;

@@ -1,6 +1,7 @@
 /** POST /readings/batch: a line a FEN, in order, sent as computed. */
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import type { BatchLine } from '@/openapi/schemas/readings';
+import type * as EngineDoor from '@/lib/services/readings/engine';
 import { contracts } from '@/openapi/contracts';
 import { EXAMPLE_ENDING, EXAMPLE_FEN } from '@/openapi/schemas/examples';
 import type { Problem } from '@/openapi/schemas/problem';
@@ -11,7 +12,7 @@ const { createReadings } = contracts;
 /** Counts what the engine is asked for; the engine itself is the real one. */
 const asked = vi.hoisted(() => ({ count: 0, throwAt: 0 }));
 vi.mock('@/lib/services/readings/engine', async (original) => {
-  const real = await original<typeof import('@/lib/services/readings/engine')>();
+  const real = await original<typeof EngineDoor>();
   return {
     ...real,
     computeReading: (...args: Parameters<typeof real.computeReading>) => {

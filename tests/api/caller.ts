@@ -10,7 +10,7 @@ import type { Contract } from '@/openapi/contract';
 import { apiDocument, type Json } from '@/openapi/document';
 
 export const ORIGIN = 'http://waypost.test';
-const METHODS = ['GET', 'HEAD', 'OPTIONS', 'POST', 'PUT', 'PATCH', 'DELETE'] as const;
+export const METHODS = ['GET', 'HEAD', 'OPTIONS', 'POST', 'PUT', 'PATCH', 'DELETE'] as const;
 export type AnyMethod = (typeof METHODS)[number];
 
 type Handler = (request: Request, segments: { params: Promise<unknown> }) => Promise<Response>;

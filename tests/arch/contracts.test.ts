@@ -2,11 +2,10 @@
 import { describe, expect, it } from 'vitest';
 import type { Route } from '@/lib/api/route';
 import { contractList } from '@/openapi/contracts';
-import { routeFileOf, routeFiles, routeModule } from '../api/caller';
+import { METHODS, routeFileOf, routeFiles, routeModule } from '../api/caller';
 
 /** Answers addresses where nothing is, so it has no contract. */
 const NOTHING_HERE = 'app/api/[[...path]]/route.ts';
-const METHODS = ['GET', 'HEAD', 'OPTIONS', 'POST', 'PUT', 'PATCH', 'DELETE'] as const;
 
 describe('contracts and route files', () => {
   it('stand at each other’s addresses', () => {
@@ -23,9 +22,9 @@ describe('contracts and route files', () => {
   );
 
   it.each(routeFiles())('%s serves no call that has no contract', async (file) => {
-    const module = await routeModule(file);
+    const handlers = await routeModule(file);
     const served = METHODS.flatMap((method) => {
-      const handler = module[method];
+      const handler = handlers[method];
       return handler && 'contract' in handler ? [handler.contract] : [];
     });
     const ids = (contracts: readonly { readonly id: string }[]): string[] => contracts.map(({ id }) => id).sort();

@@ -3,7 +3,7 @@ import { others } from '@/lib/api/others';
 import { route } from '@/lib/api/route';
 import { partsOf } from '@/lib/services/readings/parts';
 import { readPosition } from '@/lib/services/readings/read-position';
-import { readingEtag } from '@/lib/services/readings/reading-etag';
+import { readingEtag } from '@/lib/api/reading-etag';
 import { contracts } from '@/openapi/contracts';
 
 export const POST = route(contracts.createReading, async ({ ctx, body }) =>

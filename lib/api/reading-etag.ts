@@ -1,6 +1,6 @@
 /** The ETag of a reading: it changes when the engine does, and never otherwise. */
 import type { Reading } from '@/engine/reading/schema';
-import { etagOf } from '@/lib/api/etag';
+import { etagOf } from './etag';
 
 /**
  * A strong ETag for what is made from a reading and from further choices. The warnings take part, since a diagram's say what

@@ -1,0 +1,11 @@
+import { figure } from '@/lib/api/figure';
+import { others } from '@/lib/api/others';
+import { route } from '@/lib/api/route';
+import { drawPlateSvg } from '@/lib/services/plates/draw-plate';
+import { contracts } from '@/openapi/contracts';
+
+export const GET = route(contracts.getPlateSvg, async ({ ctx, query }) => {
+  const svg = await drawPlateSvg(ctx, query);
+  return figure(svg, `waypost-${query.layer}.svg`, () => svg);
+});
+export const { HEAD, OPTIONS, POST, PUT, PATCH, DELETE } = others({ GET });

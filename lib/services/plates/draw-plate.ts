@@ -1,0 +1,32 @@
+/** A FEN and a few choices to a figure. */
+import type { Reading } from '@/engine/reading/schema';
+import type { Context } from '@/lib/context';
+import { AppError } from '@/lib/errors';
+import { platePng, plateSvg } from '@/lib/figures/plate';
+import type { PlateQuery } from '@/openapi/schemas/plates';
+import { readPosition } from '../readings/read-position';
+
+/** The figure as SVG text. Throws `fen-refused`, or `invalid-request` for a man that is not there. */
+export async function drawPlateSvg(ctx: Context, query: PlateQuery): Promise<string> {
+  const reading = await readPosition(ctx, query);
+  return plateSvg(reading, optionsOf(reading, query));
+}
+
+/** The figure as the bytes of a PNG, exactly `width` pixels wide. Throws like `drawPlateSvg`. */
+export async function drawPlatePng(ctx: Context, query: PlateQuery): Promise<Uint8Array> {
+  const reading = await readPosition(ctx, query);
+  return platePng(reading, optionsOf(reading, query));
+}
+
+function optionsOf(reading: Reading, query: PlateQuery) {
+  const { layer, width, theme, side, man, caption, notes } = query;
+  if (layer === 'mobility' && man === undefined)
+    throw manRefused('required', 'The layer "mobility" needs the square of a man.');
+  if (man !== undefined && !reading.men.some(({ square }) => square === man))
+    throw manRefused('no-man', `There is no man on ${man}.`);
+  return { layer, width, theme, side, man, caption, notes: notes === 'yes' };
+}
+
+function manRefused(code: string, message: string): AppError {
+  return new AppError('invalid-request', message, { faults: [{ path: '/man', code, message }] });
+}
