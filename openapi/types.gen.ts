@@ -179,7 +179,7 @@ export interface components {
             /** @description FENs, answered in this order, one a line. */
             readonly fens: readonly string[];
             /** @default strict */
-            readonly mode: components["schemas"]["Mode"];
+            readonly mode?: components["schemas"]["Mode"];
             /** @description Only these parts, beside the position itself. Left out: the whole reading. */
             readonly include?: readonly components["schemas"]["ReadingPart"][];
         };
@@ -563,7 +563,7 @@ export interface components {
         readonly ReadingRequest: {
             readonly fen: components["schemas"]["Fen"];
             /** @default strict */
-            readonly mode: components["schemas"]["Mode"];
+            readonly mode?: components["schemas"]["Mode"];
             /** @description Only these parts, beside the position itself. Left out: the whole reading. */
             readonly include?: readonly components["schemas"]["ReadingPart"][];
         };
