@@ -1,0 +1,25 @@
+/** What stands around every public page: a way past the header, the header, the page, the footer. */
+import type { ReactNode } from 'react';
+import { SiteFooter } from './site-footer';
+import { SiteHeader } from './site-header';
+
+const MAIN_ID = 'main';
+
+/** A page between header and footer. The page brings its own measure (`page-measure`) and one h1. */
+export function SiteFrame({ children }: { readonly children: ReactNode }) {
+  return (
+    <>
+      <a
+        href={`#${MAIN_ID}`}
+        className="sr-only rounded-sm bg-ink px-4 py-2 text-paper focus:not-sr-only focus:fixed focus:top-2 focus:left-3 focus:z-10 focus:px-4 focus:py-2"
+      >
+        Skip to the page
+      </a>
+      <SiteHeader />
+      <main id={MAIN_ID} tabIndex={-1} className="grow outline-none">
+        {children}
+      </main>
+      <SiteFooter />
+    </>
+  );
+}

@@ -1,0 +1,4 @@
+/** PostCSS: Tailwind, and nothing else. */
+const config = { plugins: { '@tailwindcss/postcss': {} } };
+
+export default config;
