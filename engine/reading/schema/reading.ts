@@ -47,12 +47,13 @@ export const manReadingSchema = z
     moves: squaresSchema.describe('Squares it can move to: pseudo-legal, pins kept.'),
     safeMoves: squaresSchema.describe('Those of its moves on which it is not lost by exchange.'),
     sees: z.int().describe('Squares attacked, own men included.'),
+    seesAhead: z.int().describe('Of these, squares on ranks ahead of it.'),
     pinned: z.boolean(),
     enPrise: z.number().describe('Pawns the enemy gains by taking it now; 0 if nothing.'),
     attackers: squaresSchema.describe('Enemy men that attack it, cheapest first.'),
     defenders: squaresSchema.describe('Own men that guard it, cheapest first.'),
     duties: z
-      .array(z.object({ square: squareSchema, loses: z.number().describe('Pawns lost there if the man leaves.') }))
+      .array(z.object({ square: squareSchema, loses: z.number().describe('Pawns lost there if the man leaves.'), by: z.enum(['guard', 'screen']).describe('It guards the man, or shuts the line of an enemy slider.') }))
       .describe('What falls if it leaves.'),
     trapped: z.boolean().describe('Attackable and without a safe square.'),
     notes: z
@@ -143,6 +144,8 @@ export const kingReadingSchema = z
     guardedBy: squaresSchema.describe('Own men that guard its zone.'),
     flights: squaresSchema.describe('Squares it can step to now.'),
     luft: squaresSchema.describe('Flights off its back rank.'),
+    luftMoves: z.array(z.object({ from: squareSchema, to: squareSchema })).describe('Own pawn moves that would give it its first luft.'),
+    weakBackRank: z.boolean().describe('No luft, no own rook or queen on the back rank, and the enemy has one.'),
   })
   .meta({ id: 'KingReading', description: 'A king and its shelter.' });
 

@@ -1,0 +1,3 @@
+export * from './files';
+export * from './seventh-rank';
+export * from './diagonals';

@@ -1,0 +1,173 @@
+/** One man and what it can do from where it stands. */
+import { type AttackMap, attackersOf, isPinned, KING, kindOn, PAWN, type SideIndex, sideOn } from '../attacks';
+import { fileOf, type Position, SQUARES } from '../board';
+import { isSafeMove, lossOn, type Safety, worthOf } from '../exchange';
+import { type PawnMap, pawnReach } from '../pawns';
+import type { Reach } from '../reach';
+import type { OutpostValue, SquareTable } from '../squares';
+import { type Kind, opponent, type Side, type Square } from '../types';
+import { type Duty, dutiesOf, isOverloaded } from './duties';
+import { fillAttacked, fillMovesOf, newWords, squaresOfWords, type Words } from './moves';
+
+/** Traits with names. Each is said of a man where its definition below holds. */
+export const NOTES = [
+  'bad-bishop',
+  'bad-but-active',
+  'rim',
+  'outpost',
+  'overloaded',
+  'trapped',
+  'pinned',
+  'loose',
+  'en-prise',
+  'out-of-play',
+  'blocked-in',
+] as const;
+export type Note = (typeof NOTES)[number];
+
+export interface ManValue {
+  readonly square: Square;
+  readonly side: Side;
+  readonly kind: Kind;
+  /** Pseudo-legal moves, pins kept, castling left out. */
+  readonly moves: readonly Square[];
+  /**
+   * Moves after which the enemy gains nothing by capturing the man where it went; what it captured is not set
+   * against that. For a king: squares that the enemy does not attack.
+   */
+  readonly safeMoves: readonly Square[];
+  /** Squares that it attacks, own men's included. */
+  readonly sees: number;
+  /** Of these, squares on ranks ahead of it. */
+  readonly seesAhead: number;
+  readonly pinned: boolean;
+  /** Pawns that the enemy gains by taking it now. */
+  readonly enPrise: number;
+  readonly attackers: readonly Square[];
+  readonly defenders: readonly Square[];
+  readonly duties: readonly Duty[];
+  readonly trapped: boolean;
+  /** Safe moves needed to the nearest of d4, e4, d5, e5; null for kings and pawns, and where it takes more than three. */
+  readonly movesToCentre: number | null;
+  readonly notes: readonly Note[];
+}
+
+/** What the values of men are read from. */
+export interface MenContext {
+  readonly position: Position;
+  readonly map: AttackMap;
+  readonly safety: Safety;
+  readonly table: SquareTable;
+  readonly pawns: PawnMap;
+  readonly reach: Reach;
+  readonly outposts: readonly OutpostValue[];
+}
+
+/** All men of the position in square order; `bishops` says which bishops are bad. */
+export function manValues(context: MenContext, bishops: ReadonlyMap<Square, Note>): ManValue[] {
+  const { map, outposts } = context;
+  const posts = new Set<Square>();
+  for (const post of outposts) if (post.rank === 'outpost' && post.occupant !== null) posts.add(post.occupant);
+  return SQUARES.filter((square) => map.board[square] !== 0).map((square) =>
+    manValue(context, square, bishops.get(square), posts.has(square)),
+  );
+}
+
+const words: Words = newWords();
+
+function manValue(context: MenContext, square: Square, bishop: Note | undefined, onOutpost: boolean): ManValue {
+  const { map, position, safety, table } = context;
+  const code = map.board[square]!;
+  const index = (code >> 3) as SideIndex;
+  const side = sideOn(map, square) ?? 'white';
+  const kind = kindOn(map, square);
+  fillAttacked(map.board, code, square, square, words);
+  const seen = squaresOfWords(words);
+  fillMovesOf(map, position, square, words);
+  const moves = squaresOfWords(words);
+  const safeMoves = moves.filter((to) => isSafeMove(safety, square, to));
+  const pinned = isPinned(map, square);
+  const enPrise = Math.max(0, table.exchanges[((index ^ 1) << 6) | square]!);
+  const attackers = attackersOf(map, opponent(side), square);
+  const defenders = attackersOf(map, side, square);
+  const duties = dutiesOf(map, table, square);
+  const movesToCentre = kind === 'king' || kind === 'pawn' ? null : centreDistance(context.reach, index, square);
+  const trapped = isTrapped(context, square, moves, safeMoves, attackers.length > 0, pinned);
+  const isPiece = kind !== 'king' && kind !== 'pawn';
+  const notes: Note[] = [];
+  if (bishop) notes.push(bishop);
+  if (kind === 'knight' && (fileOf(square) === 0 || fileOf(square) === 7)) notes.push('rim');
+  if (onOutpost) notes.push('outpost');
+  if (isOverloaded(map, index, duties)) notes.push('overloaded');
+  if (trapped) notes.push('trapped');
+  if (pinned) notes.push('pinned');
+  if (kind !== 'king' && defenders.length === 0) notes.push('loose');
+  if (enPrise > 0) notes.push('en-prise');
+  if (isPiece && isOutOfPlay(side, square, safeMoves.length, movesToCentre)) notes.push('out-of-play');
+  if (isPiece && moves.length === 0 && !pinned && seen.every((to) => sideOn(map, to) === side)) notes.push('blocked-in');
+  return {
+    square,
+    side,
+    kind,
+    moves,
+    safeMoves,
+    sees: seen.length,
+    seesAhead: seen.filter((to) => (side === 'white' ? to >> 3 > square >> 3 : to >> 3 < square >> 3)).length,
+    pinned,
+    enPrise,
+    attackers,
+    defenders,
+    duties,
+    trapped,
+    movesToCentre,
+    notes,
+  };
+}
+
+const CENTRE = [27, 28, 35, 36] as const;
+
+function centreDistance({ safety: { map }, moves }: Reach, side: SideIndex, square: Square): number | null {
+  const row = ((side << 5) | map.numbers[square]!) << 6;
+  let nearest = Number.POSITIVE_INFINITY;
+  for (const centre of CENTRE) {
+    const needed = moves[row | centre]!;
+    if (needed >= 0 && needed < nearest) nearest = needed;
+  }
+  return Number.isFinite(nearest) ? nearest : null;
+}
+
+/**
+ * Out of play: a developed piece (off its side's first rank) with at most two safe moves that is three or more
+ * safe moves from every centre square. The bounds are ours; after Edward Lasker, Chess Strategy (1915), who
+ * counts the moves that bring a man back into the game.
+ */
+function isOutOfPlay(side: Side, square: Square, safeMoves: number, movesToCentre: number | null): boolean {
+  const developed = side === 'white' ? square >= 8 : square < 56;
+  return developed && safeMoves <= 2 && (movesToCentre === null || movesToCentre >= 3);
+}
+
+/**
+ * Trapped: a knight, bishop, rook or queen, not pinned, that is attacked now or can be attacked by an enemy pawn in
+ * one move, has no safe move, and no capture that gives back what it costs.
+ */
+function isTrapped(
+  { map, pawns, safety }: MenContext,
+  square: Square,
+  moves: readonly Square[],
+  safeMoves: readonly Square[],
+  attacked: boolean,
+  pinned: boolean,
+): boolean {
+  const code = map.board[square]!;
+  const place = code & 7;
+  if (place === PAWN || place === KING || pinned || safeMoves.length > 0) return false;
+  const side = (code >> 3) as SideIndex;
+  if (!attacked) {
+    const { soonest } = pawnReach(pawns, side === 0 ? 'black' : 'white', square);
+    if (soonest === null || soonest.moves > 1) return false;
+  }
+  return !moves.some((to) => {
+    const prize = safety.map.board[to]!;
+    return prize !== 0 && worthOf(prize) >= lossOn(map, side, place, to, square);
+  });
+}

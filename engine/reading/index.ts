@@ -1,0 +1,4 @@
+export * from './read';
+export * from './read-values';
+export * from './version';
+export type * from './schema';
