@@ -4,6 +4,7 @@ import { describe, expect, it } from 'vitest';
 import { SQUARES } from '@/engine/board';
 import {
   type Lever,
+  type PawnMap,
   type PawnSideValue,
   type PawnValues,
   pawnMap,
@@ -105,16 +106,19 @@ describe('pawn reach', () => {
         const map = pawnMap(position);
         const turnedMap = pawnMap(turned(position));
         const mirroredMap = pawnMap(mirroredFiles(position));
-        for (const side of SIDES) {
-          for (const square of SQUARES) {
+        const squares = SIDES.flatMap((side) => SQUARES.map((square) => [side, square] as const));
+        const over = (carry: Exchange) =>
+          squares.map(([side, square]) => {
             const { hold, soonest } = pawnReach(map, side, square);
-            const overTurned = pawnReach(turnedMap, opponent(side), TURN.square(square));
-            const overMirrored = pawnReach(mirroredMap, side, MIRROR.square(square));
-            expect([overTurned.hold, overMirrored.hold]).toEqual([hold, hold]);
-            expect(overTurned.soonest).toEqual(soonest && { ...soonest, from: TURN.square(soonest.from) });
-            expect(overMirrored.soonest).toEqual(soonest && { ...soonest, from: MIRROR.square(soonest.from) });
-          }
-        }
+            return { hold, soonest: soonest && { ...soonest, from: carry.square(soonest.from) } };
+          });
+        const reachIn = (other: PawnMap, carry: Exchange) =>
+          squares.map(([side, square]) => {
+            const { hold, soonest } = pawnReach(other, carry.side(side), carry.square(square));
+            return { hold, soonest };
+          });
+        expect(reachIn(turnedMap, TURN)).toEqual(over(TURN));
+        expect(reachIn(mirroredMap, MIRROR)).toEqual(over(MIRROR));
       }),
       { numRuns: 100 },
     );

@@ -79,12 +79,12 @@ describe('leads', () => {
         const position = turn ? turned(left) : left;
         const match = nameStructure(position);
         if (match === null) return;
-        for (const [claim, borneOut] of claimsOf(position, structureLead(match))) {
-          tried.add(match.id);
-          expect([match.id, claim, borneOut]).toEqual([match.id, claim, true]);
-        }
+        const claims = claimsOf(position, structureLead(match));
+        if (claims.length > 0) tried.add(match.id);
+        const unfounded = claims.filter(([, borneOut]) => !borneOut).map(([claim]) => `${match.id}: ${claim}`);
+        expect(unfounded).toEqual([]);
       }),
-      { numRuns: 3000 },
+      { numRuns: 1500 },
     );
     expect(tried.size).toBeGreaterThan(STRUCTURES.length / 2);
   });
