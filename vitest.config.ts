@@ -6,10 +6,8 @@ const root = fileURLToPath(new URL('.', import.meta.url));
 
 export default defineConfig({
   resolve: { alias: [{ find: /^@\//, replacement: root }] },
-  esbuild: { jsx: 'automatic' },
   test: {
     include: ['tests/**/*.test.{ts,tsx}'],
     testTimeout: 20_000,
-    reporters: 'default',
   },
 });

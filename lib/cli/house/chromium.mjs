@@ -1,0 +1,55 @@
+/** Finding a Chromium for the browser tests, or getting one from the system's packages. */
+import { accessSync, constants } from 'node:fs';
+import { delimiter, join } from 'node:path';
+import { run } from './run.mjs';
+
+const NAMES = ['chromium', 'chromium-browser', 'google-chrome', 'google-chrome-stable'];
+
+const MISSING = `No Chromium was found, and none could be installed from the system's packages.
+Install one (on Debian: apt-get install chromium), or say where one is:
+  CHROMIUM=/path/to/chromium npm run check`;
+
+/**
+ * The path of a Chromium: what the variable CHROMIUM says, else the first on the path.
+ *
+ * @param {Record<string, string | undefined>} environment
+ * @returns {string | undefined}
+ */
+export function findChromium({ CHROMIUM, PATH = '' }) {
+  if (CHROMIUM) return CHROMIUM;
+  const folders = [...PATH.split(delimiter), '/usr/bin'];
+  return NAMES.flatMap((name) => folders.map((folder) => join(folder, name))).find(isProgram);
+}
+
+/** The path of a Chromium, installed if need be; undefined, and said why, when there is no way. */
+export async function ensureChromium() {
+  const found = findChromium(process.env) ?? ((await installChromium()) ? findChromium(process.env) : undefined);
+  if (found === undefined) console.error(MISSING);
+  return found;
+}
+
+/** Debian's package, as root or by a sudo that asks nothing. */
+async function installChromium() {
+  const [command, ...first] = process.getuid?.() === 0 ? ['apt-get'] : ['sudo', '-n', 'apt-get'];
+  if (command === undefined || !['apt-get', command].every(isOnPath)) return false;
+  const environment = { DEBIAN_FRONTEND: 'noninteractive' };
+  return (
+    (await run(command, [...first, 'update'], environment)) &&
+    (await run(command, [...first, 'install', '-y', '--no-install-recommends', 'chromium'], environment))
+  );
+}
+
+/** @param {string} name */
+function isOnPath(name) {
+  return (process.env.PATH ?? '').split(delimiter).some((folder) => isProgram(join(folder, name)));
+}
+
+/** @param {string} path */
+function isProgram(path) {
+  try {
+    accessSync(path, constants.X_OK);
+    return true;
+  } catch {
+    return false;
+  }
+}
