@@ -53,8 +53,8 @@ async function check() {
     'types',
     async () => (await runProgram('next', ['typegen'])) && (await runProgram('tsc', ['--noEmit', '-p', '.'])),
   );
-  await step('dead code', () => runProgram('knip', ['--no-progress']));
-  await step('dead code, as shipped', () => runProgram('knip', ['--no-progress', '--production']));
+  await step('dead code', () => runProgram('knip', ['--no-progress', '--no-config-hints']));
+  await step('dead code, as shipped', () => runProgram('knip', ['--no-progress', '--no-config-hints', '--production']));
   await step(
     'tests',
     () => runProgram('vitest', ['run', '--reporter=default', '--reporter=json', `--outputFile.json=${UNIT_REPORT}`]),

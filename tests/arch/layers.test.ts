@@ -11,9 +11,9 @@ type OwnImport = Import & { readonly target: string };
 /** Imports of our own files, as 'from -> to', that a rule does not allow. */
 function faults(files: readonly Source[], allows: (path: string, found: OwnImport) => boolean): readonly string[] {
   return files.flatMap(({ path, imports }) =>
-    imports
-      .filter((found): found is OwnImport => found.target !== undefined && !allows(path, found))
-      .map(({ specifier }) => `${path} -> ${specifier}`),
+    imports.flatMap(({ specifier, target, typeOnly }) =>
+      target === undefined || allows(path, { specifier, target, typeOnly }) ? [] : [`${path} -> ${specifier}`],
+    ),
   );
 }
 
