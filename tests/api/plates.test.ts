@@ -63,9 +63,10 @@ describe('plates', () => {
   });
 
   it.each([
-    [getPlateSvg, 'image/svg+xml; charset=utf-8', 'waypost-command.svg'],
-    [getPlatePng, 'image/png', 'waypost-command.png'],
-  ] as const)('%o may be shown anywhere, kept, and do nothing', async (contract, media, name) => {
+    ['getPlateSvg', 'image/svg+xml; charset=utf-8', 'waypost-command.svg'],
+    ['getPlatePng', 'image/png', 'waypost-command.png'],
+  ] as const)('%s may be shown anywhere, kept, and do nothing', async (id, media, name) => {
+    const contract = contracts[id];
     const response = await call(contract, { query: { fen } });
     expect(response.headers.get('content-type')).toBe(media);
     expect(response.headers.get('content-disposition')).toBe(`inline; filename="${name}"`);
