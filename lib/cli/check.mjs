@@ -47,7 +47,7 @@ async function check() {
     if (chromium !== undefined) console.log(chromium);
     return chromium !== undefined;
   });
-  await step('format', () => runProgram('biome', ['format']));
+  await step('format', () => runProgram('biome', ['format', '--max-diagnostics=8']));
   await step('lint', () => runProgram('eslint', ['--max-warnings', '0']));
   await step(
     'types',
