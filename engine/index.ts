@@ -1,7 +1,16 @@
 /** The public surface of the engine, in reading order. */
 export * from './types';
 export * from './result';
-export { type Fault, type Faults, formatFen, type Mode, parseFen, type Position, squareName, squareNamed } from './board';
+export {
+  type Fault,
+  type Faults,
+  formatFen,
+  type Mode,
+  parseFen,
+  type Position,
+  squareName,
+  squareNamed,
+} from './board';
 export { type HeatCell, heatMap } from './men';
 export {
   type Desk,

@@ -7,7 +7,9 @@ import { apiDocument } from './document';
 /** The generated files as text; in the types a field with a default may be left out, by their name. */
 export async function generatedFiles(): Promise<Readonly<Record<'openapi.json' | 'types.gen.ts', string>>> {
   const text = `${JSON.stringify(apiDocument(), null, 2)}\n`;
-  const types = astToString(await openapiTS(JSON.parse(text) as OpenAPI3, { immutable: true, defaultNonNullable: false }));
+  const types = astToString(
+    await openapiTS(JSON.parse(text) as OpenAPI3, { immutable: true, defaultNonNullable: false }),
+  );
   return {
     'openapi.json': text,
     'types.gen.ts': `/** Generated from the contracts by \`npm run generate\`; not written by hand. */\n${types}`,

@@ -71,21 +71,38 @@ type Fields = readonly [board: string, side: string, castling: string, enPassant
 /** Parts the fields and supplies missing counters. */
 function fieldsOf(text: string): Result<Fields, Faults> {
   if (text.length > FEN_LENGTH_MAX) {
-    return fail([fault('text', 'text-too-long', `The text has ${text.length} characters; a position needs fewer than ${FEN_LENGTH_MAX}.`)]);
+    return fail([
+      fault(
+        'text',
+        'text-too-long',
+        `The text has ${text.length} characters; a position needs fewer than ${FEN_LENGTH_MAX}.`,
+      ),
+    ]);
   }
   const parts = text.trim().split(/\s+/);
   if (parts[0] === '') return fail([fault('text', 'empty', 'There is no position in an empty text.')]);
   const [board = '', side, castling, enPassant, half, full, operation] = parts;
   if (side === undefined || castling === undefined || enPassant === undefined) {
-    return fail([fault('text', 'field-count', `A position has six fields, or four without the counters; here ${parts.length === 1 ? 'is one' : `are ${parts.length}`}.`)]);
+    return fail([
+      fault(
+        'text',
+        'field-count',
+        `A position has six fields, or four without the counters; here ${parts.length === 1 ? 'is one' : `are ${parts.length}`}.`,
+      ),
+    ]);
   }
   const isOperation = (word: string | undefined) => word !== undefined && /^[A-Za-z]\w*;?$/.test(word);
-  if (half === undefined || (isOperation(half) && parts.length > 5)) return ok([board, side, castling, enPassant, '0', '1']);
+  if (half === undefined || (isOperation(half) && parts.length > 5))
+    return ok([board, side, castling, enPassant, '0', '1']);
   if (full === undefined) {
-    return fail([fault('text', 'field-count', 'A position has six fields, or four without the counters; here are five.')]);
+    return fail([
+      fault('text', 'field-count', 'A position has six fields, or four without the counters; here are five.'),
+    ]);
   }
   if (operation !== undefined && !isOperation(operation)) {
-    return fail([fault('text', 'field-count', `After the six fields stands "${operation}", which belongs to no position.`)]);
+    return fail([
+      fault('text', 'field-count', `After the six fields stands "${operation}", which belongs to no position.`),
+    ]);
   }
   return ok([board, side, castling, enPassant, half, full]);
 }
@@ -111,7 +128,13 @@ function readSide(field: string, faults: Fault[]): Side {
 function readCastling(field: string, faults: Fault[]): CastlingRights {
   if (field === '-') return NO_CASTLING;
   if (!/^[KQkq]{1,4}$/.test(field) || new Set(field).size !== field.length) {
-    faults.push(fault('castling', 'castling-form', `Castling is "-" or some of the letters K, Q, k, q, each once; not "${field}".`));
+    faults.push(
+      fault(
+        'castling',
+        'castling-form',
+        `Castling is "-" or some of the letters K, Q, k, q, each once; not "${field}".`,
+      ),
+    );
     return NO_CASTLING;
   }
   return {
@@ -130,7 +153,9 @@ function readEnPassant(field: string, faults: Fault[]): Square | null {
   if (field === '-') return null;
   const square = squareNamed(field);
   if (square === undefined) {
-    faults.push(fault('enPassant', 'en-passant-form', `The square passed over is "-" or a square such as "e3", not "${field}".`));
+    faults.push(
+      fault('enPassant', 'en-passant-form', `The square passed over is "-" or a square such as "e3", not "${field}".`),
+    );
   }
   return square ?? null;
 }
@@ -143,7 +168,9 @@ function readCounter(field: string, least: number, name: 'halfmove' | 'fullmove'
     return least;
   }
   if (count < least || count > COUNTER_MAX) {
-    faults.push(fault(name, `${name}-range`, `The ${label} lies between ${least} and ${COUNTER_MAX}; here it is ${count}.`));
+    faults.push(
+      fault(name, `${name}-range`, `The ${label} lies between ${least} and ${COUNTER_MAX}; here it is ${count}.`),
+    );
     return least;
   }
   return count;

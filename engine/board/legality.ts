@@ -29,7 +29,14 @@ export function menFaults(board: Readonly<Uint8Array>): Fault[] {
     for (const square of squaresWith(board, manCode(side, 'pawn'))) {
       if (rankOf(square) !== 0 && rankOf(square) !== 7) continue;
       const name = squareName(square);
-      faults.push(fault('board', 'pawn-on-edge', `A pawn stands on ${name}; no pawn ever stands on the first or last rank.`, name));
+      faults.push(
+        fault(
+          'board',
+          'pawn-on-edge',
+          `A pawn stands on ${name}; no pawn ever stands on the first or last rank.`,
+          name,
+        ),
+      );
     }
   }
   for (const side of SIDES) faults.push(...countFaults(board, side));
@@ -42,11 +49,18 @@ function countFaults(board: Readonly<Uint8Array>, side: Side): Fault[] {
   const pawns = count('pawn');
   const total = board.reduce((sum, code) => sum + (code !== 0 && code >> 3 === (side === 'white' ? 0 : 1) ? 1 : 0), 0);
   if (total > MEN_MAX) {
-    return [fault('board', 'too-many-men', `${who} has ${total} men; Waypost reads at most ${MEN_MAX} of one side, even in diagrams.`)];
+    return [
+      fault(
+        'board',
+        'too-many-men',
+        `${who} has ${total} men; Waypost reads at most ${MEN_MAX} of one side, even in diagrams.`,
+      ),
+    ];
   }
   const faults: Fault[] = [];
   if (pawns > 8) faults.push(fault('board', 'too-many-pawns', `${who} has ${pawns} pawns; there are at most eight.`));
-  if (total > 16) faults.push(fault('board', 'men-count', `${who} has ${total} men; a game starts with sixteen a side.`));
+  if (total > 16)
+    faults.push(fault('board', 'men-count', `${who} has ${total} men; a game starts with sixteen a side.`));
   const promoted =
     Math.max(0, count('knight') - 2) +
     Math.max(0, count('bishop') - 2) +
@@ -54,7 +68,11 @@ function countFaults(board: Readonly<Uint8Array>, side: Side): Fault[] {
     Math.max(0, count('queen') - 1);
   if (pawns <= 8 && total <= 16 && promoted > 8 - pawns) {
     faults.push(
-      fault('board', 'promoted-count', `${who} has ${promoted} men from promotion, but only ${8 - pawns} pawns are gone.`),
+      fault(
+        'board',
+        'promoted-count',
+        `${who} has ${promoted} men from promotion, but only ${8 - pawns} pawns are gone.`,
+      ),
     );
   }
   return faults;
@@ -102,13 +120,22 @@ export function checkFaults(board: Readonly<Uint8Array>, sideToMove: Side): Faul
   if (checker !== undefined) {
     const name = squareName(checker);
     faults.push(
-      fault('side', 'opponent-in-check', `${SIDE_NAMES[waiting]} is in check from ${name}, but ${SIDE_NAMES[sideToMove]} is to move.`, name),
+      fault(
+        'side',
+        'opponent-in-check',
+        `${SIDE_NAMES[waiting]} is in check from ${name}, but ${SIDE_NAMES[sideToMove]} is to move.`,
+        name,
+      ),
     );
   }
   const checkers = checkersOf(sideToMove);
   if (checkers.length > 2) {
     faults.push(
-      fault('board', 'too-many-checks', `${SIDE_NAMES[sideToMove]} is in check from ${checkers.length} men; two are the most that a move can give.`),
+      fault(
+        'board',
+        'too-many-checks',
+        `${SIDE_NAMES[sideToMove]} is in check from ${checkers.length} men; two are the most that a move can give.`,
+      ),
     );
   }
   return faults;
@@ -126,11 +153,19 @@ export function castlingFaults(board: Readonly<Uint8Array>, rights: CastlingRigh
   const faults: Fault[] = [];
   for (const [right, letter, king, rook, side] of CASTLING_SQUARES) {
     if (!rights[right]) continue;
-    for (const [square, kind] of [[king, 'king'], [rook, 'rook']] as const) {
+    for (const [square, kind] of [
+      [king, 'king'],
+      [rook, 'rook'],
+    ] as const) {
       if (board[square] === manCode(side, kind)) continue;
       const name = squareName(square as Square);
       faults.push(
-        fault('castling', 'castling-squares', `Castling "${letter}" needs ${SIDE_NAMES[side]}’s ${kind} on ${name}.`, name),
+        fault(
+          'castling',
+          'castling-squares',
+          `Castling "${letter}" needs ${SIDE_NAMES[side]}’s ${kind} on ${name}.`,
+          name,
+        ),
       );
     }
   }
@@ -143,7 +178,12 @@ export function enPassantFaults(board: Readonly<Uint8Array>, sideToMove: Side, s
   if (relativeRank(square, sideToMove) !== 6) {
     const rank = sideToMove === 'white' ? 'sixth' : 'third';
     return [
-      fault('enPassant', 'en-passant-rank', `With ${SIDE_NAMES[sideToMove]} to move a pawn can be taken in passing on the ${rank} rank only, not on ${name}.`, name),
+      fault(
+        'enPassant',
+        'en-passant-rank',
+        `With ${SIDE_NAMES[sideToMove]} to move a pawn can be taken in passing on the ${rank} rank only, not on ${name}.`,
+        name,
+      ),
     ];
   }
   const mover: Side = sideToMove === 'white' ? 'black' : 'white';
@@ -151,10 +191,24 @@ export function enPassantFaults(board: Readonly<Uint8Array>, sideToMove: Side, s
   const origin = step(square, 0, mover === 'white' ? -1 : 1);
   if (pawn === undefined || board[pawn] !== manCode(mover, 'pawn')) {
     const there = pawn === undefined ? name : squareName(pawn);
-    return [fault('enPassant', 'en-passant-pawn', `No ${mover} pawn stands on ${there}, so none has just passed ${name}.`, name)];
+    return [
+      fault(
+        'enPassant',
+        'en-passant-pawn',
+        `No ${mover} pawn stands on ${there}, so none has just passed ${name}.`,
+        name,
+      ),
+    ];
   }
   if (board[square] !== 0 || (origin !== undefined && board[origin] !== 0)) {
-    return [fault('enPassant', 'en-passant-blocked', `A pawn cannot have passed ${name}: its way from its first square is not empty.`, name)];
+    return [
+      fault(
+        'enPassant',
+        'en-passant-blocked',
+        `A pawn cannot have passed ${name}: its way from its first square is not empty.`,
+        name,
+      ),
+    ];
   }
   return [];
 }

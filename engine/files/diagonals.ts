@@ -24,7 +24,11 @@ export function diagonalValues(map: AttackMap, pawns: PawnValues): DiagonalValue
     for (let direction = 4; direction < 8; direction++) {
       const squares: Square[] = [];
       let stoppedBy: Square | null = null;
-      for (let at = ((from << 3) | direction) * RAY_ROW, to = RAYS[at]!; to >= 0 && stoppedBy === null; to = RAYS[++at]!) {
+      for (
+        let at = ((from << 3) | direction) * RAY_ROW, to = RAYS[at]!;
+        to >= 0 && stoppedBy === null;
+        to = RAYS[++at]!
+      ) {
         squares.push(to as Square);
         if (map.board[to] !== 0) stoppedBy = to as Square;
       }

@@ -95,7 +95,9 @@ function hold(safety: Safety, side: Side, file: number, heavy: readonly Square[]
   let count = 0;
   for (const square of squaresAlong(side, file)) {
     if (relativeRank(square, side) < 5) continue;
-    const bears = heavy.some((from) => from === square || (map.attackers[(index << 6) | square]! >>> map.numbers[from]!) & 1);
+    const bears = heavy.some(
+      (from) => from === square || (map.attackers[(index << 6) | square]! >>> map.numbers[from]!) & 1,
+    );
     if (bears && isSafeHere(safety, index, ROOK, square)) count++;
   }
   return count;
@@ -108,7 +110,8 @@ function entriesOf(safety: Safety, side: Side, file: number): Square[] {
   for (const square of squaresAlong(side, file)) {
     const kind = board[square]! & 7;
     const isKing = kind === 6;
-    if (relativeRank(square, side) >= 7 && kind !== 1 && !isKing && isSafeHere(safety, index, ROOK, square)) entries.push(square);
+    if (relativeRank(square, side) >= 7 && kind !== 1 && !isKing && isSafeHere(safety, index, ROOK, square))
+      entries.push(square);
     if (kind === 1) break;
   }
   return entries;
@@ -136,7 +139,8 @@ function takerOf(map: AttackMap, { moves }: Reach, side: Side, file: number): Fi
     if (kind !== ROOK || fileOf(from) === file) continue;
     for (const to of squaresAlong(side, file)) {
       const needed = moves[((row | number) << 6) | to]!;
-      if (needed > 0 && map.board[to] === 0 && (best === null || needed < best.moves)) best = { rook: from, to, moves: needed };
+      if (needed > 0 && map.board[to] === 0 && (best === null || needed < best.moves))
+        best = { rook: from, to, moves: needed };
     }
   }
   return best;

@@ -37,7 +37,9 @@ export interface BishopRemedy {
 
 /** All bishops in square order. */
 export function bishopValues(context: MenContext, pawns: PawnValues): BishopValue[] {
-  return SQUARES.filter((square) => (context.map.board[square]! & 7) === BISHOP).map((square) => bishopValue(context, pawns, square));
+  return SQUARES.filter((square) => (context.map.board[square]! & 7) === BISHOP).map((square) =>
+    bishopValue(context, pawns, square),
+  );
 }
 
 function bishopValue(context: MenContext, pawns: PawnValues, square: Square): BishopValue {
@@ -93,7 +95,13 @@ function leadsAcross(side: Side, square: Square, direction: number): boolean {
   return relativeRank(square, side) + steps >= 5;
 }
 
-function remedyOf(context: MenContext, pawns: PawnValues, side: Side, square: Square, fixed: readonly PawnReading[]): BishopRemedy {
+function remedyOf(
+  context: MenContext,
+  pawns: PawnValues,
+  side: Side,
+  square: Square,
+  fixed: readonly PawnReading[],
+): BishopRemedy {
   const rammers = fixed.filter((pawn) => pawn.rammed).map((pawn) => pawn.stop);
   const levers = pawns.levers.filter((lever) => lever.side === side && rammers.includes(lever.against));
   levers.sort((a, b) => a.moves - b.moves);

@@ -59,6 +59,9 @@ export function heatMap(safety: Safety, asked: { readonly square: Square } | Man
 }
 
 /** Safe moves of all men of a side together. */
-export function safeMovesOf(men: readonly { readonly side: Side; readonly safeMoves: readonly Square[] }[], side: Side): number {
+export function safeMovesOf(
+  men: readonly { readonly side: Side; readonly safeMoves: readonly Square[] }[],
+  side: Side,
+): number {
   return men.reduce((sum, man) => sum + (man.side === side ? man.safeMoves.length : 0), 0);
 }

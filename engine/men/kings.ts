@@ -58,7 +58,8 @@ export function kingValue(safety: Safety, side: Side): KingValue | null {
     flights,
     luft,
     luftMoves: onBackRank && luft.length === 0 ? luftMoves(map, side, square) : [],
-    weakBackRank: onBackRank && luft.length === 0 && !hasHeavy(map, side, rankOf(square)) && hasHeavy(map, opponent(side), null),
+    weakBackRank:
+      onBackRank && luft.length === 0 && !hasHeavy(map, side, rankOf(square)) && hasHeavy(map, opponent(side), null),
   };
 }
 
@@ -73,7 +74,10 @@ function flightsOf(safety: Safety, square: Square, side: Side): Square[] {
   const own = side === 'white' ? 0 : 1;
   return zoneOf(square)
     .slice(1)
-    .filter((to) => (board[to] === 0 || (board[to]! >> 3 !== own && (board[to]! & 7) !== KING)) && isSafeMove(safety, square, to))
+    .filter(
+      (to) =>
+        (board[to] === 0 || (board[to]! >> 3 !== own && (board[to]! & 7) !== KING)) && isSafeMove(safety, square, to),
+    )
     .sort((a, b) => a - b);
 }
 

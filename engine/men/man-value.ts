@@ -104,7 +104,8 @@ function manValue(context: MenContext, square: Square, bishop: Note | undefined,
   if (kind !== 'king' && defenders.length === 0) notes.push('loose');
   if (enPrise > 0) notes.push('en-prise');
   if (isPiece && isOutOfPlay(side, square, safeMoves.length, movesToCentre)) notes.push('out-of-play');
-  if (isPiece && moves.length === 0 && !pinned && seen.every((to) => sideOn(map, to) === side)) notes.push('blocked-in');
+  if (isPiece && moves.length === 0 && !pinned && seen.every((to) => sideOn(map, to) === side))
+    notes.push('blocked-in');
   return {
     square,
     side,

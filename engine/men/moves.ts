@@ -38,12 +38,18 @@ export function squaresOfWords(words: Words): Square[] {
 }
 
 /** Fills the words with the squares that a man of the code attacks from a square; `vacant` counts as empty. */
-export function fillAttacked(board: Readonly<Uint8Array>, code: number, from: number, vacant: number, into: Words): void {
+export function fillAttacked(
+  board: Readonly<Uint8Array>,
+  code: number,
+  from: number,
+  vacant: number,
+  into: Words,
+): void {
   into[0] = 0;
   into[1] = 0;
   const kind = code & 7;
   if (kind === PAWN) {
-    const row = ((code >> 3 << 6) | from) * STRIKE_ROW;
+    const row = (((code >> 3) << 6) | from) * STRIKE_ROW;
     for (let at = row, to = PAWN_STRIKES[at]!; to >= 0; to = PAWN_STRIKES[++at]!) add(into, to);
     return;
   }

@@ -46,4 +46,3 @@ export function encodeReading(
 function encodeStatement({ key, id, theme, side, weight, head, text, squares, men, facts }: StatementValue): Statement {
   return { key, id, theme, side, weight, head, text, squares: names(squares), men: names(men), facts };
 }
-

@@ -36,7 +36,11 @@ describe('POST /readings', () => {
   it('reads boards without kings as diagrams only', async () => {
     const fen = '8/8/8/3p4/3P4/8/8/8 w - - 0 1';
     const strict = await promisedJson<Problem>(createReading, await call(createReading, { body: { fen } }));
-    expect(strict).toMatchObject({ code: 'fen-refused', path: '/fen', faults: [{ code: 'no-king' }, { code: 'no-king' }] });
+    expect(strict).toMatchObject({
+      code: 'fen-refused',
+      path: '/fen',
+      faults: [{ code: 'no-king' }, { code: 'no-king' }],
+    });
     const diagram = await promisedJson<Reading>(
       createReading,
       await call(createReading, { body: { fen, mode: 'diagram' } }),

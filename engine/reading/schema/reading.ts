@@ -53,7 +53,13 @@ export const manReadingSchema = z
     attackers: squaresSchema.describe('Enemy men that attack it, cheapest first.'),
     defenders: squaresSchema.describe('Own men that guard it, cheapest first.'),
     duties: z
-      .array(z.object({ square: squareSchema, loses: z.number().describe('Pawns lost there if the man leaves.'), by: z.enum(['guard', 'screen']).describe('It guards the man, or shuts the line of an enemy slider.') }))
+      .array(
+        z.object({
+          square: squareSchema,
+          loses: z.number().describe('Pawns lost there if the man leaves.'),
+          by: z.enum(['guard', 'screen']).describe('It guards the man, or shuts the line of an enemy slider.'),
+        }),
+      )
       .describe('What falls if it leaves.'),
     trapped: z.boolean().describe('Attackable and without a safe square.'),
     notes: z
@@ -144,7 +150,9 @@ export const kingReadingSchema = z
     guardedBy: squaresSchema.describe('Own men that guard its zone.'),
     flights: squaresSchema.describe('Squares it can step to now.'),
     luft: squaresSchema.describe('Flights off its back rank.'),
-    luftMoves: z.array(z.object({ from: squareSchema, to: squareSchema })).describe('Own pawn moves that would give it its first luft.'),
+    luftMoves: z
+      .array(z.object({ from: squareSchema, to: squareSchema }))
+      .describe('Own pawn moves that would give it its first luft.'),
     weakBackRank: z.boolean().describe('No luft, no own rook or queen on the back rank, and the enemy has one.'),
   })
   .meta({ id: 'KingReading', description: 'A king and its shelter.' });
