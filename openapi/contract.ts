@@ -45,7 +45,7 @@ export type ReplyValue<R extends Reply> =
   R extends JsonReply<infer S>
     ? z.output<S>
     : R extends LinesReply<infer S>
-      ? Iterable<z.output<S>>
+      ? AsyncIterable<z.output<S>>
       : R extends TextReply
         ? string
         : Uint8Array;

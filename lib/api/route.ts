@@ -4,16 +4,15 @@ import { anonymousContext, type Context } from '@/lib/context';
 import { env } from '@/lib/env';
 import { AppError } from '@/lib/errors';
 import { log } from '@/lib/log';
-import type { Contract, Reply, ReplyValue } from '@/openapi/contract';
+import type { Contract, JsonReply, LinesReply, Reply, ReplyValue } from '@/openapi/contract';
 import { Answer } from './answer';
 import { readBody } from './body';
-import { replyCheck } from './check';
 import { isUnchanged } from './etag';
 import { commonHeaders, requestIdOf } from './headers';
 import { lineStream } from './lines';
 import { problemResponse } from './problem';
 import { readParams, readQuery } from './query';
-import { jsonWriter } from './writer';
+import { replyText, Written } from './reply';
 
 /** What a handler is given: the parsed request and the outside world. */
 export interface Call<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType> {
@@ -23,7 +22,12 @@ export interface Call<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
   readonly body: z.output<B>;
 }
 
-type Given<R extends Reply> = ReplyValue<R> | Answer<ReplyValue<R>>;
+/** The value of a reply; JSON may be written already. */
+type Value<R extends Reply> =
+  | ReplyValue<R>
+  | (R extends JsonReply ? Written : R extends LinesReply ? AsyncIterable<Written> : never);
+
+type Given<R extends Reply> = Value<R> | Answer<Value<R>>;
 
 /** What Next hands to a route beside the request. */
 interface Segments {
@@ -53,8 +57,7 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
       body: (contract.body && (await readBody(request, contract.body))) as z.output<B>,
     };
     const given = await handler(call);
-    const { value, etag, headers } =
-      given instanceof Answer ? given : new Answer<ReplyValue<R>>({ value: () => given });
+    const { value, etag, headers } = given instanceof Answer ? given : new Answer<Value<R>>({ value: () => given });
     const allHeaders = { ...commonHeaders(requestId), ...(etag && { ETag: etag }), ...headers };
     if (etag && isUnchanged(request.headers.get('if-none-match'), etag))
       return new Response(null, { status: 304, headers: allHeaders });
@@ -87,10 +90,9 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
 /** How a reply's value becomes a body, checked on the way. Made once a route. */
 function bodyWriter(reply: Reply): (value: unknown) => BodyInit {
   if (reply.form !== 'json' && reply.form !== 'lines') return (value) => value as BodyInit;
-  const checked = replyCheck(reply.schema, reply.check, env.isProduction);
-  const write = jsonWriter(reply.schema);
-  const text = (value: unknown): string => write(checked(value)) ?? 'null';
-  return reply.form === 'json' ? text : (value) => lineStream(value as Iterable<unknown>, text);
+  const text = replyText(reply, env.isProduction);
+  if (reply.form === 'lines') return (value) => lineStream(value as AsyncIterable<unknown>, text);
+  return (value) => (value instanceof Written ? (value.bytes as BodyInit) : text(value));
 }
 
 /** Text types say their encoding; JSON has only one (RFC 8259, 8.1). */

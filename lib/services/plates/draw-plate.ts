@@ -4,17 +4,17 @@ import type { Context } from '@/lib/context';
 import { AppError } from '@/lib/errors';
 import { platePng, plateSvg } from '@/lib/figures/plate';
 import type { PlateQuery } from '@/openapi/schemas/plates';
-import { readPosition } from '../readings/read-position';
+import { fullReading } from '../readings/full-reading';
 
 /** The figure as SVG text. Throws `fen-refused`, or `invalid-request` for a man that is not there. */
-export async function drawPlateSvg(ctx: Context, query: PlateQuery): Promise<string> {
-  const reading = await readPosition(ctx, query);
+export async function drawPlateSvg(_ctx: Context, query: PlateQuery): Promise<string> {
+  const reading = fullReading(query);
   return plateSvg(reading, optionsOf(reading, query));
 }
 
 /** The figure as the bytes of a PNG, exactly `width` pixels wide. Throws like `drawPlateSvg`. */
-export async function drawPlatePng(ctx: Context, query: PlateQuery): Promise<Uint8Array> {
-  const reading = await readPosition(ctx, query);
+export async function drawPlatePng(_ctx: Context, query: PlateQuery): Promise<Uint8Array> {
+  const reading = fullReading(query);
   return platePng(reading, optionsOf(reading, query));
 }
 

@@ -1,28 +1,19 @@
-/** Many FENs to readings, each made when it is asked for. */
+/** Many FENs to lines of JSON, computed as they are taken. */
+import { Written } from '@/lib/api/reply';
 import type { Context } from '@/lib/context';
 import { log } from '@/lib/log';
-import type { BatchLine, BatchRequest } from '@/openapi/schemas/readings';
-import { computeReading } from './engine';
-import { partsOf } from './parts';
+import type { BatchRequest } from '@/openapi/schemas/readings';
 
-/** One line a FEN, in order; nothing is computed before it is taken, and nothing after the caller has gone. */
-export async function readBatch(ctx: Context, { fens, mode, include }: BatchRequest): Promise<Iterable<BatchLine>> {
-  return linesOf(ctx, { fens, mode, include });
-}
+/** Lines computed at once after the first: two or three milliseconds of work, so that nobody else waits long. */
+const CHUNK_LINES = 4;
 
-function* linesOf(ctx: Context, { fens, mode, include }: BatchRequest): Generator<BatchLine> {
-  for (const [index, fen] of fens.entries()) {
+/** Lines in the order of the FENs. The first comes alone; nothing is computed before it is taken, nor after the caller has gone. */
+export async function* readBatch(ctx: Context, { fens, mode, include }: BatchRequest): AsyncGenerator<Written> {
+  for (let from = 0, count = 1; from < fens.length; from += count, count = CHUNK_LINES) {
     if (ctx.signal.aborted) return;
-    const line = index + 1;
-    try {
-      const result = computeReading(fen, mode);
-      yield result.ok ? partsOf(result.value, include) : { error: result.fault[0], line };
-    } catch (error) {
-      log.error({ err: error, requestId: ctx.requestId, line }, 'our own mistake');
-      yield {
-        error: { code: 'internal', field: 'text', message: 'This position could not be read, by our mistake.' },
-        line,
-      };
-    }
+    const chunk = fens.slice(from, from + count);
+    const outcome = await ctx.compute.run({ kind: 'lines', fens: chunk, firstLine: from + 1, mode, include });
+    for (const mistake of outcome.mistakes) log.error({ ...mistake, requestId: ctx.requestId }, 'our own mistake');
+    yield new Written(outcome.ndjson);
   }
 }

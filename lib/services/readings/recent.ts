@@ -1,8 +1,4 @@
-/** The readings asked for last, kept because the same position is often asked for again: a page, its figure, its ETag. */
-import type { Reading } from '@/engine/reading/schema';
-
-/** How many readings are kept: a reading takes about a tenth of a megabyte, so some twenty in all. */
-const KEPT_MAX = 200;
+/** What was asked for last, kept because the same position is often asked for again: a page, its figure, its ETag. */
 
 /** Values kept up to a number; the one that was not asked for longest goes first. */
 export class Recent<V> {
@@ -28,6 +24,3 @@ export class Recent<V> {
     if (this.#kept.size > this.#max && !oldest.done) this.#kept.delete(oldest.value);
   }
 }
-
-/** The readings that this process made last, by mode and FEN. */
-export const recentReadings = new Recent<Reading>(KEPT_MAX);
