@@ -2,4 +2,4 @@
 import { register } from 'tsx/esm/api';
 
 register();
-await import('../../lib/compute/thread.ts');
+await import(new URL('../../lib/compute/thread.ts', import.meta.url).href);
