@@ -17,7 +17,7 @@ export interface BishopValue {
   /** Own pawns on its colour, and all own pawns. */
   readonly onColour: readonly Square[];
   readonly ownPawns: number;
-  /** Own pawns on its colour that can neither move nor capture, on the files c to f. */
+  /** Own pawns on its colour on the files c to f that enemy pawns fix: see `isFixedByPawns`. */
   readonly fixedCentre: readonly Square[];
   readonly bad: boolean;
   /** Outside the chain: see `isOutside`. */
@@ -50,7 +50,7 @@ function bishopValue(context: MenContext, pawns: PawnValues, square: Square): Bi
   for (const pawn of pawns.pawns) {
     if (pawn.side !== side || colourOf(pawn.square) !== colour) continue;
     onColour.push(pawn.square);
-    if (pawn.fixed && fileOf(pawn.square) >= 2 && fileOf(pawn.square) <= 5) fixed.push(pawn);
+    if (isFixedByPawns(pawn) && fileOf(pawn.square) >= 2 && fileOf(pawn.square) <= 5) fixed.push(pawn);
   }
   const ownPawns = pawns[side].pawns.length;
   const fixedCentre = fixed.map((pawn) => pawn.square);
@@ -66,6 +66,14 @@ function bishopValue(context: MenContext, pawns: PawnValues, square: Square): Bi
     outside,
     remedy: bad && !outside ? remedyOf(context, pawns, side, square, fixed) : null,
   };
+}
+
+/**
+ * Fixed by pawns: it cannot take one, and an enemy pawn stands before it or attacks the square before it. A pawn that
+ * only a piece stands before is not fixed: the piece will go.
+ */
+function isFixedByPawns({ rammed, stopAttacked, levers }: PawnReading): boolean {
+  return (rammed || stopAttacked) && !levers.some(({ moves }) => moves === 0);
 }
 
 /**

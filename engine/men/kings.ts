@@ -18,7 +18,7 @@ export interface KingValue {
   readonly side: Side;
   /** The king's file and its neighbours, from the a-file on. */
   readonly shelter: readonly ShelterFile[];
-  /** Of these files, those without an own pawn: open, or half-open for the enemy. */
+  /** Of these files, those without an enemy pawn: open, or half-open for the enemy. */
   readonly openBeside: readonly number[];
   /** Enemy men, the king apart, that attack its zone: its square and the squares around. */
   readonly reachedBy: readonly Square[];
@@ -52,7 +52,7 @@ export function kingValue(safety: Safety, side: Side): KingValue | null {
     square,
     side,
     shelter,
-    openBeside: shelter.filter(({ file }) => !hasPawn(map, side, file)).map(({ file }) => file),
+    openBeside: shelter.filter(({ file }) => !hasPawn(map, opponent(side), file)).map(({ file }) => file),
     reachedBy: bearing(map, opponent(side), zone),
     guardedBy: bearing(map, side, zone),
     flights,

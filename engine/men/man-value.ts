@@ -138,13 +138,15 @@ function centreDistance({ safety: { map }, moves }: Reach, side: SideIndex, squa
 }
 
 /**
- * Out of play: a developed piece (off its side's first rank) with at most two safe moves that is three or more
- * safe moves from every centre square. The bounds are ours; after Edward Lasker, Chess Strategy (1915), who
+ * Out of play: a developed piece (off its side's first rank) on the a- or h-file with at most two safe moves, or on the
+ * b- or g-file with at most one, that is three or more safe moves from every centre square. The bounds are ours; after Edward Lasker, Chess Strategy (1915), who
  * counts the moves that bring a man back into the game.
  */
 function isOutOfPlay(side: Side, square: Square, safeMoves: number, movesToCentre: number | null): boolean {
   const developed = side === 'white' ? square >= 8 : square < 56;
-  return developed && safeMoves <= 2 && (movesToCentre === null || movesToCentre >= 3);
+  const file = fileOf(square);
+  const bound = file === 0 || file === 7 ? 2 : file === 1 || file === 6 ? 1 : -1;
+  return developed && safeMoves <= bound && (movesToCentre === null || movesToCentre >= 3);
 }
 
 /**

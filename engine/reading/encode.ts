@@ -1,7 +1,7 @@
 /** Engine values and their statements as the JSON of a reading. */
 import { type Fault, formatFen } from '../board';
 import type { StatementValue } from '../explain';
-import type { ReadingValues } from '../explain/values';
+import type { ReadingValues } from '../explain';
 import { encodeDiagonals, encodeFiles, encodeKing, encodeMen } from './encode-men';
 import {
   encodeComplexes,
@@ -9,7 +9,6 @@ import {
   encodePawns,
   encodeSquares,
   encodeWeakSquares,
-  names,
 } from './encode-squares';
 import type { Reading, Statement } from './schema';
 import { ENGINE_VERSION } from './version';
@@ -44,5 +43,5 @@ export function encodeReading(
 }
 
 function encodeStatement({ key, id, theme, side, weight, head, text, squares, men, facts }: StatementValue): Statement {
-  return { key, id, theme, side, weight, head, text, squares: names(squares), men: names(men), facts };
+  return { key, id, theme, side, weight, head, text, squares: [...squares], men: [...men], facts };
 }

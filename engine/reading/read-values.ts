@@ -2,7 +2,7 @@
 import { attackMap, newAttackMap } from '../attacks';
 import type { Position } from '../board';
 import { safetyOf } from '../exchange';
-import type { ReadingValues } from '../explain/values';
+import type { ReadingValues } from '../explain';
 import { diagonalValues, fileValues, seventhRank } from '../files';
 import { bishopNotes, bishopValues, kingValue, manValues, safeMovesOf } from '../men';
 import { newPawnMap, pawnMap, pawnValues } from '../pawns';

@@ -1,0 +1,127 @@
+/** From engine values to ranked statements, and the few that lead. */
+import { THEMES, type Side, type SquareName, type Theme } from '../types';
+import type { Fact, FactId } from './fact';
+import { controlFacts } from './gather/control';
+import { filesFacts } from './gather/files';
+import { kingFacts } from './gather/king';
+import { menFacts } from './gather/men';
+import { outpostsFacts } from './gather/outposts';
+import { squaresFacts } from './gather/squares';
+import { structureFacts } from './gather/structure';
+import { phraseText } from './phrase';
+import { phraseOf } from './phrases';
+import { weightOf } from './rank';
+import type { ReadingValues } from './values';
+
+/** One statement of a reading. */
+export interface StatementValue {
+  /** Unique in the reading. */
+  readonly key: string;
+  readonly id: FactId;
+  readonly theme: Theme;
+  readonly side: Side | null;
+  readonly weight: number;
+  readonly head: string;
+  readonly text: string;
+  readonly squares: readonly SquareName[];
+  readonly men: readonly SquareName[];
+  /** The fact without what stands in the fields above. */
+  readonly facts: Readonly<Record<string, unknown>>;
+}
+
+export interface Explanation {
+  /** Heaviest first. */
+  readonly statements: readonly StatementValue[];
+  /** Keys of the few that matter most: at most one a theme and one a man. */
+  readonly lead: readonly string[];
+}
+
+const GATHER: Readonly<Record<Theme, (values: ReadingValues) => readonly Fact[]>> = {
+  structure: structureFacts,
+  squares: squaresFacts,
+  outposts: outpostsFacts,
+  files: filesFacts,
+  men: menFacts,
+  king: kingFacts,
+  control: controlFacts,
+};
+
+/** Most statements of one kind that a side gets; the heaviest stay. */
+const MOST_OF_A_KIND = 4;
+/** Most leading statements: as many as stand beside a plate. */
+const LEAD_MAX = 5;
+
+interface Weighed {
+  readonly theme: Theme;
+  readonly fact: Fact;
+  readonly weight: number;
+  readonly key: string;
+}
+
+/** Everything that is said of a position. */
+export function explain(values: ReadingValues): Explanation {
+  const weighed: Weighed[] = [];
+  for (const theme of THEMES) {
+    for (const fact of GATHER[theme](values)) weighed.push({ theme, fact, weight: weightOf(fact), key: keyOf(fact) });
+  }
+  const mover = values.position.sideToMove;
+  weighed.sort((a, b) => b.weight - a.weight || sideOrder(a.fact, mover) - sideOrder(b.fact, mover) || viewOrder(a.fact) - viewOrder(b.fact));
+  const statements = withoutRepeats(weighed).map(statement);
+  return { statements, lead: leading(statements) };
+}
+
+function keyOf({ id, side, men, squares }: Fact): string {
+  return [id, side ?? 'both', ...men, '-', ...squares].join('.').replace(/\.-\.?$/, '').replace('.-.', '-');
+}
+
+function sideOrder({ side }: Fact, mover: Side): number {
+  return side === mover ? 0 : side === null ? 1 : 2;
+}
+
+/** Order by the first square as the fact's side sees it, so that turning colours and board turns nothing else. */
+function viewOrder({ squares, men, side }: Fact): number {
+  const first = squares[0] ?? men[0];
+  if (!first) return 0;
+  const rank = Number(first.charAt(1));
+  return first.charCodeAt(0) * 10 + (side === 'black' ? 9 - rank : rank);
+}
+
+/** Drops what an outpost's sentence says better, and all but the heaviest of a kind. */
+function withoutRepeats(weighed: readonly Weighed[]): Weighed[] {
+  const posts = new Set<SquareName>();
+  for (const { fact } of weighed) {
+    if (fact.id === 'outpost-free') posts.add(fact.square);
+    if (fact.id === 'outpost-taken') posts.add(fact.man.square);
+  }
+  const counts = new Map<string, number>();
+  const keys = new Set<string>();
+  return weighed.filter(({ fact, key }) => {
+    if ((fact.id === 'weak-for-good' || fact.id === 'weak-while-fixed') && posts.has(fact.square)) return false;
+    if (keys.has(key)) return false;
+    keys.add(key);
+    const kind = `${fact.id}.${fact.side}`;
+    const count = (counts.get(kind) ?? 0) + 1;
+    counts.set(kind, count);
+    return count <= MOST_OF_A_KIND;
+  });
+}
+
+function statement({ theme, fact, weight, key }: Weighed): StatementValue {
+  const { id, side, squares, men, ...facts } = fact;
+  const phrase = phraseOf(fact);
+  return { key, id, theme, side, weight, head: phrase.head, text: phraseText(phrase), squares, men, facts };
+}
+
+function leading(statements: readonly StatementValue[]): string[] {
+  const themes = new Set<Theme>();
+  const taken = new Set<SquareName>();
+  const lead: string[] = [];
+  for (const { key, theme, men, squares } of statements) {
+    if (lead.length === LEAD_MAX) break;
+    if (themes.has(theme) || squares.length + men.length === 0 || men.some((man) => taken.has(man))) continue;
+    themes.add(theme);
+    for (const man of men) taken.add(man);
+    lead.push(key);
+  }
+  return lead;
+}

@@ -1,0 +1,179 @@
+/** Facts about files, the seventh rank and diagonals that hold in a position. */
+import { attackersOf, kindOn, sideOn } from '../../attacks';
+import { fileName, fileOf, relativeRank, squareName } from '../../board';
+import type { DiagonalValue, FileValue } from '../../files';
+import { opponent, type Side, SIDES, type Square } from '../../types';
+import type { FilesFact } from '../facts/files';
+import type { ReadingValues } from '../values';
+import { manAt, namesInView } from './names';
+
+/** Everything worth saying about files, the seventh rank and diagonals. */
+export function filesFacts(values: ReadingValues): FilesFact[] {
+  const facts: FilesFact[] = [];
+  for (const file of values.files) {
+    if (file.status === 'closed') continue;
+    ownership(values, file, facts);
+    for (const side of SIDES) {
+      halfOpen(values, file, side, facts);
+      doubled(values, file, side, facts);
+    }
+  }
+  for (const side of SIDES) {
+    takers(values, side, facts);
+    seventh(values, side, facts);
+    diagonals(values, side, facts);
+  }
+  return facts;
+}
+
+function ownership(values: ReadingValues, file: FileValue, facts: FilesFact[]): void {
+  const name = fileName(file.file);
+  const { control, status, heavy, entries } = file;
+  if (status === 'closed') return;
+  if (control === 'white' || control === 'black') {
+    if (heavy[opponent(control)].length > 0) return;
+    // On a half-open file the enemy pawn is the point: its sentence says it.
+    if (status === 'half-open') return;
+    const men = heavy[control].map((square) => manAt(values, square));
+    const inTo = entries[control].map(squareName);
+    facts.push({
+      id: 'file-owned',
+      side: control,
+      file: name,
+      status,
+      heavy: men,
+      entries: inTo,
+      squares: [...men.map(({ square }) => square), ...inTo],
+      men: men.map(({ square }) => square),
+    });
+    return;
+  }
+  if (status !== 'open') return;
+  const mine = values.position.sideToMove;
+  if (heavy.white.length > 0 && heavy.black.length > 0) {
+    const men = [...heavy[mine], ...heavy[opponent(mine)]].map((square) => manAt(values, square));
+    const squares = men.map(({ square }) => square);
+    facts.push({ id: 'file-contested', side: null, file: name, heavy: men, squares, men: squares });
+  } else if (entries.white.length === 0 && entries.black.length === 0) {
+    const ends = namesInView([file.file as Square, (56 + file.file) as Square], mine);
+    facts.push({ id: 'file-open-no-entry', side: null, file: name, squares: ends, men: [] });
+  }
+}
+
+function halfOpen(values: ReadingValues, { file, halfOpenFor, targets, heavy, entries }: FileValue, side: Side, facts: FilesFact[]): void {
+  if (halfOpenFor !== side) return;
+  const [target] = targets;
+  const enemy = opponent(side);
+  const men = heavy[side].map((square) => manAt(values, square));
+  const on = men.map(({ square }) => square);
+  if (target) {
+    const square = squareName(target.square);
+    const why = target.backward ? 'backward' : target.isolated ? 'isolated' : 'unguarded';
+    facts.push({ id: 'half-open-target', side, file: fileName(file), target: square, why, heavy: men, squares: [square, ...on], men: on });
+    return;
+  }
+  const pawns = values.pawns[enemy].pawns.filter((square) => fileOf(square) === file);
+  pawns.sort((a, b) => relativeRank(a, side) - relativeRank(b, side));
+  const [first] = pawns;
+  if (first === undefined || entries[side].length > 0 || men.length === 0) return;
+  const guards = namesInView(attackersOf(values.map, enemy, first).filter((square) => kindOn(values.map, square) === 'pawn'), enemy);
+  const pawn = squareName(first);
+  facts.push({ id: 'half-open-nothing', side, file: fileName(file), pawn, guards, squares: [pawn, ...guards], men: on });
+}
+
+function doubled(values: ReadingValues, { file, heavy }: FileValue, side: Side, facts: FilesFact[]): void {
+  const squares = heavy[side];
+  if (squares.length < 2) return;
+  const between = (a: Square, b: Square) => {
+    for (let at = Math.min(a, b) + 8; at < Math.max(a, b); at += 8) if (values.map.board[at] !== 0) return false;
+    return true;
+  };
+  for (let index = 1; index < squares.length; index++) {
+    const [rear, front] = [squares[index - 1], squares[index]];
+    if (rear === undefined || front === undefined || !between(rear, front)) return;
+  }
+  const men = squares.map((square) => manAt(values, square));
+  const on = men.map(({ square }) => square);
+  facts.push({ id: 'heavy-doubled', side, file: fileName(file), heavy: men, squares: on, men: on });
+}
+
+/** The rook that gets soonest to a file on which its side has no heavy man yet: one a side. */
+function takers(values: ReadingValues, side: Side, facts: FilesFact[]): void {
+  const found = values.files.flatMap(({ file, status, heavy, takers: rooks }) => {
+    const taker = rooks[side];
+    return taker && status !== 'closed' && heavy[side].length === 0 ? [{ file, status, taker }] : [];
+  });
+  found.sort((a, b) => a.taker.moves - b.taker.moves || (a.status === b.status ? a.file - b.file : a.status === 'open' ? -1 : 1));
+  const [best] = found;
+  if (!best || best.taker.moves > 2) return;
+  const [rook, to] = [squareName(best.taker.rook), squareName(best.taker.to)];
+  facts.push({
+    id: 'rook-to-file',
+    side,
+    rook,
+    to,
+    moves: best.taker.moves,
+    file: fileName(best.file),
+    status: best.status,
+    squares: [to],
+    men: [rook],
+  });
+}
+
+function seventh(values: ReadingValues, side: Side, facts: FilesFact[]): void {
+  const { there, comers } = values.sevenths[side];
+  if (there.length > 0) {
+    const men = namesInView(there, side);
+    const heavy = men.map((square) => manAt(values, there[there.map(squareName).indexOf(square)] ?? (0 as Square)));
+    const pawns = namesInView(values.pawns[opponent(side)].pawns.filter((square) => relativeRank(square, side) === 7), side);
+    facts.push({ id: 'on-seventh', side, men, heavy, pawns, squares: [...men, ...pawns] });
+    return;
+  }
+  const [first] = comers;
+  if (!first || first.moves > 2) return;
+  const man = manAt(values, first.from);
+  const to = squareName(first.to);
+  facts.push({ id: 'to-seventh', side, man, to, moves: first.moves, squares: [to], men: [man.square] });
+}
+
+function isForward({ from, squares }: DiagonalValue, side: Side): boolean {
+  const [next] = squares;
+  return next !== undefined && relativeRank(next, side) > relativeRank(from, side);
+}
+
+function diagonals(values: ReadingValues, side: Side, facts: FilesFact[]): void {
+  for (const diagonal of values.diagonals) {
+    if (diagonal.side !== side || kindOn(values.map, diagonal.from) !== 'bishop') continue;
+    const last = diagonal.squares[diagonal.squares.length - 1];
+    if (last === undefined) continue;
+    const man = manAt(values, diagonal.from);
+    const forward = isForward(diagonal, side);
+    const isLong = diagonal.direction === 'a1h8' ? (diagonal.from & 7) === diagonal.from >> 3 : (diagonal.from & 7) + (diagonal.from >> 3) === 7;
+    if (forward && isLong && relativeRank(diagonal.from, side) <= 3 && diagonal.squares.length >= 5) {
+      facts.push({
+        id: 'long-diagonal-open',
+        side,
+        man,
+        last: squareName(last),
+        seen: diagonal.squares.length,
+        squares: diagonal.squares.map(squareName),
+        men: [man.square],
+      });
+    }
+    const stopper = diagonal.stoppedBy;
+    const shutElsewhere = values.diagonals.every(
+      (other) => other.from !== diagonal.from || other.squares.length <= 2 || !isForward(other, side),
+    );
+    if (forward && stopper !== null && diagonal.stopperFixed && shutElsewhere) {
+      facts.push({
+        id: 'diagonal-shut',
+        side,
+        man,
+        stopper: squareName(stopper),
+        stopperSide: sideOn(values.map, stopper) ?? side,
+        squares: [squareName(stopper)],
+        men: [man.square],
+      });
+    }
+  }
+}

@@ -1,0 +1,191 @@
+/** Facts about men that hold in a position. */
+import { isPinned } from '../../attacks';
+import { colourOf, DIRECTION_TO, fileOf, relativeRank, squareName } from '../../board';
+import { firstMen } from '../../attacks';
+import { type BishopValue, fillAttacked, type ManValue, newWords, squaresOfWords } from '../../men';
+import { type Kind, opponent, type Side, SIDES, type Square, WORTH } from '../../types';
+import type { MenFact, PlacedMan } from '../facts/men';
+import type { ReadingValues } from '../values';
+import { inView } from '../words';
+import { countOf, manAt } from './names';
+
+/** Most moves of each kind on an empty board: the handbooks' table. */
+const MOST: Partial<Record<Kind, number>> = { knight: 8, bishop: 13, rook: 14, queen: 27 };
+
+/** Everything worth saying about men. */
+export function menFacts(values: ReadingValues): MenFact[] {
+  const facts: MenFact[] = [];
+  for (const man of values.men) oneMan(values, man, facts);
+  for (const bishop of values.bishops) oneBishop(values, bishop, facts);
+  for (const side of SIDES) {
+    placed(values, side, facts);
+    pair(values, side, facts);
+    blockedIn(values, side, facts);
+  }
+  bishopAgainstKnight(values, facts);
+  return facts;
+}
+
+function oneMan(values: ReadingValues, value: ManValue, facts: MenFact[]): void {
+  const { side, square, kind, notes } = value;
+  const man = manAt(values, square);
+  const base = { side, man, squares: [man.square], men: [man.square] };
+  const isPiece = kind !== 'pawn' && kind !== 'king';
+  if (value.enPrise > 0) facts.push({ ...base, id: 'en-prise', gain: value.enPrise, worth: WORTH[kind] });
+  if (value.trapped) facts.push({ ...base, id: 'trapped', attacked: value.attackers.length > 0 });
+  if (notes.includes('out-of-play')) {
+    facts.push({ ...base, id: 'out-of-play', safeMoves: value.safeMoves.length, toCentre: value.movesToCentre });
+  } else if (notes.includes('rim')) {
+    facts.push({ ...base, id: 'knight-on-rim', square: man.square, sees: value.sees });
+  }
+  if (value.pinned) pinned(values, value, facts);
+  const guarded = value.duties.filter(({ by }) => by === 'guard');
+  if (notes.includes('overloaded')) {
+    const wards = inView(guarded.map((duty) => squareName(duty.square)), side).slice(0, 2);
+    const guards = wards.map((name) => manAt(values, guarded.find((duty) => squareName(duty.square) === name)?.square ?? square));
+    facts.push({ ...base, id: 'overloaded', guards, squares: wards });
+  } else if (isPiece && value.duties.length > 0) {
+    const [duty] = [...value.duties].sort((a, b) => b.loses - a.loses || fileOf(a.square) - fileOf(b.square) || relativeRank(a.square, side) - relativeRank(b.square, side));
+    if (duty) {
+      const ward = manAt(values, duty.square);
+      facts.push({ ...base, id: 'tied', ward, loses: duty.loses, by: duty.by, squares: [ward.square], men: [man.square, ward.square] });
+    }
+  }
+  if (isPiece && value.defenders.length === 0 && value.enPrise === 0 && relativeRank(square, side) >= 4) {
+    facts.push({ ...base, id: 'loose' });
+  }
+}
+
+function pinned(values: ReadingValues, { square, side }: ManValue, facts: MenFact[]): void {
+  const king = values.map.kings[side === 'white' ? 0 : 1] as Square;
+  const direction = DIRECTION_TO[(king << 6) | square]!;
+  const pinner = firstMen(values.map)[(square << 3) | direction]! as Square;
+  if (!isPinned(values.map, square) || pinner < 0) return;
+  const man = manAt(values, square);
+  const by = manAt(values, pinner);
+  facts.push({
+    id: 'pinned',
+    side,
+    man,
+    pinner: by,
+    king: squareName(king),
+    squares: [man.square, by.square, squareName(king)],
+    men: [man.square, by.square],
+  });
+}
+
+function oneBishop(values: ReadingValues, bishop: BishopValue, facts: MenFact[]): void {
+  if (!bishop.bad) return;
+  const { side, onColour, ownPawns, remedy } = bishop;
+  const square = squareName(bishop.square);
+  if (bishop.outside) {
+    const safeMoves = values.men.find((man) => man.square === bishop.square)?.safeMoves.length ?? 0;
+    facts.push({ id: 'bad-but-active', side, square, onColour: onColour.length, pawns: ownPawns, safeMoves, squares: [square], men: [square] });
+    return;
+  }
+  const fixed = inView(bishop.fixedCentre.map(squareName), side);
+  facts.push({
+    id: 'bad-bishop',
+    side,
+    square,
+    colour: colourOf(bishop.square),
+    onColour: onColour.length,
+    pawns: ownPawns,
+    fixed,
+    tradeable: remedy?.tradeable ?? false,
+    lever: remedy?.lever ? { pawn: squareName(remedy.lever.from), on: squareName(remedy.lever.on), against: squareName(remedy.lever.against), moves: remedy.lever.moves } : null,
+    outside: remedy?.outside ? { square: squareName(remedy.outside.square), moves: remedy.outside.moves } : null,
+    squares: [square, ...fixed],
+    men: [square],
+  });
+}
+
+/** Best and worst placed piece of a side by its share of safe moves; the worst only once most men are out. */
+function placed(values: ReadingValues, side: Side, facts: MenFact[]): void {
+  const ranked = values.men
+    .filter((man) => man.side === side && MOST[man.kind] !== undefined && man.enPrise === 0)
+    .map((man) => ({ man, share: man.safeMoves.length / (MOST[man.kind] ?? 1) }))
+    .sort((a, b) => b.share - a.share);
+  const [best, second] = ranked;
+  const worst = ranked[ranked.length - 1];
+  const nextWorst = ranked[ranked.length - 2];
+  if (!best || !second || !worst || !nextWorst) return;
+  if (best.share > second.share && best.share >= 0.5) facts.push(placement(values, 'best-placed', best.man));
+  if (worst.man.kind !== 'queen' && worst.share < nextWorst.share && worst.share <= 0.25) facts.push(placement(values, 'worst-placed', worst.man));
+}
+
+const words = newWords();
+
+function placement(values: ReadingValues, id: PlacedMan['id'], { square, side, kind, safeMoves, movesToCentre }: ManValue): MenFact {
+  fillAttacked(values.map.board, values.map.board[square]!, square, square, words);
+  const enemyHalf = squaresOfWords(words).filter((to) => relativeRank(to, side) >= 5).length;
+  const man = manAt(values, square);
+  return {
+    id,
+    side,
+    man,
+    safeMoves: safeMoves.length,
+    most: MOST[kind] ?? 0,
+    enemyHalf,
+    toCentre: movesToCentre,
+    squares: [man.square],
+    men: [man.square],
+  };
+}
+
+function bishopsOf(values: ReadingValues, side: Side): BishopValue[] {
+  return values.bishops.filter((bishop) => bishop.side === side);
+}
+
+function hasPair(values: ReadingValues, side: Side): boolean {
+  return new Set(bishopsOf(values, side).map(({ square }) => colourOf(square))).size === 2;
+}
+
+function pair(values: ReadingValues, side: Side, facts: MenFact[]): void {
+  if (!hasPair(values, side) || hasPair(values, opponent(side))) return;
+  const men = inView(bishopsOf(values, side).map(({ square }) => squareName(square)), side);
+  facts.push({ id: 'bishop-pair', side, squares: men, men });
+}
+
+/** The only minor pieces left are a bishop and a knight of different sides, and the pawns suit one of them. */
+function bishopAgainstKnight(values: ReadingValues, facts: MenFact[]): void {
+  for (const side of SIDES) {
+    const enemy = opponent(side);
+    const [bishop] = bishopsOf(values, side);
+    const knight = values.men.find((man) => man.side === enemy && man.kind === 'knight');
+    const minors = (of: Side) => countOf(values, of, 'bishop') + countOf(values, of, 'knight');
+    if (!bishop || !knight || minors(side) !== 1 || minors(enemy) !== 1) continue;
+    const rams = values.pawns.rams.length;
+    const all = values.pawns.pawns.map((pawn) => fileOf(pawn.square));
+    const bothWings = all.some((file) => file <= 2) && all.some((file) => file >= 5);
+    const onColour = bishop.onColour.length;
+    const favours = bishop.bad && rams > 0 ? 'knight' : bothWings && rams === 0 && onColour * 2 < bishop.ownPawns ? 'bishop' : null;
+    if (!favours) continue;
+    const [at, against] = [squareName(bishop.square), squareName(knight.square)];
+    facts.push({
+      id: 'bishop-against-knight',
+      side,
+      bishop: at,
+      knight: against,
+      favours,
+      onColour,
+      pawns: bishop.ownPawns,
+      rams,
+      squares: [at, against],
+      men: [at, against],
+    });
+  }
+}
+
+/** Pieces shut in by their own men, where these are exceptions: at most two a side. */
+function blockedIn(values: ReadingValues, side: Side, facts: MenFact[]): void {
+  const shut = values.men.filter((man) => man.side === side && man.notes.includes('blocked-in'));
+  if (shut.length > 2) return;
+  for (const { square } of shut) {
+    const man = manAt(values, square);
+    fillAttacked(values.map.board, values.map.board[square]!, square, square, words);
+    const blockers = squaresOfWords(words);
+    const by = inView(blockers.map(squareName), side).map((name) => manAt(values, blockers.find((each) => squareName(each) === name) ?? square));
+    facts.push({ id: 'blocked-in', side, man, by, squares: [man.square, ...by.map((each) => each.square)], men: [man.square] });
+  }
+}

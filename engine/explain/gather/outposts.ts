@@ -1,0 +1,54 @@
+/** Facts about outposts that hold in a position. */
+import { relativeRank, squareName } from '../../board';
+import type { OutpostValue } from '../../squares';
+import { opponent } from '../../types';
+import type { OutpostsFact } from '../facts/outposts';
+import type { ReadingValues } from '../values';
+import { comers, countOf, manAt, pawnOnItsWay } from './names';
+
+/** Everything worth saying about outposts. */
+export function outpostsFacts(values: ReadingValues): OutpostsFact[] {
+  const facts: OutpostsFact[] = [];
+  for (const post of values.outposts) {
+    const fact = outpostFact(values, post);
+    if (fact) facts.push(fact);
+  }
+  return facts;
+}
+
+function outpostFact(values: ReadingValues, post: OutpostValue): OutpostsFact | null {
+  const { side, square, support, challenge, hold, occupant, users, tradable } = post;
+  const name = squareName(square);
+  const man = occupant === null ? null : manAt(values, square);
+  const settled = man !== null && man.kind !== 'king' && man.kind !== 'queen';
+  if (post.rank === 'outpost' && support && hold !== 'open') {
+    const base = { side, hold, support: pawnOnItsWay(values, side, support.pawn, support.moves, square) };
+    if (settled) return { ...base, id: 'outpost-taken', man, tradable, squares: [name], men: [name] };
+    const coming = comers(values, users, side).filter(
+      ({ kind }) => kind === 'knight' || kind === 'bishop' || kind === 'rook',
+    );
+    const [first] = coming;
+    if (man !== null || !first || values.map.board[square] !== 0) return null;
+    const men = coming.filter(({ moves }) => moves === first.moves).map((comer) => comer.square);
+    return {
+      ...base,
+      id: 'outpost-free',
+      square: name,
+      comers: coming,
+      ownKnights: countOf(values, side, 'knight'),
+      squares: [name],
+      men,
+    };
+  }
+  if (!settled || !challenge || relativeRank(square, side) < 5 || (man.kind !== 'knight' && man.kind !== 'bishop'))
+    return null;
+  return {
+    id: 'advanced-post',
+    side,
+    man,
+    challenge: pawnOnItsWay(values, opponent(side), challenge.from, challenge.moves, square),
+    guard: support && support.moves === 0 ? squareName(support.pawn) : null,
+    squares: [name, squareName(challenge.from)],
+    men: [name],
+  };
+}

@@ -1,0 +1,61 @@
+/** Sentences about files, the seventh rank and diagonals. */
+import type { FilesFact } from '../facts/files';
+import type { Phrases } from '../phrase';
+import { capital, counted, inWords, listed, name, possessive, theMan, theMen } from '../words';
+
+const WHY = {
+  isolated: 'the pawn there is isolated',
+  backward: 'the pawn there is backward',
+  unguarded: 'no pawn guards the pawn there',
+} as const;
+
+export const FILES_PHRASES: Phrases<FilesFact> = {
+  'file-owned': ({ side, file, heavy, entries }) => ({
+    head: `${name(side)} owns the ${file}-file`,
+    body:
+      entries.length > 0
+        ? `${theMen(heavy)} can enter on ${listed(entries, 'or')}`
+        : `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there alone, but no entry square is safe yet`,
+  }),
+  'file-contested': ({ file, heavy }) => ({
+    head: `The ${file}-file is contested`,
+    body: `both sides stand on it, with ${theMen(heavy)}`,
+  }),
+  'file-open-no-entry': ({ file }) => ({
+    head: `The ${file}-file is open and leads nowhere`,
+    body: 'no square on its last two ranks is safe for a rook of either side',
+  }),
+  'half-open-target': ({ side, file, target, why, heavy }) => ({
+    head: `The ${file}-file is half-open for ${name(side)} and bites on ${target}`,
+    body: WHY[why],
+    more: [heavy.length > 0 ? `${capital(theMen(heavy))} ${heavy.length === 1 ? 'stands' : 'stand'} on the file` : null],
+  }),
+  'half-open-nothing': ({ side, file, pawn, guards }) => ({
+    head: `The ${file}-file is half-open for ${name(side)} and bites on nothing`,
+    body: `${listed(guards)} ${guards.length === 1 ? 'guards' : 'guard'} ${pawn}, and no entry square on it is ${possessive(side)}`,
+  }),
+  'rook-to-file': ({ rook, to, moves, file, status }) => ({
+    head: `The rook on ${rook} can take the ${status} ${file}-file`,
+    body: `it is ${counted(moves, 'move')} from ${to}`,
+  }),
+  'heavy-doubled': ({ side, file, heavy }) => ({
+    head: `${name(side)} has ${heavy.length > 2 ? `${inWords(heavy.length)} heavy men` : 'doubled'} on the ${file}-file`,
+    body: `${theMen(heavy)} stand behind one another`,
+  }),
+  'on-seventh': ({ side, heavy, pawns }) => ({
+    head: `${capital(theMen(heavy))} ${heavy.length === 1 ? 'stands' : 'stand'} on ${possessive(side)} seventh rank`,
+    body: pawns.length > 0 ? `${counted(pawns.length, 'enemy pawn')} ${pawns.length === 1 ? 'stands' : 'stand'} there too, on ${listed(pawns)}` : undefined,
+  }),
+  'to-seventh': ({ side, man, to, moves }) => ({
+    head: `${capital(theMan(man))} can come to ${possessive(side)} seventh rank`,
+    body: `${to} is ${counted(moves, 'safe move')} away`,
+  }),
+  'long-diagonal-open': ({ man, last, seen }) => ({
+    head: `${capital(theMan(man))} has the long diagonal open`,
+    body: `it sees ${counted(seen, 'square')} of it, as far as ${last}`,
+  }),
+  'diagonal-shut': ({ side, man, stopper, stopperSide }) => ({
+    head: `${capital(theMan(man))} looks at a wall`,
+    body: `its way forward ends at the ${stopperSide === side ? 'own' : stopperSide} pawn on ${stopper}, which stands head to head with another`,
+  }),
+};

@@ -1,0 +1,49 @@
+/** Sentences about kings. */
+import type { KingFact } from '../facts/king';
+import type { Phrases } from '../phrase';
+import { capital, counted, enemyName, enemyOf, filesNamed, inWords, listed, possessive, theMen } from '../words';
+
+export const KING_PHRASES: Phrases<KingFact> = {
+  'in-check': ({ king, checkers, side }) => ({
+    head: `The ${side} king on ${king} is in check`,
+    body: `${theMen(checkers)} ${checkers.length === 1 ? 'attacks' : 'attack'} it`,
+  }),
+  'shelter-whole': ({ side, king, pawns }) => ({
+    head: `${possessive(side)} king on ${king} has its pawn cover whole`,
+    body: `the pawns on ${listed(pawns)} have not moved`,
+  }),
+  'shelter-broken': ({ side, king, bare, advanced }) => ({
+    head: `${possessive(side)} king on ${king} has gaps in its pawn cover`,
+    body: [
+      bare.length > 0 ? `no ${side} pawn stands before it on the ${filesNamed(bare)}` : null,
+      advanced.length > 0 ? `${listed(advanced)} ${advanced.length === 1 ? 'has' : 'have'} gone ahead` : null,
+    ]
+      .filter(Boolean)
+      .join(', and '),
+  }),
+  'no-luft': ({ king, noFlight, gives }) => {
+    const moves = listed(gives.map(({ from, to }) => `${from}-${to}`), 'or');
+    return noFlight
+      ? { head: `The king on ${king} has no flight square`, body: gives.length > 0 ? `${moves} gives it the first` : undefined }
+      : {
+          head: `The king on ${king} has no luft`,
+          body: gives.length > 0 ? `it cannot leave its back rank, and ${moves} gives it a square` : 'it cannot leave its back rank',
+        };
+  },
+  'no-flight': ({ king }) => ({
+    head: `The king on ${king} has no square to step to`,
+    body: 'every square around it is taken or attacked',
+  }),
+  'open-line-beside-king': ({ side, king, files, heavy }) => ({
+    head: `The ${filesNamed(files)} ${files.length === 1 ? 'is' : 'are'} open to ${enemyName(side)} beside the king on ${king}`,
+    body: heavy.length > 0 ? `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there already` : `no ${enemyOf(side)} pawn stands on ${files.length === 1 ? 'it' : 'them'}`,
+  }),
+  'king-zone': ({ side, king, attackers, guards }) => ({
+    head: `${capital(inWords(attackers.length))} ${enemyOf(side)} men bear on the squares round the king on ${king}`,
+    body: `${theMen(attackers)}, against ${guards === 0 ? 'no guard' : counted(guards, 'guard')} besides the king`,
+  }),
+  'weak-back-rank': ({ side, king }) => ({
+    head: `${possessive(side)} back rank is weak`,
+    body: `the king on ${king} cannot leave it, and no ${side} rook or queen stands on it`,
+  }),
+};
