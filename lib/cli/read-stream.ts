@@ -1,8 +1,9 @@
 /** `read -`: FENs from standard input, one a line, to one JSON object a line, in the same order. */
 import type { Readable } from 'node:stream';
-import type { Fault, Reading } from '@/engine/reading/schema';
 import { computeReading } from '@/lib/services/readings/engine';
 import { FEN_LENGTH_MAX, type Mode } from '@/openapi/schemas/ids';
+import type { BatchLine } from '@/openapi/schemas/readings';
+import { jsonLine } from './json';
 import { EXIT, type ExitCode, type Terminal, written } from './terminal';
 
 /** Answers every line, waiting for whoever reads. The exit code tells whether a line was refused. */
@@ -13,18 +14,14 @@ export async function readStream({ input, output, errors }: Terminal, mode: Mode
     line += 1;
     const answer = lineAnswer(text, mode, line);
     if ('error' in answer) refused += 1;
-    if (!(await written(output, `${JSON.stringify(answer)}\n`))) return EXIT.good;
+    if (!(await written(output, jsonLine(answer)))) return EXIT.good;
   }
   if (refused === 0) return EXIT.good;
   errors.write(`${refused} of ${line} lines could not be read; each is answered in its place.\n`);
   return EXIT.fault;
 }
 
-function lineAnswer(
-  text: string,
-  mode: Mode,
-  line: number,
-): Reading | { readonly error: Fault; readonly line: number } {
+function lineAnswer(text: string, mode: Mode, line: number): BatchLine {
   if (text.length > FEN_LENGTH_MAX) {
     return {
       error: { code: 'too-long', field: 'text', message: `A line has at most ${FEN_LENGTH_MAX} characters.` },

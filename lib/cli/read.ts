@@ -4,6 +4,7 @@ import type { Fault } from '@/engine/reading/schema';
 import { computeReading } from '@/lib/services/readings/engine';
 import { MODES, type Mode } from '@/openapi/schemas/ids';
 import { inkFor } from './ink';
+import { jsonLine } from './json';
 import { readStream } from './read-stream';
 import { readingText } from './read-text';
 import { EXIT, type ExitCode, type Terminal, written } from './terminal';
@@ -45,7 +46,7 @@ export async function runRead(args: readonly string[], terminal: Terminal): Prom
     await written(terminal.errors, refusalText(result.fault, mode === 'strict' && computeReading(fen, 'diagram').ok));
     return EXIT.fault;
   }
-  const text = values.json ? `${JSON.stringify(result.value)}\n` : readingText(result.value, inkFor(terminal.colour));
+  const text = values.json ? jsonLine(result.value) : readingText(result.value, inkFor(terminal.colour));
   await written(terminal.output, text);
   return EXIT.good;
 }

@@ -28,6 +28,9 @@ export function ownTerminal(noColor: string | undefined): Terminal {
 export async function written(output: Writable, text: string): Promise<boolean> {
   if (output.destroyed || output.writableEnded) return false;
   if (output.write(text)) return true;
-  await Promise.race([once(output, 'drain'), once(output, 'close')]);
+  const waiting = new AbortController();
+  const { signal } = waiting;
+  await Promise.race([once(output, 'drain', { signal }), once(output, 'close', { signal })]);
+  waiting.abort();
   return !output.destroyed;
 }
