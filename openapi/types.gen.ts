@@ -954,7 +954,7 @@ export interface operations {
                  * @description What is drawn over the board.
                  * @example command
                  */
-                readonly layer?: "none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility";
+                readonly layer?: "position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility";
                 /** @description Width of the whole figure in pixels. */
                 readonly width?: number;
                 readonly theme?: "light" | "dark";
@@ -964,8 +964,8 @@ export interface operations {
                 readonly man?: components["schemas"]["Square"];
                 /** @description A line of text under the board, instead of the one from the reading. */
                 readonly caption?: string;
-                /** @description Whether the leading statements stand beside the board. */
-                readonly notes?: "yes" | "no";
+                /** @description The leading statements: in the margin where there is room, as numbers with a list below, or not at all. */
+                readonly notes?: "margin" | "numbers" | "none";
             };
             readonly header?: never;
             readonly path?: never;
@@ -1034,7 +1034,7 @@ export interface operations {
                  * @description What is drawn over the board.
                  * @example command
                  */
-                readonly layer?: "none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility";
+                readonly layer?: "position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility";
                 /**
                  * @description Width of the whole figure in pixels.
                  * @example 480
@@ -1047,8 +1047,8 @@ export interface operations {
                 readonly man?: components["schemas"]["Square"];
                 /** @description A line of text under the board, instead of the one from the reading. */
                 readonly caption?: string;
-                /** @description Whether the leading statements stand beside the board. */
-                readonly notes?: "yes" | "no";
+                /** @description The leading statements: in the margin where there is room, as numbers with a list below, or not at all. */
+                readonly notes?: "margin" | "numbers" | "none";
             };
             readonly header?: never;
             readonly path?: never;

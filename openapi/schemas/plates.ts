@@ -3,7 +3,8 @@ import { z } from 'zod';
 import { sideSchema, squareSchema } from '../../engine/reading/schema';
 import { fenSchema, modeSchema } from './ids';
 
-export const plateLayers = ['none', 'control', 'command', 'weak', 'outposts', 'files', 'mobility'] as const;
+export const plateLayers = ['position', 'control', 'command', 'weak', 'outposts', 'files', 'mobility'] as const;
+export const plateNotes = ['margin', 'numbers', 'none'] as const;
 export const plateThemes = ['light', 'dark'] as const;
 
 /** Bounds of a plate's width, in pixels. */
@@ -12,8 +13,6 @@ export const plateWidthMax = 2400;
 
 /** The longest caption, in characters: three lines under a plate of common width. */
 export const plateCaptionMax = 240;
-
-const yesNoSchema = z.enum(['yes', 'no']);
 
 /** The query of both plate calls. */
 const plateQueryShape = {
@@ -35,7 +34,12 @@ const plateQueryShape = {
     .max(plateCaptionMax)
     .optional()
     .describe('A line of text under the board, instead of the one from the reading.'),
-  notes: yesNoSchema.default('no').describe('Whether the leading statements stand beside the board.'),
+  notes: z
+    .enum(plateNotes)
+    .default('none')
+    .describe(
+      'The leading statements: in the margin where there is room, as numbers with a list below, or not at all.',
+    ),
 };
 
 export const plateQuerySchema = z.strictObject(plateQueryShape);

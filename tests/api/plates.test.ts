@@ -1,5 +1,6 @@
 /** GET /plates.svg and /plates.png: figures that can be shown anywhere and do nothing. */
 import { describe, expect, it } from 'vitest';
+import { LAYERS } from '@/components/plate/types';
 import { contracts } from '@/openapi/contracts';
 import { EXAMPLE_FEN } from '@/openapi/schemas/examples';
 import { plateLayers, plateThemes, plateWidthMax, plateWidthMin } from '@/openapi/schemas/plates';
@@ -28,6 +29,10 @@ function isNoXml(code: number): boolean {
 }
 
 describe('plates', () => {
+  it('are offered with every layer that can be drawn', () => {
+    expect(plateLayers).toEqual(LAYERS);
+  });
+
   it.each(plateLayers)('draw the layer %s', async (layer) => {
     const svg = await svgOf({ layer, ...(layer === 'mobility' && { man: 'd3' }) });
     expect(svg).toMatch(/^<svg [^>]*xmlns="http:\/\/www\.w3\.org\/2000\/svg"/);
@@ -42,7 +47,8 @@ describe('plates', () => {
       { theme: 'dark' },
       { side: 'black' },
       { caption: 'Own words' },
-      { notes: 'yes' },
+      { notes: 'margin' },
+      { notes: 'numbers' },
     ];
     const drawn = await Promise.all(choices.map((query) => svgOf(query as Record<string, string>)));
     expect(new Set(drawn).size).toBe(choices.length);
@@ -112,7 +118,7 @@ describe('plates', () => {
     ['a width in pieces', { width: '500.5' }, '/width', 'wrong-type'],
     ['a width without end', { width: 'Infinity' }, '/width', 'wrong-type'],
     ['a caption too long', { caption: 'x'.repeat(241) }, '/caption', 'too-large'],
-    ['notes neither yes nor no', { notes: '1' }, '/notes', 'not-a-choice'],
+    ['notes in no known way', { notes: '1' }, '/notes', 'not-a-choice'],
     ['an unknown parameter', { onload: 'alert(1)' }, '/onload', 'unknown-field'],
   ] as const)('refuse %s with the place at fault', async (_, query, path, code) => {
     for (const contract of [getPlateSvg, getPlatePng]) {

@@ -24,7 +24,15 @@ function optionsOf(reading: Reading, query: PlateQuery) {
     throw manRefused('required', 'The layer "mobility" needs the square of a man.');
   if (man !== undefined && !reading.men.some(({ square }) => square === man))
     throw manRefused('no-man', `There is no man on ${man}.`);
-  return { layer, width, theme, side, man, caption, notes: notes === 'yes' };
+  return {
+    layer,
+    width,
+    theme,
+    notes,
+    flipped: side === 'black',
+    man: man ?? null,
+    caption: caption === undefined ? null : { title: caption },
+  };
 }
 
 function manRefused(code: string, message: string): AppError {
