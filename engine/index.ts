@@ -15,6 +15,8 @@ export { type HeatCell, heatMap } from './men';
 export {
   type Desk,
   ENGINE_VERSION,
+  heatMapIn,
+  heatMapOf,
   newDesk,
   readFen,
   readPosition,

@@ -1,3 +1,4 @@
+export * from './heat';
 export * from './read';
 export * from './read-values';
 export * from './version';

@@ -5,7 +5,7 @@ import { fenSchema, modeSchema } from './ids';
 
 export const plateLayers = ['position', 'control', 'command', 'weak', 'outposts', 'files', 'mobility'] as const;
 export const plateNotes = ['margin', 'numbers', 'none'] as const;
-export const plateThemes = ['light', 'dark'] as const;
+export const plateThemes = ['light', 'dark', 'print'] as const;
 
 /** Bounds of a plate's width, in pixels. */
 export const plateWidthMin = 120;

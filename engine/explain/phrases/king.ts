@@ -35,8 +35,8 @@ export const KING_PHRASES: Phrases<KingFact> = {
     body: 'every square around it is taken or attacked',
   }),
   'open-line-beside-king': ({ side, king, files, heavy }) => ({
-    head: `The ${filesNamed(files)} ${files.length === 1 ? 'is' : 'are'} open to ${enemyName(side)} beside the king on ${king}`,
-    body: heavy.length > 0 ? `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there already` : `no ${enemyOf(side)} pawn stands on ${files.length === 1 ? 'it' : 'them'}`,
+head: `No ${enemyOf(side)} pawn closes the ${filesNamed(files)} beside the king on ${king}`,
+    body: heavy.length > 0 ? `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there already` : `${enemyName(side)} has a rook or queen left to use ${files.length === 1 ? 'it' : 'them'}`,
   }),
   'king-zone': ({ side, king, attackers, guards }) => ({
     head: `${capital(inWords(attackers.length))} ${enemyOf(side)} men bear on the squares round the king on ${king}`,
