@@ -957,7 +957,7 @@ export interface operations {
                 readonly layer?: "position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility";
                 /** @description Width of the whole figure in pixels. */
                 readonly width?: number;
-                readonly theme?: "light" | "dark";
+                readonly theme?: "light" | "dark" | "print";
                 /** @description The side at the foot of the board. */
                 readonly side?: components["schemas"]["Side"];
                 /** @description For the layer "mobility": the square of the man. */
@@ -1040,7 +1040,7 @@ export interface operations {
                  * @example 480
                  */
                 readonly width?: number;
-                readonly theme?: "light" | "dark";
+                readonly theme?: "light" | "dark" | "print";
                 /** @description The side at the foot of the board. */
                 readonly side?: components["schemas"]["Side"];
                 /** @description For the layer "mobility": the square of the man. */

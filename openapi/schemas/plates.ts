@@ -8,7 +8,7 @@ export const plateNotes = ['margin', 'numbers', 'none'] as const;
 export const plateThemes = ['light', 'dark', 'print'] as const;
 
 /** Bounds of a plate's width, in pixels. */
-export const plateWidthMin = 120;
+export const plateWidthMin = 240;
 export const plateWidthMax = 2400;
 
 /** The longest caption, in characters: three lines under a plate of common width. */

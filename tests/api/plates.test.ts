@@ -1,6 +1,7 @@
 /** GET /plates.svg and /plates.png: figures that can be shown anywhere and do nothing. */
 import { describe, expect, it } from 'vitest';
 import { LAYERS } from '@/components/plate/types';
+import { THEMES } from '@/components/plate/tokens';
 import { contracts } from '@/openapi/contracts';
 import { EXAMPLE_FEN } from '@/openapi/schemas/examples';
 import { plateLayers, plateThemes, plateWidthMax, plateWidthMin } from '@/openapi/schemas/plates';
@@ -29,8 +30,9 @@ function isNoXml(code: number): boolean {
 }
 
 describe('plates', () => {
-  it('are offered with every layer that can be drawn', () => {
+  it('are offered with every layer and theme that can be drawn', () => {
     expect(plateLayers).toEqual(LAYERS);
+    expect(plateThemes).toEqual(THEMES);
   });
 
   it.each(plateLayers)('draw the layer %s', async (layer) => {
@@ -47,8 +49,8 @@ describe('plates', () => {
       { theme: 'dark' },
       { side: 'black' },
       { caption: 'Own words' },
-      { notes: 'margin' },
-      { notes: 'numbers' },
+      { width: '1200', notes: 'margin' },
+      { width: '1200', notes: 'numbers' },
     ];
     const drawn = await Promise.all(choices.map((query) => svgOf(query as Record<string, string>)));
     expect(new Set(drawn).size).toBe(choices.length);

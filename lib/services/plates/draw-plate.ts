@@ -2,7 +2,8 @@
 import type { Reading } from '@/engine/reading/schema';
 import type { Context } from '@/lib/context';
 import { AppError } from '@/lib/errors';
-import { platePng, plateSvg } from '@/lib/figures/plate';
+import { type PlateOptions, plateSvg } from '@/lib/figures/plate';
+import { pngOf } from '@/lib/figures/png';
 import type { PlateQuery } from '@/openapi/schemas/plates';
 import { fullReading } from '../readings/full-reading';
 
@@ -12,13 +13,12 @@ export async function drawPlateSvg(_ctx: Context, query: PlateQuery): Promise<st
   return plateSvg(reading, optionsOf(reading, query));
 }
 
-/** The figure as the bytes of a PNG, exactly `width` pixels wide. Throws like `drawPlateSvg`. */
-export async function drawPlatePng(_ctx: Context, query: PlateQuery): Promise<Uint8Array> {
-  const reading = fullReading(query);
-  return platePng(reading, optionsOf(reading, query));
+/** The same figure as the bytes of a PNG, exactly `width` pixels wide. */
+export function plateAsPng(svg: string, { width }: PlateQuery): Uint8Array {
+  return pngOf(svg, width);
 }
 
-function optionsOf(reading: Reading, query: PlateQuery) {
+function optionsOf(reading: Reading, query: PlateQuery): PlateOptions {
   const { layer, width, theme, side, man, caption, notes } = query;
   if (layer === 'mobility' && man === undefined)
     throw manRefused('required', 'The layer "mobility" needs the square of a man.');
