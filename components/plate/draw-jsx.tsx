@@ -11,7 +11,9 @@ export const PAGE_PALETTE: Palette = {
 };
 
 const camel = (name: string): string =>
-  name.startsWith('data-') || name.startsWith('aria-') ? name : name.replace(/-(\w)/g, (_, letter: string) => letter.toUpperCase());
+  name.startsWith('data-') || name.startsWith('aria-')
+    ? name
+    : name.replace(/-(\w)/g, (_, letter: string) => letter.toUpperCase());
 
 /** An element tree as JSX. Styles that hold variables are written as style, since attributes cannot hold them everywhere. */
 export function jsxOf({ tag, attributes, children, text }: Element, key?: string | number): ReactElement {

@@ -24,7 +24,13 @@ export function svgElement(plate: Plate, palette: Palette): Element {
   return {
     tag: 'svg',
     attributes: {
-      xmlns: 'http://www.w3.org/2000/svg', width, height, viewBox: `0 0 ${width} ${height}`, role: 'img', 'font-family': FONT, 'aria-label': plate.alt,
+      xmlns: 'http://www.w3.org/2000/svg',
+      width,
+      height,
+      viewBox: `0 0 ${width} ${height}`,
+      role: 'img',
+      'font-family': FONT,
+      'aria-label': plate.alt,
     },
     children: [
       { tag: 'title', attributes: {}, text: plate.title },
@@ -35,11 +41,26 @@ export function svgElement(plate: Plate, palette: Palette): Element {
   };
 }
 
-const ESCAPES: Readonly<Record<string, string>> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;', "'": '&#39;' };
+const ESCAPES: Readonly<Record<string, string>> = {
+  '&': '&amp;',
+  '<': '&lt;',
+  '>': '&gt;',
+  '"': '&quot;',
+  "'": '&#39;',
+};
 
 /** Text that is safe in XML: markup escaped, characters that XML forbids left out. */
 export function escaped(text: string): string {
-  const allowed = [...text].filter((c) => { const code = c.codePointAt(0) ?? 0; return code === 9 || code === 10 || code === 13 || (code >= 32 && code < 0xd800) || (code > 0xdfff && code !== 0xfffe && code !== 0xffff); });
+  const allowed = [...text].filter((c) => {
+    const code = c.codePointAt(0) ?? 0;
+    return (
+      code === 9 ||
+      code === 10 ||
+      code === 13 ||
+      (code >= 32 && code < 0xd800) ||
+      (code > 0xdfff && code !== 0xfffe && code !== 0xffff)
+    );
+  });
   return allowed.join('').replace(/[&<>"']/g, (character) => ESCAPES[character] ?? character);
 }
 

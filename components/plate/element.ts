@@ -21,7 +21,9 @@ export const FONT = "'Roboto Slab', Rockwell, serif";
 function lookOf(look: Look, palette: Palette): Record<string, string | number> {
   const { fill, stroke, width, dash, cap, join, miter, strength } = look;
   const attributes: Record<string, string | number> = {};
-  if (fill !== undefined) attributes.fill = fill === 'none' ? 'none' : typeof fill === 'string' ? palette.paint(fill) : `url(#${fill.pattern})`;
+  if (fill !== undefined)
+    attributes.fill =
+      fill === 'none' ? 'none' : typeof fill === 'string' ? palette.paint(fill) : `url(#${fill.pattern})`;
   if (stroke !== undefined && stroke !== 'none') attributes.stroke = palette.paint(stroke);
   if (width !== undefined) attributes['stroke-width'] = width;
   if (dash !== undefined) attributes['stroke-dasharray'] = dash;
@@ -29,7 +31,12 @@ function lookOf(look: Look, palette: Palette): Record<string, string | number> {
   if (join !== undefined) attributes['stroke-linejoin'] = join;
   if (miter !== undefined) attributes['stroke-miterlimit'] = miter;
   if (strength !== undefined) {
-    const value = typeof strength === 'number' ? strength : typeof strength === 'string' ? palette.strength(strength) : palette.heat(strength.heat);
+    const value =
+      typeof strength === 'number'
+        ? strength
+        : typeof strength === 'string'
+          ? palette.strength(strength)
+          : palette.heat(strength.heat);
     attributes[stroke !== undefined && fill === undefined ? 'stroke-opacity' : 'fill-opacity'] = value;
   }
   return attributes;
@@ -42,17 +49,31 @@ export function elementOf(mark: Mark, palette: Palette): Element {
   switch (mark.type) {
     case 'path': {
       const attributes: Record<string, string | number> = { d: mark.d, ...lookOf(mark, palette) };
-      if (mark.move) attributes.transform = `translate(${round(mark.move.x)} ${round(mark.move.y)}) scale(${Math.round(mark.move.scale * 10000) / 10000})`;
+      if (mark.move)
+        attributes.transform = `translate(${round(mark.move.x)} ${round(mark.move.y)}) scale(${Math.round(mark.move.scale * 10000) / 10000})`;
       return { tag: 'path', attributes };
     }
     case 'circle':
-      return { tag: 'circle', attributes: { cx: round(mark.x), cy: round(mark.y), r: round(mark.r), ...lookOf(mark, palette) } };
+      return {
+        tag: 'circle',
+        attributes: { cx: round(mark.x), cy: round(mark.y), r: round(mark.r), ...lookOf(mark, palette) },
+      };
     case 'text': {
       const attributes: Record<string, string | number> = {
-        x: round(mark.x), y: round(mark.y), 'font-size': round(mark.size), 'font-weight': mark.weight, fill: palette.paint(mark.fill === 'none' ? 'ink' : mark.fill),
+        x: round(mark.x),
+        y: round(mark.y),
+        'font-size': round(mark.size),
+        'font-weight': mark.weight,
+        fill: palette.paint(mark.fill === 'none' ? 'ink' : mark.fill),
       };
       if (mark.anchor && mark.anchor !== 'start') attributes['text-anchor'] = mark.anchor;
-      if (mark.halo) Object.assign(attributes, { stroke: palette.paint('paper'), 'stroke-width': mark.halo, 'stroke-linejoin': 'round', 'paint-order': 'stroke' });
+      if (mark.halo)
+        Object.assign(attributes, {
+          stroke: palette.paint('paper'),
+          'stroke-width': mark.halo,
+          'stroke-linejoin': 'round',
+          'paint-order': 'stroke',
+        });
       return { tag: 'text', attributes, text: mark.text };
     }
     case 'group':
@@ -70,7 +91,11 @@ export function patternElement({ id, size, turned, x, y, marks }: Pattern, palet
   return {
     tag: 'pattern',
     attributes: {
-      id, width: round(size), height: round(size), patternUnits: 'userSpaceOnUse', patternTransform: turned ? `${shift} rotate(45)` : shift,
+      id,
+      width: round(size),
+      height: round(size),
+      patternUnits: 'userSpaceOnUse',
+      patternTransform: turned ? `${shift} rotate(45)` : shift,
     },
     children: marks.map((mark) => elementOf(mark, palette)),
   };

@@ -18,22 +18,34 @@ export function patterns(board: BoardPlace, id: string, print: boolean): Pattern
   const level = print ? 4 : 3;
   return [
     {
-      ...at, id: `${id}hatch`, size: pitch, turned: true,
+      ...at,
+      id: `${id}hatch`,
+      size: pitch,
+      turned: true,
       marks: [{ type: 'path', d: `M0 0V${n(pitch)}`, stroke: 'hatch', width: print ? 1.4 : 1.5 }],
     },
     {
-      ...at, id: `${id}cross`, size: cross, turned: true,
+      ...at,
+      id: `${id}cross`,
+      size: cross,
+      turned: true,
       marks: [{ type: 'path', d: `M0 0V${n(cross)}M0 0H${n(cross)}`, stroke: 'cross', width: print ? 2 : 1.5 }],
     },
     {
-      ...at, id: `${id}dots`, size: 5, turned: false,
+      ...at,
+      id: `${id}dots`,
+      size: 5,
+      turned: false,
       marks: [
         { type: 'circle', x: 1.25, y: 1.25, r: 0.8, fill: 'ochre', strength: print ? 1 : 0.6 },
         { type: 'circle', x: 3.75, y: 3.75, r: 0.8, fill: 'ochre', strength: print ? 1 : 0.6 },
       ],
     },
     {
-      ...at, id: `${id}lines`, size: level, turned: false,
+      ...at,
+      id: `${id}lines`,
+      size: level,
+      turned: false,
       marks: [{ type: 'path', d: `M0 ${level / 2}H${level}`, stroke: 'indigo', width: 0.7, strength: print ? 1 : 0.6 }],
     },
   ];
@@ -71,12 +83,25 @@ export function frame(board: BoardPlace): Mark[] {
   return [
     { type: 'path', d: box(x, y, side, side), stroke: 'ink', width: 1, fill: 'none' },
     { type: 'path', d: ticks.join(''), stroke: 'ink', width: 0.75, fill: 'none' },
-    { type: 'path', d: box(x - gap, y - gap, side + 2 * gap, side + 2 * gap), stroke: 'ink', width: 0.75, fill: 'none' },
     {
-      type: 'path', d: box(x - gap - 4, y - gap - 4, side + 2 * gap + 8, side + 2 * gap + 8),
-      stroke: 'ink', width: 1.75, fill: 'none',
+      type: 'path',
+      d: box(x - gap, y - gap, side + 2 * gap, side + 2 * gap),
+      stroke: 'ink',
+      width: 0.75,
+      fill: 'none',
     },
-    ...files.map((file, i): Mark => ({ ...coordinate, x: x + (i + 0.5) * size, y: y + side + gap / 2 + text * 0.42, text: file })),
-    ...ranks.map((rank, i): Mark => ({ ...coordinate, x: x - gap / 2 - 1, y: y + (i + 0.5) * size + text * 0.36, text: rank })),
+    {
+      type: 'path',
+      d: box(x - gap - 4, y - gap - 4, side + 2 * gap + 8, side + 2 * gap + 8),
+      stroke: 'ink',
+      width: 1.75,
+      fill: 'none',
+    },
+    ...files.map(
+      (file, i): Mark => ({ ...coordinate, x: x + (i + 0.5) * size, y: y + side + gap / 2 + text * 0.42, text: file }),
+    ),
+    ...ranks.map(
+      (rank, i): Mark => ({ ...coordinate, x: x - gap / 2 - 1, y: y + (i + 0.5) * size + text * 0.36, text: rank }),
+    ),
   ];
 }

@@ -165,7 +165,12 @@ export function InteractiveBoard(props: BoardProps) {
           })}
         </div>
       ))}
-      <div ref={ghost} aria-hidden="true" className="pointer-events-none absolute top-0 left-0" style={{ width: '12.5%', height: '12.5%', opacity: held ? 1 : 0 }}>
+      <div
+        ref={ghost}
+        aria-hidden="true"
+        className="pointer-events-none absolute top-0 left-0"
+        style={{ width: '12.5%', height: '12.5%', opacity: held ? 1 : 0 }}
+      >
         {held ? (
           <svg viewBox="0 0 64 64" width="100%" height="100%">
             {manMarks(held.side, held.kind, 0, 0, 64).map((mark, index) => jsxOf(elementOf(mark, PAGE_PALETTE), index))}

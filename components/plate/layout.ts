@@ -29,13 +29,22 @@ export function plateOf(request: PlateRequest): Plate {
   const id = request.id ?? 'p';
   const wanted = request.notes ?? (width >= MARGIN_FROM ? 'margin' : 'numbers');
   const inMargin = wanted === 'margin' && width >= MARGIN_FROM;
-  const size = Math.min(SIZE_MAX, sizeFor(inMargin ? width - 2 * NOTE_ROOM : width - 2), width >= MARGIN_FROM ? SIZE_MAX : 80);
+  const size = Math.min(
+    SIZE_MAX,
+    sizeFor(inMargin ? width - 2 * NOTE_ROOM : width - 2),
+    width >= MARGIN_FROM ? SIZE_MAX : 80,
+  );
   const side = framedSide(size);
   const inset = frameInset(size);
   const board: BoardPlace = { x: (width - side) / 2 + inset, y: 1 + inset, size, flipped };
   const noted = wanted === 'none' ? [] : notesOf(reading, request.noted ?? reading.lead);
 
-  const marks: Mark[] = [...ground(board, id), ...under(request, board, id), ...men(reading, board, layer === 'mobility' ? man : null), ...over(request, board, heat)];
+  const marks: Mark[] = [
+    ...ground(board, id),
+    ...under(request, board, id),
+    ...men(reading, board, layer === 'mobility' ? man : null),
+    ...over(request, board, heat),
+  ];
   marks.push(...frame(board));
   if (layer === 'command' || layer === 'files') marks.push(...fileMarks(reading, board));
   const bottom = 1 + side;
@@ -62,14 +71,32 @@ export function plateOf(request: PlateRequest): Plate {
     marks.push(...caption.marks, ...key.marks, ...list.marks);
     height = list.end + 8;
   }
-  return { width, height: Math.ceil(height), board, patterns: patterns(board, id, print), marks, title, text, alt: altText(reading, layer, man), notes, legend };
+  return {
+    width,
+    height: Math.ceil(height),
+    board,
+    patterns: patterns(board, id, print),
+    marks,
+    title,
+    text,
+    alt: altText(reading, layer, man),
+    notes,
+    legend,
+  };
 }
 
 /** What lies under the men. */
-function under({ reading, layer, print = false, man = null, heat }: PlateRequest, board: BoardPlace, id: string): Mark[] {
+function under(
+  { reading, layer, print = false, man = null, heat }: PlateRequest,
+  board: BoardPlace,
+  id: string,
+): Mark[] {
   switch (layer) {
     case 'command':
-      return [...commandMarks(reading, board, id, print), ...weakMarks(reading.weakSquares, board, { all: false, print })];
+      return [
+        ...commandMarks(reading, board, id, print),
+        ...weakMarks(reading.weakSquares, board, { all: false, print }),
+      ];
     case 'weak':
       return weakMarks(reading.weakSquares, board, { all: true, print });
     case 'files':
@@ -84,7 +111,11 @@ function under({ reading, layer, print = false, man = null, heat }: PlateRequest
 }
 
 /** What lies over the men. */
-function over({ reading, layer, print = false, man = null }: PlateRequest, board: BoardPlace, heat: PlateRequest['heat']): Mark[] {
+function over(
+  { reading, layer, print = false, man = null }: PlateRequest,
+  board: BoardPlace,
+  heat: PlateRequest['heat'],
+): Mark[] {
   switch (layer) {
     case 'command':
       return [...pipMarks(reading.squares.filter(isMiddle), board), ...outpostMarks(reading.outposts, board, print)];
@@ -108,13 +139,22 @@ function men(reading: Reading, board: BoardPlace, asked: SquareName | null): Mar
   });
   if (asked === null) return marks;
   const { x, y } = cornerOf(board, asked);
-  return [...marks, { type: 'path', d: box(x + 2, y + 2, board.size - 4, board.size - 4), stroke: 'pick', width: 2, fill: 'none' }];
+  return [
+    ...marks,
+    { type: 'path', d: box(x + 2, y + 2, board.size - 4, board.size - 4), stroke: 'pick', width: 2, fill: 'none' },
+  ];
 }
 
 function litMarks(lit: readonly SquareName[], board: BoardPlace): Mark[] {
   return lit.map((square): Mark => {
     const { x, y } = cornerOf(board, square);
-    return { type: 'path', d: box(x + 1.5, y + 1.5, board.size - 3, board.size - 3), stroke: 'pick', width: 2.6, fill: 'none' };
+    return {
+      type: 'path',
+      d: box(x + 1.5, y + 1.5, board.size - 3, board.size - 3),
+      stroke: 'pick',
+      width: 2.6,
+      fill: 'none',
+    };
   });
 }
 

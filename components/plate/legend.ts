@@ -17,7 +17,11 @@ export function legendOf(reading: Reading, layer: Layer, board: BoardPlace, id: 
     if (states.has('white')) items.push({ label: 'White commands', marks: swatch('white', id, print) });
     if (states.has('black')) items.push({ label: 'Black commands', marks: swatch('black', id, print) });
     if (states.has('disputed')) items.push({ label: 'disputed', marks: hatched(id) });
-    if (states.has('open')) items.push({ label: 'open', marks: [{ type: 'path', d: box(0.5, 0.5, 23, 15), stroke: 'hair', width: 1, fill: 'paper' }] });
+    if (states.has('open'))
+      items.push({
+        label: 'open',
+        marks: [{ type: 'path', d: box(0.5, 0.5, 23, 15), stroke: 'hair', width: 1, fill: 'paper' }],
+      });
   }
   if (layer === 'command' || layer === 'control') items.push({ label: 'attackers, one behind', marks: pips() });
   if (layer === 'command' || layer === 'weak') items.push(...ringItems(reading, layer, print));
@@ -28,9 +32,10 @@ export function legendOf(reading: Reading, layer: Layer, board: BoardPlace, id: 
 }
 
 function swatch(side: 'white' | 'black', id: string, print: boolean): Mark[] {
-  const [wash, weak, strong, pattern] = side === 'white'
-    ? (['ochre-wash', 'wash-a', 'band-a', `${id}dots`] as const)
-    : (['indigo-wash', 'iwash-a', 'iband-a', `${id}lines`] as const);
+  const [wash, weak, strong, pattern] =
+    side === 'white'
+      ? (['ochre-wash', 'wash-a', 'band-a', `${id}dots`] as const)
+      : (['indigo-wash', 'iwash-a', 'iband-a', `${id}lines`] as const);
   const band = 'M0 0h24v16h-24zM5 5v6h14v-6z';
   return [
     { type: 'path', d: box(0, 0, 24, 16), fill: wash, strength: weak },
@@ -87,14 +92,32 @@ function fileItems(reading: Reading, board: BoardPlace, layer: Layer): LegendIte
     items.push({ label: 'half-open file', marks: [{ type: 'path', d: 'M0 8h24', stroke, width: 2.6, fill: 'none' }] });
   }
   if (reading.files.some(({ status }) => status === 'open')) {
-    items.push({ label: 'open file', marks: [{ type: 'path', d: 'M0 6.5h24M0 9.5h24', stroke: 'ink', width: 1.2, fill: 'none' }] });
+    items.push({
+      label: 'open file',
+      marks: [{ type: 'path', d: 'M0 6.5h24M0 9.5h24', stroke: 'ink', width: 1.2, fill: 'none' }],
+    });
   }
   if (layer === 'files' && entryMarks(reading, board).length > 0) {
     const entries = reading.files.find(({ entries: squares }) => squares.white.length + squares.black.length > 0);
     const stroke = entries && entries.entries.white.length > 0 ? 'ochre' : 'indigo';
-    if (entries) items.push({ label: 'entry square', marks: [{ type: 'path', d: 'M7 15v-7M12 15v-11M17 15v-7', stroke, width: 1.6, fill: 'none' }] });
+    if (entries)
+      items.push({
+        label: 'entry square',
+        marks: [{ type: 'path', d: 'M7 15v-7M12 15v-11M17 15v-7', stroke, width: 1.6, fill: 'none' }],
+      });
     if (reading.files.some(({ targets }) => targets.length > 0)) {
-      items.push({ label: 'target', marks: [{ type: 'path', d: 'M5 5V1.5H9M15 1.5H19V5M19 11V14.5H15M9 14.5H5V11', stroke: 'ink', width: 1.4, fill: 'none' }] });
+      items.push({
+        label: 'target',
+        marks: [
+          {
+            type: 'path',
+            d: 'M5 5V1.5H9M15 1.5H19V5M19 11V14.5H15M9 14.5H5V11',
+            stroke: 'ink',
+            width: 1.4,
+            fill: 'none',
+          },
+        ],
+      });
     }
   }
   return items;

@@ -51,8 +51,26 @@ export function manMarks(side: Side, kind: Kind, x: number, y: number, size: num
   const tone = side === 'white' ? 'w' : 'b';
   const marks: Mark[] = [
     { type: 'path', d: body, move, stroke: 'paper', width: halo, join: 'round', fill: 'paper' },
-    { type: 'path', d: body, move, fill: `${tone}-fill`, stroke: `${tone}-line`, width: stroke, join: 'miter', miter: 3 },
+    {
+      type: 'path',
+      d: body,
+      move,
+      fill: `${tone}-fill`,
+      stroke: `${tone}-line`,
+      width: stroke,
+      join: 'miter',
+      miter: 3,
+    },
   ];
-  if (px >= 22) marks.push({ type: 'path', d: cut, move, fill: 'none', stroke: `${tone}-cut`, width: px >= 40 ? 1.7 : 2, cap: 'butt' });
+  if (px >= 22)
+    marks.push({
+      type: 'path',
+      d: cut,
+      move,
+      fill: 'none',
+      stroke: `${tone}-cut`,
+      width: px >= 40 ? 1.7 : 2,
+      cap: 'butt',
+    });
   return marks;
 }

@@ -49,8 +49,18 @@ export function marginNotes(
   const rightStart = board.x + 8 * board.size + inset + STRIP;
   const right: Column = { side: 'right', x: rightStart, width: Math.min(292, figureWidth - rightStart) };
   const placed = [...assign(board, notes, left, right)];
-  const onLeft = settle(board, bounds, placed.filter(({ column }) => column.side === 'left'), []);
-  const onRight = settle(board, bounds, placed.filter(({ column }) => column.side === 'right'), onLeft);
+  const onLeft = settle(
+    board,
+    bounds,
+    placed.filter(({ column }) => column.side === 'left'),
+    [],
+  );
+  const onRight = settle(
+    board,
+    bounds,
+    placed.filter(({ column }) => column.side === 'right'),
+    onLeft,
+  );
   const kept = [...onLeft, ...onRight];
   const numbered = kept.map((candidate, index) => ({ ...candidate, note: { ...candidate.note, number: index + 1 } }));
   return {
@@ -72,7 +82,15 @@ function* assign(board: BoardPlace, notes: readonly PlacedNote[], left: Column, 
     const headLines = brokenLines(note.statement.head, chosen.width - 22, HEAD.size, 700);
     const body = bodyOf(note.statement);
     const bodyLines = body ? brokenLines(body, chosen.width - 22, BODY.size, 400) : [];
-    yield { note, column: chosen, headLines, bodyLines, height: headLines.length * HEAD.line + bodyLines.length * BODY.line, line: 0, top: 0 };
+    yield {
+      note,
+      column: chosen,
+      headLines,
+      bodyLines,
+      height: headLines.length * HEAD.line + bodyLines.length * BODY.line,
+      line: 0,
+      top: 0,
+    };
   }
 }
 
@@ -88,7 +106,8 @@ function settle(
   for (const candidate of candidates) {
     const { row, column } = cellOf(board, candidate.note.square);
     // Two runs from opposite sides may share a grid line only where they do not meet.
-    const meets = (line: number) => opposite.some((other) => other.line === line && cellOf(board, other.note.square).column + 1 > column);
+    const meets = (line: number) =>
+      opposite.some((other) => other.line === line && cellOf(board, other.note.square).column + 1 > column);
     const free = [row + 1, row].filter((each) => !used.has(each) && !meets(each));
     const line = free.find((each) => each > 0 && each < 8) ?? free[0];
     if (line === undefined) continue;
@@ -121,7 +140,10 @@ function settle(
   for (let index = fitting.length - 1; index >= 0; index--) {
     const candidate = fitting[index] as Candidate;
     const next = fitting[index + 1];
-    candidate.top = Math.min(candidate.top, next ? next.top - GAP - candidate.height : bounds.bottom - candidate.height);
+    candidate.top = Math.min(
+      candidate.top,
+      next ? next.top - GAP - candidate.height : bounds.bottom - candidate.height,
+    );
   }
   return fitting;
 }
@@ -135,15 +157,37 @@ export function headPaint({ statement }: PlacedNote): Paint {
   return statement.side === 'white' ? 'ochre' : statement.side === 'black' ? 'indigo' : 'ink';
 }
 
-function noteMarks(board: BoardPlace, { note, column, headLines, bodyLines, line, top }: Candidate, chosen: string | null): Mark {
+function noteMarks(
+  board: BoardPlace,
+  { note, column, headLines, bodyLines, line, top }: Candidate,
+  chosen: string | null,
+): Mark {
   const isChosen = note.statement.key === chosen;
   const x = column.x + 22;
   const marks: Mark[] = [
     { type: 'text', x: column.x + 4, y: top + 14, text: String(note.number), size: 13, weight: 500, fill: 'soft' },
-    ...headLines.map((text, i): Mark => ({ type: 'text', x, y: top + 14 + i * HEAD.line, text, size: HEAD.size, weight: 700, fill: headPaint(note) })),
-    ...bodyLines.map((text, i): Mark => ({
-      type: 'text', x, y: top + 13 + (headLines.length + i) * BODY.line, text, size: BODY.size, weight: 400, fill: 'ink',
-    })),
+    ...headLines.map(
+      (text, i): Mark => ({
+        type: 'text',
+        x,
+        y: top + 14 + i * HEAD.line,
+        text,
+        size: HEAD.size,
+        weight: 700,
+        fill: headPaint(note),
+      }),
+    ),
+    ...bodyLines.map(
+      (text, i): Mark => ({
+        type: 'text',
+        x,
+        y: top + 13 + (headLines.length + i) * BODY.line,
+        text,
+        size: BODY.size,
+        weight: 400,
+        fill: 'ink',
+      }),
+    ),
   ];
   const inset = frameInset(board.size);
   const edge = nearEdge(board, note.square, column.side);
@@ -155,7 +199,10 @@ function noteMarks(board: BoardPlace, { note, column, headLines, bodyLines, line
     column.side === 'left'
       ? `M${n(Math.min(headEnd, column.x + column.width + 4))} ${n(level)}H${n(board.x - inset - STRIP + 8)}L${n(board.x - inset - 6)} ${n(gridY)}H${n(edge)}`
       : `M${n(column.x - 6)} ${n(level)}H${n(column.x - 16)}L${n(board.x + 8 * board.size + inset + 6)} ${n(gridY)}H${n(edge)}`;
-  marks.push({ type: 'path', d, stroke, width: isChosen ? 1.3 : 0.8, fill: 'none' }, bracket(board, note.square, line, isChosen));
+  marks.push(
+    { type: 'path', d, stroke, width: isChosen ? 1.3 : 0.8, fill: 'none' },
+    bracket(board, note.square, line, isChosen),
+  );
   return { type: 'group', statement: note.statement.key, marks };
 }
 
@@ -182,7 +229,12 @@ function bracket(board: BoardPlace, square: SquareName, line: number, chosen: bo
 }
 
 /** Numbers on the board, for narrow plates: lower right on an empty square, upper right outside a man. */
-export function numberMarks(board: BoardPlace, notes: readonly PlacedNote[], occupied: ReadonlySet<SquareName>, chosen: string | null): Mark[] {
+export function numberMarks(
+  board: BoardPlace,
+  notes: readonly PlacedNote[],
+  occupied: ReadonlySet<SquareName>,
+  chosen: string | null,
+): Mark[] {
   const onSquare = new Map<SquareName, number>();
   return notes.map((note): Mark => {
     const { column, row } = cellOf(board, note.square);
@@ -196,7 +248,16 @@ export function numberMarks(board: BoardPlace, notes: readonly PlacedNote[], occ
       statement: note.statement.key,
       marks: [
         { type: 'circle', x, y, r, fill: note.statement.key === chosen ? 'pick' : 'ink', stroke: 'paper', width: 1 },
-        { type: 'text', x, y: y + r * 0.42, text: String(note.number), size: r * 1.25, weight: 700, fill: 'paper', anchor: 'middle' },
+        {
+          type: 'text',
+          x,
+          y: y + r * 0.42,
+          text: String(note.number),
+          size: r * 1.25,
+          weight: 700,
+          fill: 'paper',
+          anchor: 'middle',
+        },
       ],
     };
   });

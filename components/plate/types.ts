@@ -8,9 +8,26 @@ export type Layer = (typeof LAYERS)[number];
 
 /** Paints by name; a theme gives each its colour, the page gives each its variable. */
 export const PAINTS = [
-  'paper', 'raise', 'ink', 'soft', 'hair', 'rule', 'hatch', 'cross', 'ochre', 'indigo', 'pick', 'heat',
-  'ochre-wash', 'indigo-wash',
-  'w-fill', 'w-line', 'w-cut', 'b-fill', 'b-line', 'b-cut',
+  'paper',
+  'raise',
+  'ink',
+  'soft',
+  'hair',
+  'rule',
+  'hatch',
+  'cross',
+  'ochre',
+  'indigo',
+  'pick',
+  'heat',
+  'ochre-wash',
+  'indigo-wash',
+  'w-fill',
+  'w-line',
+  'w-cut',
+  'b-fill',
+  'b-line',
+  'b-cut',
 ] as const;
 export type Paint = (typeof PAINTS)[number] | 'none';
 

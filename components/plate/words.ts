@@ -16,7 +16,8 @@ export const LAYER_NAMES: Readonly<Record<Layer, string>> = {
 const LAYER_TEXTS: Readonly<Record<Exclude<Layer, 'mobility'>, string>> = {
   position: 'The men as they stand.',
   control: 'Pips count attackers: White’s hollow, below; Black’s solid, above; half size behind another.',
-  command: 'Command of squares, tested by exchange. Pips on ranks 3 to 6 count attackers: White’s hollow, below; Black’s solid, above.',
+  command:
+    'Command of squares, tested by exchange. Pips on ranks 3 to 6 count attackers: White’s hollow, below; Black’s solid, above.',
   weak: 'Rings mark squares that no pawn can guard, in the colour of the side that suffers; faint where little hangs on them.',
   outposts: 'Pennants mark outposts and posts held or within reach, in the colour of the side that may use them.',
   files: 'Rules in the margin mark open and half-open files, ticks entry squares, corners targets.',
@@ -43,7 +44,10 @@ export function captionTitle(reading: Reading, layer: Layer, man: SquareName | n
 
 /** Second line of the caption: who is to move, and what the marks count. */
 export function captionText(reading: Reading, layer: Layer): string {
-  const what = layer === 'mobility' ? `Safe moves it would have from there; in brackets where it would itself be lost by exchange.` : LAYER_TEXTS[layer];
+  const what =
+    layer === 'mobility'
+      ? `Safe moves it would have from there; in brackets where it would itself be lost by exchange.`
+      : LAYER_TEXTS[layer];
   return `${moverText(reading)} ${what}`;
 }
 
@@ -56,8 +60,14 @@ export function altText(reading: Reading, layer: Layer, man: SquareName | null |
       .map(({ kind, square }) => `${kind} ${square}`)
       .join(', ');
   const leading = reading.lead.flatMap((key) => reading.statements.find((each) => each.key === key)?.text ?? []);
-  const layerWords = layer === 'mobility' ? `mobility of the ${manText(reading, man)}` : LAYER_NAMES[layer].toLowerCase();
-  return [`Chess plate, ${layerWords}. ${moverText(reading)}`, `White: ${list('white') || 'no men'}.`, `Black: ${list('black') || 'no men'}.`, ...leading].join(' ');
+  const layerWords =
+    layer === 'mobility' ? `mobility of the ${manText(reading, man)}` : LAYER_NAMES[layer].toLowerCase();
+  return [
+    `Chess plate, ${layerWords}. ${moverText(reading)}`,
+    `White: ${list('white') || 'no men'}.`,
+    `Black: ${list('black') || 'no men'}.`,
+    ...leading,
+  ].join(' ');
 }
 
 const KIND_ORDER = ['king', 'queen', 'rook', 'bishop', 'knight', 'pawn'];

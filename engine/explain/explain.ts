@@ -65,13 +65,21 @@ export function explain(values: ReadingValues): Explanation {
     for (const fact of GATHER[theme](values)) weighed.push({ theme, fact, weight: weightOf(fact), key: keyOf(fact) });
   }
   const mover = values.position.sideToMove;
-  weighed.sort((a, b) => b.weight - a.weight || sideOrder(a.fact, mover) - sideOrder(b.fact, mover) || viewOrder(a.fact) - viewOrder(b.fact));
+  weighed.sort(
+    (a, b) =>
+      b.weight - a.weight ||
+      sideOrder(a.fact, mover) - sideOrder(b.fact, mover) ||
+      viewOrder(a.fact) - viewOrder(b.fact),
+  );
   const statements = withoutRepeats(weighed).map(statement);
   return { statements, lead: leading(statements) };
 }
 
 function keyOf({ id, side, men, squares }: Fact): string {
-  return [id, side ?? 'both', ...men, '-', ...squares].join('.').replace(/\.-\.?$/, '').replace('.-.', '-');
+  return [id, side ?? 'both', ...men, '-', ...squares]
+    .join('.')
+    .replace(/\.-\.?$/, '')
+    .replace('.-.', '-');
 }
 
 function sideOrder({ side }: Fact, mover: Side): number {

@@ -98,7 +98,11 @@ function adjustment(fact: Fact): number {
       return -4 * ((fact.comers[0]?.moves ?? 3) - 1) + (fact.hold === 'permanent' ? 2 : 0) - edgeCost(fact.square);
     case 'weak-for-good':
     case 'weak-while-fixed':
-      return (fact.occupant ? 14 : 8 - 3 * ((fact.comers[0]?.moves ?? 4) - 1)) + (fact.commandedByEnemy ? 3 : 0) - edgeCost(fact.square);
+      return (
+        (fact.occupant ? 14 : 8 - 3 * ((fact.comers[0]?.moves ?? 4) - 1)) +
+        (fact.commandedByEnemy ? 3 : 0) -
+        edgeCost(fact.square)
+      );
     case 'backward-pawn':
       return (fact.halfOpen ? 6 : 0) + (fact.stopHeldBy ? 3 : 0);
     case 'isolated-pawn':

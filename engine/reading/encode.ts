@@ -3,13 +3,7 @@ import { type Fault, formatFen } from '../board';
 import type { StatementValue } from '../explain';
 import type { ReadingValues } from '../explain';
 import { encodeDiagonals, encodeFiles, encodeKing, encodeMen } from './encode-men';
-import {
-  encodeComplexes,
-  encodeOutposts,
-  encodePawns,
-  encodeSquares,
-  encodeWeakSquares,
-} from './encode-squares';
+import { encodeComplexes, encodeOutposts, encodePawns, encodeSquares, encodeWeakSquares } from './encode-squares';
 import type { Reading, Statement } from './schema';
 import { ENGINE_VERSION } from './version';
 

@@ -3,8 +3,8 @@
  * in the pawn formation that let the opponent settle without being driven off by a pawn).
  *
  * Counted are the side's own ranks 3 to 5 where none of its pawns attacks: `permanent` where none ever can by
- * advancing straight on, `fixed` where every pawn that could is stopped on its way. Squares on which an own
- * pawn stands are left out: no enemy man settles on them before the pawn is gone.
+ * advancing straight on, `fixed` where every pawn that could is stopped on its way. Squares on which a pawn
+ * of either side stands are left out: no man settles on them before the pawn is gone.
  */
 import { colourOf, relativeRank } from '../board';
 import { type PawnMap, pawnHold, pawnReach, type StoppedPawn } from '../pawns';
@@ -56,7 +56,7 @@ function weakSquare(
   square: Square,
 ): WeakSquareValue | null {
   const rank = relativeRank(square, side);
-  if (rank < 3 || rank > 5 || board[square] === (side === 'white' ? 1 : 9)) return null;
+  if (rank < 3 || rank > 5 || (board[square]! & 7) === 1) return null;
   const hold = pawnHold(pawns, side, square);
   if (hold !== 'permanent' && hold !== 'fixed') return null;
   const enemy = opponent(side);

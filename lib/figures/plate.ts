@@ -8,7 +8,10 @@ import type { Reading } from '@/engine/reading/schema';
 import { pngOf } from './png';
 
 /** What a figure is asked for. `width` in px; `man` for the layer of mobility. */
-export type PlateOptions = Pick<PlateRequest, 'layer' | 'width' | 'flipped' | 'man' | 'notes' | 'caption' | 'chosen'> & {
+export type PlateOptions = Pick<
+  PlateRequest,
+  'layer' | 'width' | 'flipped' | 'man' | 'notes' | 'caption' | 'chosen'
+> & {
   readonly theme: ThemeName;
 };
 

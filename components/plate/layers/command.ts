@@ -20,16 +20,23 @@ export function commandMarks(reading: Reading, board: BoardPlace, id: string, pr
   const disputed = areas(board, states, 'disputed');
   const marks: Mark[] = [];
   if (disputed) {
-    marks.push({ type: 'path', d: disputed, fill: 'paper' }, { type: 'path', d: disputed, fill: { pattern: `${id}cross` } });
+    marks.push(
+      { type: 'path', d: disputed, fill: 'paper' },
+      { type: 'path', d: disputed, fill: { pattern: `${id}cross` } },
+    );
   }
   for (const side of ['white', 'black'] as const) {
     const area = areas(board, states, side);
     const band = bands(board, states, side);
-    const [wash, washA, bandA, pattern] = side === 'white'
-      ? (['ochre-wash', 'wash-a', 'band-a', `${id}dots`] as const)
-      : (['indigo-wash', 'iwash-a', 'iband-a', `${id}lines`] as const);
+    const [wash, washA, bandA, pattern] =
+      side === 'white'
+        ? (['ochre-wash', 'wash-a', 'band-a', `${id}dots`] as const)
+        : (['indigo-wash', 'iwash-a', 'iband-a', `${id}lines`] as const);
     if (!print) {
-      marks.push({ type: 'path', d: area, fill: wash, strength: washA }, { type: 'path', d: band, fill: wash, strength: bandA });
+      marks.push(
+        { type: 'path', d: area, fill: wash, strength: washA },
+        { type: 'path', d: band, fill: wash, strength: bandA },
+      );
     } else {
       marks.push({ type: 'path', d: band, fill: 'paper' });
     }
@@ -63,7 +70,12 @@ function bands(board: BoardPlace, states: readonly (readonly Command[])[], state
       if (each !== state) return;
       const x = board.x + column * s;
       const y = board.y + row * s;
-      const [up, down, left, right] = [other(row - 1, column), other(row + 1, column), other(row, column - 1), other(row, column + 1)];
+      const [up, down, left, right] = [
+        other(row - 1, column),
+        other(row + 1, column),
+        other(row, column - 1),
+        other(row, column + 1),
+      ];
       if (up) d += box(x, y, s, b);
       if (down) d += box(x, y + s - b, s, b);
       if (left) d += box(x, y + (up ? b : 0), b, s - (up ? b : 0) - (down ? b : 0));

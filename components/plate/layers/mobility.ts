@@ -9,7 +9,14 @@ export function mobilityTints(heat: readonly HeatCell[], board: BoardPlace, man:
   return asked(heat, man).flatMap(({ name, cell }): Mark[] => {
     if (!cell.safe) return [];
     const { x, y } = cornerOf(board, name);
-    return [{ type: 'path', d: box(x, y, board.size, board.size), fill: 'heat', strength: { heat: Math.min(11, cell.safeMoves) } }];
+    return [
+      {
+        type: 'path',
+        d: box(x, y, board.size, board.size),
+        fill: 'heat',
+        strength: { heat: Math.min(11, cell.safeMoves) },
+      },
+    ];
   });
 }
 

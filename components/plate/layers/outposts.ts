@@ -50,7 +50,13 @@ export function pennant(
     { type: 'path', d: flag, stroke: paint, width: stroke * 0.9, join: 'miter', fill: solid ? paint : 'paper' },
   ];
   if (print && side === 'white') {
-    marks.push({ type: 'path', d: `M${n(x + 2.4)} ${n(y - 0.5)}v${n(height * 2.05)}`, stroke: paint, width: 0.8, fill: 'none' });
+    marks.push({
+      type: 'path',
+      d: `M${n(x + 2.4)} ${n(y - 0.5)}v${n(height * 2.05)}`,
+      stroke: paint,
+      width: 0.8,
+      fill: 'none',
+    });
   }
   return marks;
 }

@@ -33,7 +33,16 @@ function rowOfPips(
   if (direct + behind > PIPS_MAX) {
     const text = behind > 0 ? `${direct}+${behind}` : String(direct);
     const height = Math.max(8, 0.15 * size);
-    marks.push({ type: 'text', x: x + 0.06 * size, y: y + height * 0.36, text, size: height, weight: 700, fill: paint, halo: 2 });
+    marks.push({
+      type: 'text',
+      x: x + 0.06 * size,
+      y: y + height * 0.36,
+      text,
+      size: height,
+      weight: 700,
+      fill: paint,
+      halo: 2,
+    });
     return;
   }
   const r = Math.max(1.7, 0.039 * size);

@@ -7,19 +7,39 @@ import type { BoardPlace, Mark } from '../types';
 type WeakSquare = Reading['weakSquares'][number];
 
 /** Rings of weak squares; those that do not matter are drawn in hairline. `all` takes them in too. */
-export function weakMarks(weak: readonly WeakSquare[], board: BoardPlace, options: { all: boolean; print: boolean }): Mark[] {
+export function weakMarks(
+  weak: readonly WeakSquare[],
+  board: BoardPlace,
+  options: { all: boolean; print: boolean },
+): Mark[] {
   return weak
     .filter(({ matters }) => options.all || matters)
     .flatMap((one) => {
       const both = weak.some((other) => other.square === one.square && other.side !== one.side);
       const { x, y } = cornerOf(board, one.square);
       const radius = board.size * (both && one.side === 'white' ? 0.37 : 0.28);
-      return ring(one.side, one.hold === 'fixed', x + board.size / 2, y + board.size / 2, radius, one.matters, options.print);
+      return ring(
+        one.side,
+        one.hold === 'fixed',
+        x + board.size / 2,
+        y + board.size / 2,
+        radius,
+        one.matters,
+        options.print,
+      );
     });
 }
 
 /** One ring. In print White's is a double line, since hue cannot tell the sides apart there. */
-export function ring(side: Side, broken: boolean, x: number, y: number, r: number, strong: boolean, print: boolean): Mark[] {
+export function ring(
+  side: Side,
+  broken: boolean,
+  x: number,
+  y: number,
+  r: number,
+  strong: boolean,
+  print: boolean,
+): Mark[] {
   const paint = strong ? (side === 'white' ? 'ochre' : 'indigo') : 'hair';
   const width = strong ? Math.max(1.1, Math.min(1.7, r * 0.09)) : 0.9;
   const teeth = strong ? (r < 14 ? 10 : 18) : 0;
@@ -40,7 +60,14 @@ export function ring(side: Side, broken: boolean, x: number, y: number, r: numbe
   const marks: Mark[] = [{ type: 'path', d, stroke: paint, width, fill: 'none' }];
   if (wedges) marks.push({ type: 'path', d: wedges, fill: paint });
   if (print && side === 'white' && strong) {
-    marks.push({ type: 'path', d: arc(x, y, r + 2.6, 0, Math.PI) + arc(x, y, r + 2.6, Math.PI, 2 * Math.PI), stroke: paint, width: 0.7, fill: 'none', ...(broken ? { dash: '4 3' } : {}) });
+    marks.push({
+      type: 'path',
+      d: arc(x, y, r + 2.6, 0, Math.PI) + arc(x, y, r + 2.6, Math.PI, 2 * Math.PI),
+      stroke: paint,
+      width: 0.7,
+      fill: 'none',
+      ...(broken ? { dash: '4 3' } : {}),
+    });
   }
   return marks;
 }

@@ -3,7 +3,8 @@ import { squareName } from '@/engine/board';
 import { addressHref } from './address';
 import { type Act, addressOf, type PageState } from './state';
 
-const LINK = 'underlined flex min-h-11 cursor-pointer items-center text-[14px] disabled:cursor-default disabled:text-hair disabled:no-underline';
+const LINK =
+  'underlined flex min-h-11 cursor-pointer items-center text-[14px] disabled:cursor-default disabled:text-hair disabled:no-underline';
 
 export function Actions({ state, act }: { readonly state: PageState; readonly act: (act: Act) => void }) {
   const address = addressOf(state);
@@ -28,7 +29,12 @@ export function Actions({ state, act }: { readonly state: PageState; readonly ac
       >
         Turn board
       </a>
-      <button type="button" className={`needs-scripts ${LINK}`} disabled={state.undo.length === 0} onClick={() => act({ type: 'undo' })}>
+      <button
+        type="button"
+        className={`needs-scripts ${LINK}`}
+        disabled={state.undo.length === 0}
+        onClick={() => act({ type: 'undo' })}
+      >
         Undo
       </button>
       <span className="flex items-center gap-x-2 text-[14px]">

@@ -37,14 +37,25 @@ export function FenField({ text, faults, refused, layer, act }: FenFieldProps) {
             className={`h-11 min-w-0 grow rounded-sm border border-hair border-b-2 bg-raise px-3 text-[14px] ${refused ? 'border-b-pick' : 'border-b-ink'}`}
           />
           <input type="hidden" name="layer" value={layer} />
-          <button type="submit" className="h-11 shrink-0 cursor-pointer rounded-sm bg-ink px-5 font-bold text-paper hover:underline">
+          <button
+            type="submit"
+            className="h-11 shrink-0 cursor-pointer rounded-sm bg-ink px-5 font-bold text-paper hover:underline"
+          >
             Read
           </button>
         </div>
       </form>
       {faults.length > 0 ? (
-        <div id="fen-faults" role={refused ? 'alert' : 'status'} className="mt-2 border-l-3 border-pick pl-3 text-[14px] leading-5">
-          <p className="font-bold text-pick">{refused ? 'This cannot be read. The plate shows the position before.' : 'Read as a diagram: no game can have this position.'}</p>
+        <div
+          id="fen-faults"
+          role={refused ? 'alert' : 'status'}
+          className="mt-2 border-l-3 border-pick pl-3 text-[14px] leading-5"
+        >
+          <p className="font-bold text-pick">
+            {refused
+              ? 'This cannot be read. The plate shows the position before.'
+              : 'Read as a diagram: no game can have this position.'}
+          </p>
           <ul>
             {faults.map(({ code, message, square }) => (
               <li key={`${code}${square ?? ''}${message}`}>{message}</li>

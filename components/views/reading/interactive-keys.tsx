@@ -24,7 +24,8 @@ export function InteractiveKeys({ act }: { readonly act: (act: Act) => void }) {
   useEffect(() => {
     const press = (event: KeyboardEvent) => {
       const target = event.target;
-      const typing = target instanceof HTMLElement && (target.matches('input, textarea, select') || target.isContentEditable);
+      const typing =
+        target instanceof HTMLElement && (target.matches('input, textarea, select') || target.isContentEditable);
       const undoes = event.key === 'z' && (event.ctrlKey || event.metaKey);
       if (typing || ((event.ctrlKey || event.metaKey || event.altKey) && !undoes)) return;
       const layer = LAYERS[Number(event.key) - 1];
@@ -47,7 +48,11 @@ export function InteractiveKeys({ act }: { readonly act: (act: Act) => void }) {
           Keys
         </button>
       </p>
-      <dialog ref={sheet} aria-labelledby="keys-title" className="m-auto max-w-[calc(100vw-24px)] border-2 border-ink bg-paper p-6 text-ink backdrop:bg-black/40">
+      <dialog
+        ref={sheet}
+        aria-labelledby="keys-title"
+        className="m-auto max-w-[calc(100vw-24px)] border-2 border-ink bg-paper p-6 text-ink backdrop:bg-black/40"
+      >
         <h2 id="keys-title">Keys</h2>
         <dl className="mt-3 grid grid-cols-[auto_1fr] gap-x-6 gap-y-1">
           {SHEET.map(([key, what]) => (

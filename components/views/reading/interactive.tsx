@@ -40,7 +40,8 @@ export function InteractiveReading({ address }: { readonly address: Address }) {
 
   const position = shownPosition(state);
   const reading = useMemo(() => readPosition(position, [], desk), [position]);
-  const asked = state.drag?.from === state.man && state.drag?.over != null ? state.drag.over : state.man;
+  const drag = state.drag;
+  const asked = drag && drag.from === state.man && drag.over !== null ? drag.over : state.man;
   const man = asked === null ? null : squareName(asked);
   const heat = useMemo(
     () => (state.layer === 'mobility' && man !== null ? (heatMapIn(position, man) ?? null) : null),
@@ -63,9 +64,15 @@ export function InteractiveReading({ address }: { readonly address: Address }) {
     heat,
     lit: lit ? [...new Set([...lit.squares, ...lit.men])] : [],
   };
-  const plates = width === null ? [plateOf({ ...request, width: 1312, id: 'w' }), plateOf({ ...request, width: 720, id: 'n' })] : [plateOf({ ...request, width, id: 'p' })];
+  const plates =
+    width === null
+      ? [plateOf({ ...request, width: 1312, id: 'w' }), plateOf({ ...request, width: 720, id: 'n' })]
+      : [plateOf({ ...request, width, id: 'p' })];
   const [plate] = plates;
-  const labels = useMemo(() => (state.drag ? null : squareLabels(reading, state.layer)), [reading, state.layer, state.drag]);
+  const labels = useMemo(
+    () => (state.drag ? null : squareLabels(reading, state.layer)),
+    [reading, state.layer, state.drag],
+  );
 
   useEffect(() => {
     const element = frame.current;
@@ -93,7 +100,12 @@ export function InteractiveReading({ address }: { readonly address: Address }) {
       </div>
       <div ref={frame} className="mt-4">
         {plates.map((each, index) => (
-          <PlateFigure key={index} plate={each} only={plates.length === 1 ? 'any' : index === 0 ? 'wide' : 'narrow'} onChoose={(key) => act({ type: 'statement', key })}>
+          <PlateFigure
+            key={index}
+            plate={each}
+            only={plates.length === 1 ? 'any' : index === 0 ? 'wide' : 'narrow'}
+            onChoose={(key) => act({ type: 'statement', key })}
+          >
             {width === null ? null : (
               <InteractiveBoard
                 place={each.board}

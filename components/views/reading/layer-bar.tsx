@@ -4,7 +4,15 @@ import { LAYER_NAMES } from '@/components/plate/words';
 import { type Address, addressHref } from './address';
 import type { Act } from './state';
 
-export function LayerBar({ layer, address, act }: { readonly layer: string; readonly address: Address; readonly act: (act: Act) => void }) {
+export function LayerBar({
+  layer,
+  address,
+  act,
+}: {
+  readonly layer: string;
+  readonly address: Address;
+  readonly act: (act: Act) => void;
+}) {
   return (
     <nav aria-label="Layer" className="-mx-3 max-w-full overflow-x-auto px-3">
       <ul className="flex border-b border-ink">

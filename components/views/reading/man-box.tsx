@@ -14,7 +14,8 @@ export function ManBox({ picked, act }: { readonly picked: PageState['picked']; 
     <details className="needs-scripts mx-auto mt-4 max-w-[760px]">
       <summary className="min-h-11 cursor-pointer py-2.5 lg:text-center">Edit the position</summary>
       <p className="pb-2 text-[13px] leading-5 text-soft lg:text-center">
-        Drag men on the board, off it to take them away. Or choose a man here and tap squares; tap the man again to stop.
+        Drag men on the board, off it to take them away. Or choose a man here and tap squares; tap the man again to
+        stop.
       </p>
       <div className="flex flex-wrap gap-1 lg:justify-center">
         {SIDES.flatMap((side) =>
@@ -38,10 +39,18 @@ export function ManBox({ picked, act }: { readonly picked: PageState['picked']; 
         )}
       </div>
       <p className="mt-1 flex gap-x-5 text-[14px] lg:justify-center">
-        <button type="button" className="underlined min-h-11 cursor-pointer" onClick={() => act({ type: 'read', text: EMPTY })}>
+        <button
+          type="button"
+          className="underlined min-h-11 cursor-pointer"
+          onClick={() => act({ type: 'read', text: EMPTY })}
+        >
           Empty board
         </button>
-        <button type="button" className="underlined min-h-11 cursor-pointer" onClick={() => act({ type: 'read', text: INITIAL })}>
+        <button
+          type="button"
+          className="underlined min-h-11 cursor-pointer"
+          onClick={() => act({ type: 'read', text: INITIAL })}
+        >
           First position of the game
         </button>
       </p>

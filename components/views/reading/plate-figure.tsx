@@ -18,7 +18,8 @@ export function PlateFigure({
   readonly children: ReactNode;
 }) {
   const choose = (target: EventTarget) => {
-    const key = target instanceof Element ? target.closest<SVGElement>('[data-statement]')?.dataset.statement : undefined;
+    const key =
+      target instanceof Element ? target.closest<SVGElement>('[data-statement]')?.dataset.statement : undefined;
     if (key) onChoose(key);
   };
   return (

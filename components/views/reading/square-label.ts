@@ -17,7 +17,8 @@ export function squareLabels(reading: Reading, layer: Layer): ReadonlyMap<Square
   return new Map(
     reading.squares.map(({ square, occupant, attackers, command }) => {
       const parts = [occupant ? `${occupant.side} ${occupant.kind}` : 'empty'];
-      if (layer === 'command') parts.push(command === 'white' || command === 'black' ? `${SIDES[command]} commands it` : command);
+      if (layer === 'command')
+        parts.push(command === 'white' || command === 'black' ? `${SIDES[command]} commands it` : command);
       if (layer === 'weak' || layer === 'command') {
         for (const weak of reading.weakSquares) {
           if (weak.square === square) parts.push(`${weak.hold} weak square of ${SIDES[weak.side]}`);
@@ -38,7 +39,10 @@ export function squareLabels(reading: Reading, layer: Layer): ReadonlyMap<Square
           if (file.targets.some((target) => target.square === square)) parts.push('target');
         }
       }
-      return [square, `${square}, ${parts.join(', ')}; attacked ${attack('white', attackers.white)}; ${attack('black', attackers.black)}`];
+      return [
+        square,
+        `${square}, ${parts.join(', ')}; attacked ${attack('white', attackers.white)}; ${attack('black', attackers.black)}`,
+      ];
     }),
   );
 }

@@ -86,7 +86,11 @@ export function acted(state: PageState, act: Act): PageState {
       return { ...moved(state, opened.position), text: act.text, faults: opened.faults };
     }
     case 'layer':
-      return { ...state, layer: act.layer, man: act.layer === 'mobility' ? (state.man ?? firstPiece(state.position)) : state.man };
+      return {
+        ...state,
+        layer: act.layer,
+        man: act.layer === 'mobility' ? (state.man ?? firstPiece(state.position)) : state.man,
+      };
     case 'turn':
       return { ...state, flipped: !state.flipped };
     case 'side':

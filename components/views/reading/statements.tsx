@@ -36,7 +36,9 @@ export function Statements(props: StatementsProps) {
             <Items {...props} list={list.slice(0, SHOWN_MAX)} />
             {list.length > SHOWN_MAX ? (
               <details open={list.slice(SHOWN_MAX).some(({ key }) => key === props.chosen) || undefined}>
-                <summary className="min-h-11 cursor-pointer py-2.5 text-soft hover:text-ink">{list.length - SHOWN_MAX} more</summary>
+                <summary className="min-h-11 cursor-pointer py-2.5 text-soft hover:text-ink">
+                  {list.length - SHOWN_MAX} more
+                </summary>
                 <Items {...props} list={list.slice(SHOWN_MAX)} />
               </details>
             ) : null}
@@ -87,7 +89,9 @@ function Item({
           onChoose(key);
         }}
       >
-        <span className={`w-4 shrink-0 text-right ${isChosen ? 'font-bold text-pick' : 'text-soft'}`}>{numbers.get(key) ?? ''}</span>
+        <span className={`w-4 shrink-0 text-right ${isChosen ? 'font-bold text-pick' : 'text-soft'}`}>
+          {numbers.get(key) ?? ''}
+        </span>
         <span>
           <span className={`font-bold ${ink}`}>{head}</span>
           {text.slice(head.length)}

@@ -64,4 +64,12 @@ export interface WeakBackRank extends FactBase {
   readonly king: SquareName;
 }
 
-export type KingFact = InCheck | WholeShelter | BrokenShelter | NoLuft | NoFlight | OpenLineBeside | KingZone | WeakBackRank;
+export type KingFact =
+  | InCheck
+  | WholeShelter
+  | BrokenShelter
+  | NoLuft
+  | NoFlight
+  | OpenLineBeside
+  | KingZone
+  | WeakBackRank;

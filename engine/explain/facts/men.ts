@@ -25,7 +25,12 @@ export interface BadBishop extends FactBase {
   readonly pawns: number;
   readonly fixed: readonly SquareName[];
   readonly tradeable: boolean;
-  readonly lever: { readonly pawn: SquareName; readonly on: SquareName; readonly against: SquareName; readonly moves: number } | null;
+  readonly lever: {
+    readonly pawn: SquareName;
+    readonly on: SquareName;
+    readonly against: SquareName;
+    readonly moves: number;
+  } | null;
   readonly outside: { readonly square: SquareName; readonly moves: number } | null;
 }
 

@@ -99,6 +99,8 @@ export interface MinorityAttackFact extends FactBase {
   readonly pawn: SquareName;
   readonly on: SquareName;
   readonly against: SquareName;
+  /** Pawn moves until it strikes; 0: it does now. */
+  readonly moves: number;
 }
 
 export interface Majority extends FactBase {

@@ -31,7 +31,9 @@ export function controlFacts(values: ReadingValues): ControlFact[] {
 export function roomBehindPawns({ pawns }: ReadingValues, side: Side): number {
   let room = 0;
   for (let file = 2; file <= 5; file++) {
-    const ranks = pawns[side].pawns.filter((square) => fileOf(square) === file).map((square) => relativeRank(square, side));
+    const ranks = pawns[side].pawns
+      .filter((square) => fileOf(square) === file)
+      .map((square) => relativeRank(square, side));
     if (ranks.length > 0) room += Math.max(...ranks) - 1;
   }
   return room;

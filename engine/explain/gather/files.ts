@@ -60,7 +60,12 @@ function ownership(values: ReadingValues, file: FileValue, facts: FilesFact[]): 
   }
 }
 
-function halfOpen(values: ReadingValues, { file, halfOpenFor, targets, heavy, entries }: FileValue, side: Side, facts: FilesFact[]): void {
+function halfOpen(
+  values: ReadingValues,
+  { file, halfOpenFor, targets, heavy, entries }: FileValue,
+  side: Side,
+  facts: FilesFact[],
+): void {
   if (halfOpenFor !== side) return;
   const [target] = targets;
   const enemy = opponent(side);
@@ -69,16 +74,36 @@ function halfOpen(values: ReadingValues, { file, halfOpenFor, targets, heavy, en
   if (target) {
     const square = squareName(target.square);
     const why = target.backward ? 'backward' : target.isolated ? 'isolated' : 'unguarded';
-    facts.push({ id: 'half-open-target', side, file: fileName(file), target: square, why, heavy: men, squares: [square, ...on], men: on });
+    facts.push({
+      id: 'half-open-target',
+      side,
+      file: fileName(file),
+      target: square,
+      why,
+      heavy: men,
+      squares: [square, ...on],
+      men: on,
+    });
     return;
   }
   const pawns = values.pawns[enemy].pawns.filter((square) => fileOf(square) === file);
   pawns.sort((a, b) => relativeRank(a, side) - relativeRank(b, side));
   const [first] = pawns;
   if (first === undefined || entries[side].length > 0 || men.length === 0) return;
-  const guards = namesInView(attackersOf(values.map, enemy, first).filter((square) => kindOn(values.map, square) === 'pawn'), enemy);
+  const guards = namesInView(
+    attackersOf(values.map, enemy, first).filter((square) => kindOn(values.map, square) === 'pawn'),
+    enemy,
+  );
   const pawn = squareName(first);
-  facts.push({ id: 'half-open-nothing', side, file: fileName(file), pawn, guards, squares: [pawn, ...guards], men: on });
+  facts.push({
+    id: 'half-open-nothing',
+    side,
+    file: fileName(file),
+    pawn,
+    guards,
+    squares: [pawn, ...guards],
+    men: on,
+  });
 }
 
 function doubled(values: ReadingValues, { file, heavy }: FileValue, side: Side, facts: FilesFact[]): void {
@@ -103,7 +128,9 @@ function takers(values: ReadingValues, side: Side, facts: FilesFact[]): void {
     const taker = rooks[side];
     return taker && status !== 'closed' && heavy[side].length === 0 ? [{ file, status, taker }] : [];
   });
-  found.sort((a, b) => a.taker.moves - b.taker.moves || (a.status === b.status ? a.file - b.file : a.status === 'open' ? -1 : 1));
+  found.sort(
+    (a, b) => a.taker.moves - b.taker.moves || (a.status === b.status ? a.file - b.file : a.status === 'open' ? -1 : 1),
+  );
   const [best] = found;
   if (!best || best.taker.moves > 2) return;
   const [rook, to] = [squareName(best.taker.rook), squareName(best.taker.to)];
@@ -125,7 +152,10 @@ function seventh(values: ReadingValues, side: Side, facts: FilesFact[]): void {
   if (there.length > 0) {
     const men = namesInView(there, side);
     const heavy = men.map((square) => manAt(values, there[there.map(squareName).indexOf(square)] ?? (0 as Square)));
-    const pawns = namesInView(values.pawns[opponent(side)].pawns.filter((square) => relativeRank(square, side) === 7), side);
+    const pawns = namesInView(
+      values.pawns[opponent(side)].pawns.filter((square) => relativeRank(square, side) === 7),
+      side,
+    );
     facts.push({ id: 'on-seventh', side, men, heavy, pawns, squares: [...men, ...pawns] });
     return;
   }
@@ -148,7 +178,10 @@ function diagonals(values: ReadingValues, side: Side, facts: FilesFact[]): void 
     if (last === undefined) continue;
     const man = manAt(values, diagonal.from);
     const forward = isForward(diagonal, side);
-    const isLong = diagonal.direction === 'a1h8' ? (diagonal.from & 7) === diagonal.from >> 3 : (diagonal.from & 7) + (diagonal.from >> 3) === 7;
+    const isLong =
+      diagonal.direction === 'a1h8'
+        ? (diagonal.from & 7) === diagonal.from >> 3
+        : (diagonal.from & 7) + (diagonal.from >> 3) === 7;
     if (forward && isLong && relativeRank(diagonal.from, side) <= 3 && diagonal.squares.length >= 5) {
       facts.push({
         id: 'long-diagonal-open',

@@ -34,7 +34,13 @@ function oneKing(values: ReadingValues, king: KingValue): KingFact[] {
   const hasHeavy = values.men.some((man) => man.side === enemy && (man.kind === 'rook' || man.kind === 'queen'));
   if (king.openBeside.length > 0 && hasHeavy) {
     const files = king.openBeside.map(fileName);
-    facts.push({ ...base, id: 'open-line-beside-king', files, heavy, squares: [at, ...heavy.map(({ square }) => square)] });
+    facts.push({
+      ...base,
+      id: 'open-line-beside-king',
+      files,
+      heavy,
+      squares: [at, ...heavy.map(({ square }) => square)],
+    });
   }
   const attackers = inView(king.reachedBy.map(squareName), enemy).map((name) =>
     manAt(values, king.reachedBy.find((square) => squareName(square) === name) ?? king.square),
@@ -47,7 +53,10 @@ function oneKing(values: ReadingValues, king: KingValue): KingFact[] {
   return facts;
 }
 
-type KingBase = Pick<KingFact, 'squares' | 'men'> & { readonly side: KingValue['side']; readonly king: ReturnType<typeof squareName> };
+type KingBase = Pick<KingFact, 'squares' | 'men'> & {
+  readonly side: KingValue['side'];
+  readonly king: ReturnType<typeof squareName>;
+};
 
 /** Shelter is spoken of where the king has castled or gone to a wing: on its first two ranks, files a to c or f to h. */
 function shelter({ square, side, shelter: files }: KingValue, base: KingBase, facts: KingFact[]): void {
@@ -59,7 +68,10 @@ function shelter({ square, side, shelter: files }: KingValue, base: KingBase, fa
     facts.push({ ...base, id: 'shelter-whole', pawns: names, squares: [base.king, ...names] });
     return;
   }
-  const gone = namesInView(files.flatMap(({ pawn, advanced }) => (pawn !== null && advanced >= 2 ? [pawn] : [])), side);
+  const gone = namesInView(
+    files.flatMap(({ pawn, advanced }) => (pawn !== null && advanced >= 2 ? [pawn] : [])),
+    side,
+  );
   const gaps = files.filter(({ pawn }) => pawn === null).map(({ file }) => fileName(file));
   if (gaps.length + gone.length > 0) {
     facts.push({ ...base, id: 'shelter-broken', bare: gaps, advanced: gone, squares: [base.king, ...gone] });
@@ -76,9 +88,20 @@ function luft(values: ReadingValues, king: KingValue, base: KingBase, facts: Kin
   const onWing = fileOf(square) <= 2 || fileOf(square) >= 5;
   if (free.length > 0 || !developed || !onWing) return;
   const singles = luftMoves.filter(({ from, to }) => Math.abs(to - from) === 8);
-  const order = inView(singles.map(({ from }) => squareName(from)), side);
-  const gives = order.flatMap((name) =>
-    singles.filter(({ from }) => squareName(from) === name).map(({ from, to }) => ({ from: squareName(from), to: squareName(to) })),
+  const order = inView(
+    singles.map(({ from }) => squareName(from)),
+    side,
   );
-  facts.push({ ...base, id: 'no-luft', noFlight: flights.length === 0, gives, squares: [base.king, ...gives.map(({ from }) => from)] });
+  const gives = order.flatMap((name) =>
+    singles
+      .filter(({ from }) => squareName(from) === name)
+      .map(({ from, to }) => ({ from: squareName(from), to: squareName(to) })),
+  );
+  facts.push({
+    ...base,
+    id: 'no-luft',
+    noFlight: flights.length === 0,
+    gives,
+    squares: [base.king, ...gives.map(({ from }) => from)],
+  });
 }

@@ -41,14 +41,32 @@ function oneMan(values: ReadingValues, value: ManValue, facts: MenFact[]): void 
   if (value.pinned) pinned(values, value, facts);
   const guarded = value.duties.filter(({ by }) => by === 'guard');
   if (notes.includes('overloaded')) {
-    const wards = inView(guarded.map((duty) => squareName(duty.square)), side).slice(0, 2);
-    const guards = wards.map((name) => manAt(values, guarded.find((duty) => squareName(duty.square) === name)?.square ?? square));
+    const wards = inView(
+      guarded.map((duty) => squareName(duty.square)),
+      side,
+    ).slice(0, 2);
+    const guards = wards.map((name) =>
+      manAt(values, guarded.find((duty) => squareName(duty.square) === name)?.square ?? square),
+    );
     facts.push({ ...base, id: 'overloaded', guards, squares: wards });
   } else if (isPiece && value.duties.length > 0) {
-    const [duty] = [...value.duties].sort((a, b) => b.loses - a.loses || fileOf(a.square) - fileOf(b.square) || relativeRank(a.square, side) - relativeRank(b.square, side));
+    const [duty] = [...value.duties].sort(
+      (a, b) =>
+        b.loses - a.loses ||
+        fileOf(a.square) - fileOf(b.square) ||
+        relativeRank(a.square, side) - relativeRank(b.square, side),
+    );
     if (duty) {
       const ward = manAt(values, duty.square);
-      facts.push({ ...base, id: 'tied', ward, loses: duty.loses, by: duty.by, squares: [ward.square], men: [man.square, ward.square] });
+      facts.push({
+        ...base,
+        id: 'tied',
+        ward,
+        loses: duty.loses,
+        by: duty.by,
+        squares: [ward.square],
+        men: [man.square, ward.square],
+      });
     }
   }
   if (isPiece && value.defenders.length === 0 && value.enPrise === 0 && relativeRank(square, side) >= 4) {
@@ -80,7 +98,16 @@ function oneBishop(values: ReadingValues, bishop: BishopValue, facts: MenFact[])
   const square = squareName(bishop.square);
   if (bishop.outside) {
     const safeMoves = values.men.find((man) => man.square === bishop.square)?.safeMoves.length ?? 0;
-    facts.push({ id: 'bad-but-active', side, square, onColour: onColour.length, pawns: ownPawns, safeMoves, squares: [square], men: [square] });
+    facts.push({
+      id: 'bad-but-active',
+      side,
+      square,
+      onColour: onColour.length,
+      pawns: ownPawns,
+      safeMoves,
+      squares: [square],
+      men: [square],
+    });
     return;
   }
   const fixed = inView(bishop.fixedCentre.map(squareName), side);
@@ -93,14 +120,24 @@ function oneBishop(values: ReadingValues, bishop: BishopValue, facts: MenFact[])
     pawns: ownPawns,
     fixed,
     tradeable: remedy?.tradeable ?? false,
-    lever: remedy?.lever ? { pawn: squareName(remedy.lever.from), on: squareName(remedy.lever.on), against: squareName(remedy.lever.against), moves: remedy.lever.moves } : null,
+    lever: remedy?.lever
+      ? {
+          pawn: squareName(remedy.lever.from),
+          on: squareName(remedy.lever.on),
+          against: squareName(remedy.lever.against),
+          moves: remedy.lever.moves,
+        }
+      : null,
     outside: remedy?.outside ? { square: squareName(remedy.outside.square), moves: remedy.outside.moves } : null,
     squares: [square, ...fixed],
     men: [square],
   });
 }
 
-/** Best and worst placed piece of a side by its share of safe moves; the worst only once most men are out. */
+/**
+ * Best and worst placed piece of a side by its share of safe moves. Worst is said only of a piece that clearly has fewest,
+ * attacks next to nothing in the enemy half and does not stand behind a lever; never of the queen.
+ */
 function placed(values: ReadingValues, side: Side, facts: MenFact[]): void {
   const ranked = values.men
     .filter((man) => man.side === side && MOST[man.kind] !== undefined && man.enPrise === 0)
@@ -111,14 +148,39 @@ function placed(values: ReadingValues, side: Side, facts: MenFact[]): void {
   const nextWorst = ranked[ranked.length - 2];
   if (!best || !second || !worst || !nextWorst) return;
   if (best.share > second.share && best.share >= 0.5) facts.push(placement(values, 'best-placed', best.man));
-  if (worst.man.kind !== 'queen' && worst.share < nextWorst.share && worst.share <= 0.25) facts.push(placement(values, 'worst-placed', worst.man));
+  if (
+    worst.man.kind !== 'queen' &&
+    worst.share < nextWorst.share &&
+    worst.share <= 0.25 &&
+    enemyHalfSeen(values, worst.man.square) <= 1 &&
+    !standsBehindLever(values, worst.man)
+  )
+    facts.push(placement(values, 'worst-placed', worst.man));
 }
 
 const words = newWords();
 
-function placement(values: ReadingValues, id: PlacedMan['id'], { square, side, kind, safeMoves, movesToCentre }: ManValue): MenFact {
-  fillAttacked(values.map.board, values.map.board[square]!, square, square, words);
-  const enemyHalf = squaresOfWords(words).filter((to) => relativeRank(to, side) >= 5).length;
+/** Squares of the enemy half that the man attacks. */
+function enemyHalfSeen({ map }: ReadingValues, square: Square): number {
+  const code = map.board[square]!;
+  fillAttacked(map.board, code, square, square, words);
+  return squaresOfWords(words).filter((to) => relativeRank(to, code >> 3 ? 'black' : 'white') >= 5).length;
+}
+
+/** A rook behind an own pawn that has a lever within two moves works through it, however few its moves. */
+function standsBehindLever({ pawns }: ReadingValues, { square, side, kind }: ManValue): boolean {
+  return (
+    kind === 'rook' &&
+    pawns.levers.some((lever) => lever.side === side && lever.moves <= 2 && fileOf(lever.from) === fileOf(square))
+  );
+}
+
+function placement(
+  values: ReadingValues,
+  id: PlacedMan['id'],
+  { square, side, kind, safeMoves, movesToCentre }: ManValue,
+): MenFact {
+  const enemyHalf = enemyHalfSeen(values, square);
   const man = manAt(values, square);
   return {
     id,
@@ -143,7 +205,10 @@ function hasPair(values: ReadingValues, side: Side): boolean {
 
 function pair(values: ReadingValues, side: Side, facts: MenFact[]): void {
   if (!hasPair(values, side) || hasPair(values, opponent(side))) return;
-  const men = inView(bishopsOf(values, side).map(({ square }) => squareName(square)), side);
+  const men = inView(
+    bishopsOf(values, side).map(({ square }) => squareName(square)),
+    side,
+  );
   facts.push({ id: 'bishop-pair', side, squares: men, men });
 }
 
@@ -159,7 +224,8 @@ function bishopAgainstKnight(values: ReadingValues, facts: MenFact[]): void {
     const all = values.pawns.pawns.map((pawn) => fileOf(pawn.square));
     const bothWings = all.some((file) => file <= 2) && all.some((file) => file >= 5);
     const onColour = bishop.onColour.length;
-    const favours = bishop.bad && rams > 0 ? 'knight' : bothWings && rams === 0 && onColour * 2 < bishop.ownPawns ? 'bishop' : null;
+    const favours =
+      bishop.bad && rams > 0 ? 'knight' : bothWings && rams === 0 && onColour * 2 < bishop.ownPawns ? 'bishop' : null;
     if (!favours) continue;
     const [at, against] = [squareName(bishop.square), squareName(knight.square)];
     facts.push({
@@ -185,7 +251,16 @@ function blockedIn(values: ReadingValues, side: Side, facts: MenFact[]): void {
     const man = manAt(values, square);
     fillAttacked(values.map.board, values.map.board[square]!, square, square, words);
     const blockers = squaresOfWords(words);
-    const by = inView(blockers.map(squareName), side).map((name) => manAt(values, blockers.find((each) => squareName(each) === name) ?? square));
-    facts.push({ id: 'blocked-in', side, man, by, squares: [man.square, ...by.map((each) => each.square)], men: [man.square] });
+    const by = inView(blockers.map(squareName), side).map((name) =>
+      manAt(values, blockers.find((each) => squareName(each) === name) ?? square),
+    );
+    facts.push({
+      id: 'blocked-in',
+      side,
+      man,
+      by,
+      squares: [man.square, ...by.map((each) => each.square)],
+      men: [man.square],
+    });
   }
 }

@@ -43,7 +43,13 @@ export function countOf({ men }: ReadingValues, side: Side, kind: ManAt['kind'])
 }
 
 /** A pawn of the side on its way to attack a square, with the first man that stands in its way. */
-export function pawnOnItsWay(values: ReadingValues, side: Side, from: Square, moves: number, target: Square): PawnMoves {
+export function pawnOnItsWay(
+  values: ReadingValues,
+  side: Side,
+  from: Square,
+  moves: number,
+  target: Square,
+): PawnMoves {
   const landing = rankOf(target) + (side === 'white' ? -1 : 1);
   let blocker: ManAt | null = null;
   for (let at: Square | undefined = from; at !== undefined && rankOf(at) !== landing && blocker === null; ) {

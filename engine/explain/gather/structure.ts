@@ -1,13 +1,14 @@
 /** Facts about pawns that hold in a position. */
 import { ahead, colourOf, fileName, fileOf, relativeRank, squareName } from '../../board';
-import { type Lever, type PawnReading, type PawnSideValue, pawnOn, type Ram } from '../../pawns';
+import { type PawnReading, type PawnSideValue, pawnOn, type Ram } from '../../pawns';
 import { commandOf } from '../../squares';
 import { structureLead } from '../../structures';
 import { opponent, type Side, SIDES, type Square, type SquareName } from '../../types';
-import type { LeverFact, Majority, StructureFact } from '../facts/structure';
+import type { StructureFact } from '../facts/structure';
 import type { ReadingValues } from '../values';
 import { inView } from '../words';
 import { manAtOrNull, namesInView } from './names';
+import { planFacts } from './pawn-plans';
 
 /** Everything worth saying about the pawns. */
 export function structureFacts(values: ReadingValues): StructureFact[] {
@@ -19,9 +20,7 @@ export function structureFacts(values: ReadingValues): StructureFact[] {
     const pawns = values.pawns[side];
     doubled(pawns, values, facts);
     chains(values, side, facts);
-    levers(values, side, facts);
-    minority(values, side, facts);
-    majorities(values, side, facts);
+    facts.push(...planFacts(values, side));
     hanging(pawns, facts);
     onColour(pawns, facts);
   }
@@ -166,106 +165,6 @@ function chains(values: ReadingValues, side: Side, facts: StructureFact[]): void
   if (!best || best.length < 3) return;
   const names = best.map(squareName);
   facts.push({ id: 'pawn-chain', side, pawns: names, squares: names, men: names });
-}
-
-/** The first man in the way of a lever's pawn, its strike square included. */
-function blockerOf(values: ReadingValues, lever: Lever): Square | null {
-  for (let square = ahead(lever.from, lever.side); square !== undefined; square = ahead(square, lever.side)) {
-    if (values.map.board[square] !== 0) return square;
-    if (square === lever.on) return null;
-  }
-  return null;
-}
-
-/** Levers still to be played: of each pawn the soonest, central and supported ones first, three a side at most. */
-function levers(values: ReadingValues, side: Side, facts: StructureFact[]): void {
-  const { pawns } = values;
-  const alreadyNow = new Set(pawns.levers.filter((lever) => lever.moves === 0).map((lever) => lever.from));
-  const minority = new Set(pawns[side].minorityAttacks.map(({ lever }) => lever.from));
-  const coming: LeverFact[] = [];
-  const seen = new Set<Square>();
-  for (const lever of pawns.levers) {
-    if (
-      lever.side !== side ||
-      lever.moves === 0 ||
-      alreadyNow.has(lever.from) ||
-      seen.has(lever.from) ||
-      minority.has(lever.from)
-    )
-      continue;
-    seen.add(lever.from);
-    const blocker = blockerOf(values, lever);
-    if (blocker !== null && lever.moves > 1) continue;
-    const [pawn, on, against] = [squareName(lever.from), squareName(lever.on), squareName(lever.against)];
-    coming.push({
-      id: lever.moves === 1 ? 'lever-ready' : 'lever-coming',
-      side,
-      pawn,
-      on,
-      against,
-      moves: lever.moves,
-      blocker: manAtOrNull(values, blocker),
-      supported: lever.supported,
-      squares: [pawn, on, against],
-      men: blocker === null ? [pawn] : [pawn, squareName(blocker)],
-    });
-  }
-  const worth = (lever: LeverFact) =>
-    (lever.supported ? 2 : 0) +
-    (lever.blocker ? 0 : 2) -
-    lever.moves +
-    ('cdef'.includes(lever.against.charAt(0)) ? 2 : 0);
-  coming.sort((a, b) => worth(b) - worth(a) || (a.pawn < b.pawn ? -1 : 1));
-  facts.push(...coming.slice(0, 3));
-}
-
-const WING_FILES = { queenside: 'abc', centre: 'de', kingside: 'fgh' } as const;
-
-function pawnsOnWing(values: ReadingValues, side: Side, wing: keyof typeof WING_FILES): Square[] {
-  return values.pawns[side].pawns.filter((square) => WING_FILES[wing].includes(fileName(fileOf(square))));
-}
-
-function minority(values: ReadingValues, side: Side, facts: StructureFact[]): void {
-  for (const { wing, lever } of values.pawns[side].minorityAttacks) {
-    const [pawn, on, against] = [squareName(lever.from), squareName(lever.on), squareName(lever.against)];
-    facts.push({
-      id: 'minority-attack',
-      side,
-      wing,
-      own: pawnsOnWing(values, side, wing).length,
-      enemy: pawnsOnWing(values, opponent(side), wing).length,
-      pawn,
-      on,
-      against,
-      squares: [pawn, on, against],
-      men: [pawn],
-    });
-  }
-}
-
-function majorities(values: ReadingValues, side: Side, facts: StructureFact[]): void {
-  const { majorities: wings, crippledMajorities, doubled: doubles } = values.pawns[side];
-  for (const wing of wings) {
-    const own = pawnsOnWing(values, side, wing);
-    const crippled = crippledMajorities.includes(wing);
-    const squares = namesInView(own, side);
-    const fact: Majority = {
-      id: crippled ? 'crippled-majority' : 'majority',
-      side,
-      wing,
-      own: own.length,
-      enemy: pawnsOnWing(values, opponent(side), wing).length,
-      doubled: crippled
-        ? namesInView(
-            own.filter((square) => doubles.includes(square)),
-            side,
-          )
-        : [],
-      squares,
-      men: squares,
-    };
-    if (!crippled || fact.doubled.length > 0) facts.push(fact);
-  }
 }
 
 function hanging({ side, hangingPawns }: PawnSideValue, facts: StructureFact[]): void {

@@ -28,7 +28,9 @@ export const FILES_PHRASES: Phrases<FilesFact> = {
   'half-open-target': ({ side, file, target, why, heavy }) => ({
     head: `The ${file}-file is half-open for ${name(side)} and bites on ${target}`,
     body: WHY[why],
-    more: [heavy.length > 0 ? `${capital(theMen(heavy))} ${heavy.length === 1 ? 'stands' : 'stand'} on the file` : null],
+    more: [
+      heavy.length > 0 ? `${capital(theMen(heavy))} ${heavy.length === 1 ? 'stands' : 'stand'} on the file` : null,
+    ],
   }),
   'half-open-nothing': ({ side, file, pawn, guards }) => ({
     head: `The ${file}-file is half-open for ${name(side)} and bites on nothing`,
@@ -44,7 +46,10 @@ export const FILES_PHRASES: Phrases<FilesFact> = {
   }),
   'on-seventh': ({ side, heavy, pawns }) => ({
     head: `${capital(theMen(heavy))} ${heavy.length === 1 ? 'stands' : 'stand'} on ${possessive(side)} seventh rank`,
-    body: pawns.length > 0 ? `${counted(pawns.length, 'enemy pawn')} ${pawns.length === 1 ? 'stands' : 'stand'} there too, on ${listed(pawns)}` : undefined,
+    body:
+      pawns.length > 0
+        ? `${counted(pawns.length, 'enemy pawn')} ${pawns.length === 1 ? 'stands' : 'stand'} there too, on ${listed(pawns)}`
+        : undefined,
   }),
   'to-seventh': ({ side, man, to, moves }) => ({
     head: `${capital(theMan(man))} can come to ${possessive(side)} seventh rank`,

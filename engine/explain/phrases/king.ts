@@ -22,12 +22,21 @@ export const KING_PHRASES: Phrases<KingFact> = {
       .join(', and '),
   }),
   'no-luft': ({ king, noFlight, gives }) => {
-    const moves = listed(gives.map(({ from, to }) => `${from}-${to}`), 'or');
+    const moves = listed(
+      gives.map(({ from, to }) => `${from}-${to}`),
+      'or',
+    );
     return noFlight
-      ? { head: `The king on ${king} has no flight square`, body: gives.length > 0 ? `${moves} gives it the first` : undefined }
+      ? {
+          head: `The king on ${king} has no flight square`,
+          body: gives.length > 0 ? `${moves} gives it the first` : undefined,
+        }
       : {
           head: `The king on ${king} has no luft`,
-          body: gives.length > 0 ? `it cannot leave its back rank, and ${moves} gives it a square` : 'it cannot leave its back rank',
+          body:
+            gives.length > 0
+              ? `it cannot leave its back rank, and ${moves} gives it a square`
+              : 'it cannot leave its back rank',
         };
   },
   'no-flight': ({ king }) => ({
@@ -35,8 +44,11 @@ export const KING_PHRASES: Phrases<KingFact> = {
     body: 'every square around it is taken or attacked',
   }),
   'open-line-beside-king': ({ side, king, files, heavy }) => ({
-head: `No ${enemyOf(side)} pawn closes the ${filesNamed(files)} beside the king on ${king}`,
-    body: heavy.length > 0 ? `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there already` : `${enemyName(side)} has a rook or queen left to use ${files.length === 1 ? 'it' : 'them'}`,
+    head: `No ${enemyOf(side)} pawn closes the ${filesNamed(files)} beside the king on ${king}`,
+    body:
+      heavy.length > 0
+        ? `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there already`
+        : `${enemyName(side)} has a rook or queen left to use ${files.length === 1 ? 'it' : 'them'}`,
   }),
   'king-zone': ({ side, king, attackers, guards }) => ({
     head: `${capital(inWords(attackers.length))} ${enemyOf(side)} men bear on the squares round the king on ${king}`,

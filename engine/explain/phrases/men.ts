@@ -12,7 +12,10 @@ function placed({ id, side, man, safeMoves, most, enemyHalf, toCentre: centre }:
   return id === 'best-placed'
     ? {
         head: `${capital(theMan(man))} is ${possessive(side)} best placed man`,
-        body: enemyHalf > 0 ? `${share}, and it attacks ${counted(enemyHalf, 'square')} in ${enemyName(side)}’s half` : share,
+        body:
+          enemyHalf > 0
+            ? `${share}, and it attacks ${counted(enemyHalf, 'square')} in ${enemyName(side)}’s half`
+            : share,
       }
     : {
         head: `${capital(theMan(man))} is ${possessive(side)} worst placed man`,
@@ -52,7 +55,9 @@ export const MEN_PHRASES: Phrases<MenFact> = {
   }),
   trapped: ({ man, attacked }) => ({
     head: `${capital(theMan(man))} is trapped`,
-    body: attacked ? 'it is attacked and has no safe square' : 'a pawn can attack it in one move, and it has no safe square',
+    body: attacked
+      ? 'it is attacked and has no safe square'
+      : 'a pawn can attack it in one move, and it has no safe square',
   }),
   pinned: ({ man, pinner, king }) => ({
     head: `${capital(theMan(man))} is pinned`,
@@ -72,7 +77,10 @@ export const MEN_PHRASES: Phrases<MenFact> = {
   }),
   'en-prise': ({ man, side, gain, worth }) => ({
     head: `${capital(theMan(man))} is en prise`,
-    body: gain === worth ? `${enemyName(side)} can take it for nothing` : `${enemyName(side)} gains ${counted(gain, 'pawn')}’${gain === 1 ? 's' : ''} worth by taking it`,
+    body:
+      gain === worth
+        ? `${enemyName(side)} can take it for nothing`
+        : `${enemyName(side)} gains ${counted(gain, 'pawn')}’${gain === 1 ? 's' : ''} worth by taking it`,
   }),
   'bishop-pair': ({ side }) => ({
     head: `${name(side)} has the bishop pair`,
@@ -93,4 +101,3 @@ export const MEN_PHRASES: Phrases<MenFact> = {
     body: `${theMen(by)} ${by.length === 1 ? 'takes' : 'take'} every square it could go to`,
   }),
 };
-

@@ -4,7 +4,7 @@ import type { Phrase, Phrases } from '../phrase';
 import { capital, comersSentence, counted, enemyName, enemyOf, inWords, listed, name, theMan } from '../words';
 
 /** Who uses a weak square, in a sentence. */
-function use({ side, occupant, comers, commandedByEnemy, enemyKnights }: WeakSquareFact): string | null {
+function usage({ side, occupant, comers, commandedByEnemy, enemyKnights }: WeakSquareFact): string | null {
   if (occupant) return `${capital(theMan(occupant))} stands there`;
   return (
     comersSentence(comers, enemyOf(side), enemyKnights) ?? (commandedByEnemy ? `${enemyName(side)} commands it` : null)
@@ -14,7 +14,7 @@ function use({ side, occupant, comers, commandedByEnemy, enemyKnights }: WeakSqu
 function weak(fact: WeakSquareFact): Phrase {
   const { id, square, side, stopped } = fact;
   if (id === 'weak-for-good' || !stopped) {
-    return { head: `${square} is weak for good`, body: `no ${side} pawn can guard it any more`, more: [use(fact)] };
+    return { head: `${square} is weak for good`, body: `no ${side} pawn can guard it any more`, more: [usage(fact)] };
   }
   const reason =
     stopped.by === 'ram'
@@ -23,7 +23,7 @@ function weak(fact: WeakSquareFact): Phrase {
   return {
     head: `${square} is weak as the pawns stand`,
     body: `the pawn on ${stopped.pawn} that could guard it ${reason}`,
-    more: [use(fact)],
+    more: [usage(fact)],
   };
 }
 

@@ -110,9 +110,9 @@ export const STRUCTURE_PHRASES: Phrases<StructureFact> = {
   }),
   'lever-ready': lever,
   'lever-coming': lever,
-  'minority-attack': ({ side, wing, own, enemy, pawn, on, against }) => ({
+  'minority-attack': ({ side, wing, own, enemy, pawn, on, against, moves }) => ({
     head: `${name(side)} has a minority attack on the ${wing}`,
-    body: `${inWords(own)} ${own === 1 ? 'pawn' : 'pawns'} against ${inWords(enemy)}, and ${pawn}-${on} strikes at ${against}`,
+    body: `${inWords(own)} ${own === 1 ? 'pawn' : 'pawns'} against ${inWords(enemy)}, and ${moves === 0 ? `${pawn} strikes at ${against} now` : `the pawn from ${pawn} strikes at ${against} from ${on}, ${counted(moves, 'move')} away`}`,
   }),
   majority,
   'crippled-majority': majority,
