@@ -5,7 +5,7 @@
  * cheapest. One 32-bit mask holds a side, which is why the door admits no more than 32 men of one.
  * Attackers are those of the Laws of Chess (FIDE, article 3.1): a pinned man still attacks.
  */
-import { EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, NEIGHBOURS, type Position, RAY_ROW, RAYS, STRIDES } from '../board';
+import { EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, OPPOSITE, type Position, RAY_ROW, RAYS, STRIDES } from '../board';
 
 /** Places of the kinds in a man's code (`code & 7`). */
 export const PAWN = 1;
@@ -145,32 +145,47 @@ function markLines(
   }
 }
 
+/**
+ * Squares in the order in which a direction's lines are filled: each line from its far end back, so that the last
+ * man passed is the first man met. Row (direction << 6); a square that begins a line is marked by FRESH.
+ */
+const FRESH = 64;
+const FILL_ORDER: Readonly<Uint8Array> = (() => {
+  const order = new Uint8Array(512);
+  for (let direction = 0; direction < 8; direction++) {
+    let at = direction << 6;
+    const back = OPPOSITE[direction]!;
+    for (let start = 0; start < 64; start++) {
+      if (EDGES[(start << 3) | direction] !== start) continue;
+      order[at++] = start | FRESH;
+      for (let square = start; square !== EDGES[(start << 3) | back]; ) {
+        square += STRIDES[back]!;
+        order[at++] = square;
+      }
+    }
+  }
+  return order;
+})();
+
 /** The table of first men in every direction, filled on first use: entry (square << 3 | direction), -1 where there is none. */
 export function firstMen(map: AttackMap): Readonly<Int8Array> {
-  if (map.lined) return map.lines;
-  const { board, lines } = map;
-  // North, east and the two directions that go up are filled from the top, the others from the bottom.
-  for (let square = 63; square >= 0; square--) {
-    const row = square << 3;
-    fillFirstMan(board, lines, row);
-    fillFirstMan(board, lines, row | 2);
-    fillFirstMan(board, lines, row | 4);
-    fillFirstMan(board, lines, row | 7);
-  }
-  for (let square = 0; square < 64; square++) {
-    const row = square << 3;
-    fillFirstMan(board, lines, row | 1);
-    fillFirstMan(board, lines, row | 3);
-    fillFirstMan(board, lines, row | 5);
-    fillFirstMan(board, lines, row | 6);
-  }
-  map.lined = true;
-  return lines;
+  if (!map.lined) fillLines(map);
+  return map.lines;
 }
 
-function fillFirstMan(board: Readonly<Uint8Array>, lines: Int8Array, entry: number): void {
-  const next = NEIGHBOURS[entry]!;
-  lines[entry] = next < 0 ? -1 : board[next] !== 0 ? next : lines[(next << 3) | (entry & 7)]!;
+function fillLines(map: AttackMap): void {
+  const { board, lines } = map;
+  for (let direction = 0; direction < 8; direction++) {
+    let first = -1;
+    for (let at = direction << 6, end = at + 64; at < end; at++) {
+      const entry = FILL_ORDER[at]!;
+      if (entry >= FRESH) first = -1;
+      const square = entry & 63;
+      lines[(square << 3) | direction] = first;
+      if (board[square] !== 0) first = square;
+    }
+  }
+  map.lined = true;
 }
 
 /** Whether a man's code moves along a direction of the rook (0 to 3) or bishop (4 to 7). */

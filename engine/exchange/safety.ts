@@ -83,7 +83,9 @@ function aim(safety: Safety, from: number): void {
   for (let direction = 0; direction < 8; direction++) {
     const back = OPPOSITE[direction]!;
     for (let at = lines[(from << 3) | back]!; at >= 0; at = lines[(at << 3) | back]!) {
-      if (slidesAlong(map.board[at]!, back)) uncovers |= 1 << direction;
+      if (!slidesAlong(map.board[at]!, back)) continue;
+      uncovers |= 1 << direction;
+      break;
     }
   }
   safety.from = from;

@@ -55,43 +55,43 @@ interface Weighed {
   readonly theme: Theme;
   readonly fact: Fact;
   readonly weight: number;
-  readonly key: string;
+  /** Breaks ties: see `tieOrder`. */
+  readonly order: number;
 }
 
 /** Everything that is said of a position. */
 export function explain(values: ReadingValues): Explanation {
+  const mover = values.position.sideToMove;
   const weighed: Weighed[] = [];
   for (const theme of THEMES) {
-    for (const fact of GATHER[theme](values)) weighed.push({ theme, fact, weight: weightOf(fact), key: keyOf(fact) });
+    for (const fact of GATHER[theme](values)) {
+      weighed.push({ theme, fact, weight: weightOf(fact), order: tieOrder(fact, mover) });
+    }
   }
-  const mover = values.position.sideToMove;
-  weighed.sort(
-    (a, b) =>
-      b.weight - a.weight ||
-      sideOrder(a.fact, mover) - sideOrder(b.fact, mover) ||
-      viewOrder(a.fact) - viewOrder(b.fact),
-  );
+  weighed.sort((a, b) => b.weight - a.weight || a.order - b.order);
   const statements = withoutRepeats(weighed).map(statement);
   return { statements, lead: leading(statements) };
 }
 
-function keyOf({ id, side, men, squares }: Fact): string {
-  return [id, side ?? 'both', ...men, '-', ...squares]
-    .join('.')
-    .replace(/\.-\.?$/, '')
-    .replace('.-.', '-');
-}
-
-function sideOrder({ side }: Fact, mover: Side): number {
-  return side === mover ? 0 : side === null ? 1 : 2;
-}
-
-/** Order by the first square as the fact's side sees it, so that turning colours and board turns nothing else. */
-function viewOrder({ squares, men, side }: Fact): number {
+/**
+ * Among equals the side to move comes first, then by the first square as the fact's side sees it, so that turning
+ * colours and board turns nothing else.
+ */
+function tieOrder({ squares, men, side }: Fact, mover: Side): number {
+  const sideOrder = side === mover ? 0 : side === null ? 1 : 2;
   const first = squares[0] ?? men[0];
-  if (!first) return 0;
-  const rank = Number(first.charAt(1));
-  return first.charCodeAt(0) * 10 + (side === 'black' ? 9 - rank : rank);
+  if (!first) return sideOrder * 10000;
+  const rank = first.charCodeAt(1) - 48;
+  return sideOrder * 10000 + first.charCodeAt(0) * 10 + (side === 'black' ? 9 - rank : rank);
+}
+
+/** Names the statement among the others: what it says, of whom, about which men and squares. */
+function keyOf({ id, side, men, squares }: Fact): string {
+  let key = side === null ? id : `${id}.${side}`;
+  for (const man of men) key += `.${man}`;
+  key += '-';
+  for (const square of squares) key += `${square}.`;
+  return key.slice(0, -1);
 }
 
 /** Drops what an outpost's sentence says better, and all but the heaviest of a kind. */
@@ -102,22 +102,30 @@ function withoutRepeats(weighed: readonly Weighed[]): Weighed[] {
     if (fact.id === 'outpost-taken') posts.add(fact.man.square);
   }
   const counts = new Map<string, number>();
-  const keys = new Set<string>();
-  return weighed.filter(({ fact, key }) => {
+  return weighed.filter(({ fact }) => {
     if ((fact.id === 'weak-for-good' || fact.id === 'weak-while-fixed') && posts.has(fact.square)) return false;
-    if (keys.has(key)) return false;
-    keys.add(key);
-    const kind = `${fact.id}.${fact.side}`;
+    const kind = fact.side === 'black' ? `-${fact.id}` : fact.id;
     const count = (counts.get(kind) ?? 0) + 1;
     counts.set(kind, count);
     return count <= MOST_OF_A_KIND;
   });
 }
 
-function statement({ theme, fact, weight, key }: Weighed): StatementValue {
+function statement({ theme, fact, weight }: Weighed): StatementValue {
   const { id, side, squares, men, ...facts } = fact;
   const phrase = phraseOf(fact);
-  return { key, id, theme, side, weight, head: phrase.head, text: phraseText(phrase), squares, men, facts };
+  return {
+    key: keyOf(fact),
+    id,
+    theme,
+    side,
+    weight,
+    head: phrase.head,
+    text: phraseText(phrase),
+    squares,
+    men,
+    facts,
+  };
 }
 
 function leading(statements: readonly StatementValue[]): string[] {

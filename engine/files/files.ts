@@ -1,6 +1,6 @@
 /** Files: open or not, who controls them, where they lead in and what they aim at. */
 import { type AttackMap, QUEEN, ROOK, type SideIndex } from '../attacks';
-import { fileOf, manCode, relativeRank, squareAt } from '../board';
+import { fileOf, manCode, relativeRank } from '../board';
 import { isSafeHere, type Safety } from '../exchange';
 import type { PawnReading, PawnValues } from '../pawns';
 import type { Reach } from '../reach';
@@ -72,14 +72,15 @@ function fileValue(safety: Safety, pawns: PawnValues, reach: Reach, file: number
   };
 }
 
+const FILE_SQUARES: BySide<readonly (readonly Square[])[]> = bySide((side) =>
+  [0, 1, 2, 3, 4, 5, 6, 7].map((file) =>
+    [0, 1, 2, 3, 4, 5, 6, 7].map((rank) => ((side === 'white' ? rank : 7 - rank) * 8 + file) as Square),
+  ),
+);
+
 /** Squares of a file from the side's first rank to its eighth. */
-function squaresAlong(side: Side, file: number): Square[] {
-  const squares: Square[] = [];
-  for (let rank = 0; rank < 8; rank++) {
-    const square = squareAt(file, side === 'white' ? rank : 7 - rank);
-    if (square !== undefined) squares.push(square);
-  }
-  return squares;
+function squaresAlong(side: Side, file: number): readonly Square[] {
+  return FILE_SQUARES[side][file] ?? [];
 }
 
 function heavyOn(map: AttackMap, side: Side, file: number): Square[] {

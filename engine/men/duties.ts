@@ -1,6 +1,6 @@
 /** Duties: what falls if a man leaves its square. */
 import { type AttackMap, firstMen, KING, type SideIndex, slidesAlong } from '../attacks';
-import { DIRECTION_TO } from '../board';
+import { OPPOSITE } from '../board';
 import { lossOn } from '../exchange';
 import type { SquareTable } from '../squares';
 import type { Square } from '../types';
@@ -14,38 +14,58 @@ export interface Duty {
   readonly by: 'guard' | 'screen';
 }
 
+const NONE: readonly Duty[] = [];
+
 /**
  * The duties of the man on a square: friendly men (kings apart) on which the enemy would gain more by capturing
  * if this man were off the board. It guards them, directly or from behind, or it shuts an enemy slider's line.
  */
-export function dutiesOf(map: AttackMap, table: SquareTable, from: Square): Duty[] {
+export function dutiesOf(map: AttackMap, table: SquareTable, from: Square): readonly Duty[] {
   const side = (map.board[from]! >> 3) as SideIndex;
-  const enemy = side ^ 1;
+  const enemyRow = (side ^ 1) << 6;
   const number = map.numbers[from]!;
-  const duties: Duty[] = [];
+  let duties: Duty[] | null = null;
   for (let other = 0; other < map.counts[side]!; other++) {
     const square = map.squares[(side << 5) | other]!;
-    const place = map.board[square]! & 7;
-    if (square === from || place === KING) continue;
+    if (map.attackers[enemyRow | square] === 0 || square === from) continue;
     const entry = (side << 6) | square;
-    const guards = ((map.attackers[entry]! | table.behind[entry]!) >>> number) & 1;
-    const screens = guards === 0 && shutsLine(map, side, from, square);
-    if (!screens && (guards === 0 || map.attackers[(enemy << 6) | square] === 0)) continue;
-    const now = Math.max(0, table.exchanges[(enemy << 6) | square]!);
-    const loses = lossOn(map, side, place, square, from) - now;
-    if (loses > 0) duties.push({ square: square as Square, loses, by: screens ? 'screen' : 'guard' });
+    if ((((map.attackers[entry]! | table.behind[entry]!) >>> number) & 1) === 0) continue;
+    duties = withDuty(duties, map, table, side, from, square, 'guard');
   }
-  return duties.length > 1 ? duties.sort((a, b) => a.square - b.square) : duties;
+  const lines = firstMen(map);
+  for (let direction = 0; direction < 8; direction++) {
+    const slider = lines[(from << 3) | direction]!;
+    if (slider < 0 || map.board[slider]! >> 3 === side || !slidesAlong(map.board[slider]!, direction)) continue;
+    const square = lines[(from << 3) | OPPOSITE[direction]!]!;
+    if (square < 0 || map.board[square]! >> 3 !== side) continue;
+    const entry = (side << 6) | square;
+    if ((((map.attackers[entry]! | table.behind[entry]!) >>> number) & 1) === 1) {
+      // A guard that also shuts a line is weighed above already, unless nothing attacks the square yet.
+      if (map.attackers[enemyRow | square] !== 0) continue;
+    }
+    duties = withDuty(duties, map, table, side, from, square, 'screen');
+  }
+  return duties === null ? NONE : duties.sort((a, b) => a.square - b.square);
 }
 
-/** Whether the man on `from` is the first from the square on its line and an enemy slider stands next behind it. */
-function shutsLine(map: AttackMap, side: SideIndex, from: number, square: number): boolean {
-  const direction = DIRECTION_TO[(square << 6) | from]!;
-  if (direction < 0) return false;
-  const lines = firstMen(map);
-  if (lines[(square << 3) | direction] !== from) return false;
-  const slider = lines[(from << 3) | direction]!;
-  return slider >= 0 && map.board[slider]! >> 3 !== side && slidesAlong(map.board[slider]!, direction);
+function withDuty(
+  duties: Duty[] | null,
+  map: AttackMap,
+  table: SquareTable,
+  side: SideIndex,
+  from: number,
+  square: number,
+  by: Duty['by'],
+): Duty[] | null {
+  const place = map.board[square]! & 7;
+  if (place === KING) return duties;
+  const now = Math.max(0, table.exchanges[((side ^ 1) << 6) | square]!);
+  const loses = lossOn(map, side, place, square, from) - now;
+  if (loses <= 0) return duties;
+  const duty: Duty = { square: square as Square, loses, by };
+  if (duties === null) return [duty];
+  duties.push(duty);
+  return duties;
 }
 
 /**

@@ -1,13 +1,23 @@
 /** One man and what it can do from where it stands. */
 import { type AttackMap, attackersOf, isPinned, KING, kindOn, PAWN, type SideIndex, sideOn } from '../attacks';
-import { fileOf, type Position, SQUARES } from '../board';
+import { bitCount, fileOf, type Position } from '../board';
 import { isSafeMove, lossOn, type Safety, worthOf } from '../exchange';
 import { type PawnMap, pawnReach } from '../pawns';
 import type { Reach } from '../reach';
 import type { OutpostValue, SquareTable } from '../squares';
-import { type Kind, opponent, type Side, type Square } from '../types';
+import { type BySide, bySide, type Kind, opponent, type Side, type Square } from '../types';
 import { type Duty, dutiesOf, isOverloaded } from './duties';
-import { fillAttacked, fillMovesOf, newWords, squaresOfWords, type Words } from './moves';
+import {
+  addSquare,
+  countAhead,
+  fillAttacked,
+  fillMovesOf,
+  hasSquare,
+  newWords,
+  squaresOfWords,
+  type Words,
+  wordsOfMen,
+} from './moves';
 
 /** Traits with names. Each is said of a man where its definition below holds. */
 export const NOTES = [
@@ -66,23 +76,36 @@ export interface MenContext {
 /** All men of the position in square order; `bishops` says which bishops are bad. */
 export function manValues(context: MenContext, bishops: ReadonlyMap<Square, Note>): ManValue[] {
   const { map, outposts } = context;
-  const posts = new Set<Square>();
-  for (const post of outposts) if (post.rank === 'outpost' && post.occupant !== null) posts.add(post.occupant);
-  return SQUARES.filter((square) => map.board[square] !== 0).map((square) =>
-    manValue(context, square, bishops.get(square), posts.has(square)),
-  );
+  const posts = newWords();
+  for (const { rank, occupant } of outposts) if (rank === 'outpost' && occupant !== null) addSquare(posts, occupant);
+  const own = bySide((side) => wordsOfMen(map, side));
+  const values: ManValue[] = [];
+  for (let square = 0; square < 64; square++) {
+    if (map.board[square] === 0) continue;
+    const at = square as Square;
+    values.push(manValue(context, at, bishops.get(at), hasSquare(posts, at), own));
+  }
+  return values;
 }
 
 const words: Words = newWords();
 
-function manValue(context: MenContext, square: Square, bishop: Note | undefined, onOutpost: boolean): ManValue {
+function manValue(
+  context: MenContext,
+  square: Square,
+  bishop: Note | undefined,
+  onOutpost: boolean,
+  own: BySide<Words>,
+): ManValue {
   const { map, position, safety, table } = context;
   const code = map.board[square]!;
   const index = (code >> 3) as SideIndex;
   const side = sideOn(map, square) ?? 'white';
   const kind = kindOn(map, square);
   fillAttacked(map.board, code, square, square, words);
-  const seen = squaresOfWords(words);
+  const sees = bitCount(words[0]!) + bitCount(words[1]!);
+  const seesAhead = countAhead(words, side, square);
+  const seesOnlyOwn = ((words[0]! & ~own[side][0]!) | (words[1]! & ~own[side][1]!)) === 0;
   fillMovesOf(map, position, square, words);
   const moves = squaresOfWords(words);
   const safeMoves = moves.filter((to) => isSafeMove(safety, square, to));
@@ -104,16 +127,15 @@ function manValue(context: MenContext, square: Square, bishop: Note | undefined,
   if (kind !== 'king' && defenders.length === 0) notes.push('loose');
   if (enPrise > 0) notes.push('en-prise');
   if (isPiece && isOutOfPlay(side, square, safeMoves.length, movesToCentre)) notes.push('out-of-play');
-  if (isPiece && moves.length === 0 && !pinned && seen.every((to) => sideOn(map, to) === side))
-    notes.push('blocked-in');
+  if (isPiece && !pinned && seesOnlyOwn) notes.push('blocked-in');
   return {
     square,
     side,
     kind,
     moves,
     safeMoves,
-    sees: seen.length,
-    seesAhead: seen.filter((to) => (side === 'white' ? to >> 3 > square >> 3 : to >> 3 < square >> 3)).length,
+    sees,
+    seesAhead,
     pinned,
     enPrise,
     attackers,

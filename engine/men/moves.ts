@@ -2,6 +2,7 @@
 import { type AttackMap, isPinned, KING, KNIGHT, PAWN } from '../attacks';
 import {
   ahead,
+  bitCount,
   DIRECTION_TO,
   EDGES,
   KING_STEPS,
@@ -24,6 +25,35 @@ export function newWords(): Words {
 
 function add(words: Words, square: number): void {
   words[square >> 5]! |= 1 << (square & 31);
+}
+
+/** Adds a square to the words. */
+export function addSquare(words: Words, square: Square): void {
+  add(words, square);
+}
+
+/** Whether the square is in the words. */
+export function hasSquare(words: Words, square: Square): boolean {
+  return ((words[square >> 5]! >>> (square & 31)) & 1) === 1;
+}
+
+/** Squares of all men of a side. */
+export function wordsOfMen(map: AttackMap, side: Side): Words {
+  const words = newWords();
+  const row = side === 'white' ? 0 : 32;
+  for (let number = 0; number < map.counts[row >> 5]!; number++) add(words, map.squares[row | number]!);
+  return words;
+}
+
+/** Squares of the words on ranks ahead of a square, as the side sees it. */
+export function countAhead(words: Words, side: Side, square: Square): number {
+  let count = 0;
+  for (let rank = 0; rank < 8; rank++) {
+    if (side === 'white' ? rank > square >> 3 : rank < square >> 3) {
+      count += bitCount((words[rank >> 2]! >>> ((rank & 3) << 3)) & 0xff);
+    }
+  }
+  return count;
 }
 
 /** The squares of two words, a1 first. */

@@ -3,8 +3,8 @@
  *
  * An outpost is safe from pawns for good (`permanent`, or `fixed` while the pawns that could come are
  * stopped) and has a pawn's support now or in one move; so Nimzowitsch, My System (from memory), who asks for
- * pawn support, but not his open file. All else is an advanced post. Squares on which a pawn stands are no
- * homes and are left out. On the 7th rank no pawn can ever challenge: a square there is listed, as `deep`,
+ * pawn support, but not his open file. All else is an advanced post, listed where a man of
+ * the side stands on it or can come within three moves. Squares on which a pawn stands are no homes and are left out. On the 7th rank no pawn can ever challenge: a square there is listed, as `deep`,
  * where a pawn supports it now or in one move; the others are entry squares and belong to the files.
  */
 import { KNIGHT } from '../attacks';
@@ -62,10 +62,14 @@ function outpost(
   const enemy = opponent(side);
   const hold = pawnHold(pawns, enemy, square);
   if (hold === 'attacked') return null;
+  const own = code !== 0 && code >> 3 === (side === 'white' ? 0 : 1);
+  const users = usersOf(reach, side, square);
+  const inUse = own || users.length > 0;
+  // What nobody can use and no pawn can make an outpost is not listed at all.
+  if (!inUse && hold === 'open') return null;
   const { soonest } = pawnReach(pawns, side, square);
   const supported = soonest !== null && soonest.moves <= 1;
-  if (rank === 7 && !supported) return null;
-  const own = code !== 0 && code >> 3 === (side === 'white' ? 0 : 1);
+  if (!supported && (rank === 7 || !inUse)) return null;
   return {
     square,
     side,
@@ -75,7 +79,7 @@ function outpost(
     challenge: hold === 'open' ? pawnReach(pawns, enemy, square).soonest : null,
     support: soonest && { pawn: soonest.from, moves: soonest.moves },
     occupant: own ? square : null,
-    users: usersOf(reach, side, square),
+    users,
     tradable: challengers.bishops[colourOf(square)] || challengers.knights[square] === 1,
   };
 }

@@ -7,7 +7,7 @@ import { type Kind, opponent, type Side, SIDES, type Square, WORTH } from '../..
 import type { MenFact, PlacedMan } from '../facts/men';
 import type { ReadingValues } from '../values';
 import { inView } from '../words';
-import { countOf, manAt } from './names';
+import { countOf, manAt, namesInView } from './names';
 
 /** Most moves of each kind on an empty board: the handbooks' table. */
 const MOST: Partial<Record<Kind, number>> = { knight: 8, bishop: 13, rook: 14, queen: 27 };
@@ -27,7 +27,8 @@ export function menFacts(values: ReadingValues): MenFact[] {
 }
 
 function oneMan(values: ReadingValues, value: ManValue, facts: MenFact[]): void {
-  const { side, square, kind, notes } = value;
+  const { side, square, kind, notes, duties } = value;
+  if (notes.length === 0 && duties.length === 0) return;
   const man = manAt(values, square);
   const base = { side, man, squares: [man.square], men: [man.square] };
   const isPiece = kind !== 'pawn' && kind !== 'king';
@@ -39,39 +40,38 @@ function oneMan(values: ReadingValues, value: ManValue, facts: MenFact[]): void 
     facts.push({ ...base, id: 'knight-on-rim', square: man.square, sees: value.sees });
   }
   if (value.pinned) pinned(values, value, facts);
-  const guarded = value.duties.filter(({ by }) => by === 'guard');
-  if (notes.includes('overloaded')) {
-    const wards = inView(
-      guarded.map((duty) => squareName(duty.square)),
-      side,
-    ).slice(0, 2);
-    const guards = wards.map((name) =>
-      manAt(values, guarded.find((duty) => squareName(duty.square) === name)?.square ?? square),
-    );
-    facts.push({ ...base, id: 'overloaded', guards, squares: wards });
-  } else if (isPiece && value.duties.length > 0) {
-    const [duty] = [...value.duties].sort(
-      (a, b) =>
-        b.loses - a.loses ||
-        fileOf(a.square) - fileOf(b.square) ||
-        relativeRank(a.square, side) - relativeRank(b.square, side),
-    );
-    if (duty) {
-      const ward = manAt(values, duty.square);
-      facts.push({
-        ...base,
-        id: 'tied',
-        ward,
-        loses: duty.loses,
-        by: duty.by,
-        squares: [ward.square],
-        men: [man.square, ward.square],
-      });
-    }
+  if (notes.includes('overloaded')) overloaded(values, value, facts);
+  else if (isPiece && duties.length > 0) tied(values, value, facts);
+  const loose = isPiece && value.defenders.length === 0 && value.enPrise === 0;
+  if (loose && relativeRank(square, side) >= 4) facts.push({ ...base, id: 'loose' });
+}
+
+function overloaded(values: ReadingValues, { side, square, duties }: ManValue, facts: MenFact[]): void {
+  const man = manAt(values, square);
+  const guarded = duties.filter(({ by }) => by === 'guard');
+  const wards = namesInView(
+    guarded.map((duty) => duty.square),
+    side,
+  ).slice(0, 2);
+  const guards = wards.map((name) =>
+    manAt(values, guarded.find((duty) => squareName(duty.square) === name)?.square ?? square),
+  );
+  facts.push({ id: 'overloaded', side, man, guards, squares: wards, men: [man.square] });
+}
+
+/** Of several duties the dearest; of equals the first in its side's view. */
+function tied(values: ReadingValues, { side, square, duties }: ManValue, facts: MenFact[]): void {
+  let best = duties[0];
+  for (const duty of duties) {
+    if (!best || duty === best) continue;
+    const order = duty.loses - best.loses || fileOf(best.square) - fileOf(duty.square);
+    if (order > 0 || (order === 0 && relativeRank(duty.square, side) < relativeRank(best.square, side))) best = duty;
   }
-  if (isPiece && value.defenders.length === 0 && value.enPrise === 0 && relativeRank(square, side) >= 4) {
-    facts.push({ ...base, id: 'loose' });
-  }
+  if (!best) return;
+  const man = manAt(values, square);
+  const ward = manAt(values, best.square);
+  const men = [man.square, ward.square];
+  facts.push({ id: 'tied', side, man, ward, loses: best.loses, by: best.by, squares: [ward.square], men });
 }
 
 function pinned(values: ReadingValues, { square, side }: ManValue, facts: MenFact[]): void {

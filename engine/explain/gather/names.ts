@@ -24,7 +24,8 @@ export function namesInView(squares: readonly Square[], side: Side): SquareName[
 
 /** Users as facts hold them: soonest first, of those cheaper kinds first, then in the side's view. */
 export function comers(values: ReadingValues, users: readonly User[], side: Side): Comer[] {
-  const list = users.map(({ from, moves }) => ({ ...manAt(values, from), moves }));
+  const list = users.map(({ from, moves }) => ({ kind: kindOn(values.map, from), square: squareName(from), moves }));
+  if (list.length < 2) return list;
   const order = inView(
     list.map(({ square }) => square),
     side,
