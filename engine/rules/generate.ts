@@ -1,0 +1,123 @@
+/** Pseudo-legal moves of a scratch board, packed; legality is asked by making the move. */
+import { EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, PAWN_STRIKES, STRIDES, STRIKE_ROW } from '../board';
+import {
+  attacks,
+  BISHOP,
+  CASTLE_KING,
+  CASTLE_QUEEN,
+  DOUBLE,
+  inCheck,
+  KING,
+  KNIGHT,
+  make,
+  newUndo,
+  PASSING,
+  PAWN,
+  QUEEN,
+  ROOK,
+  type ScratchBoard,
+  unmake,
+} from './scratch-board';
+
+/** Writes the pseudo-legal moves of the side to move from `start` on; returns the end. */
+export function pseudoMoves(board: ScratchBoard, into: Int32Array, start: number): number {
+  const { men, side } = board;
+  let end = start;
+  for (let from = 0; from < 64; from++) {
+    const man = men[from]!;
+    if (man === 0 || man >> 3 !== side) continue;
+    const kind = man & 7;
+    if (kind === PAWN) end = pawnMoves(board, from, into, end);
+    else if (kind === KNIGHT || kind === KING) {
+      const table = kind === KNIGHT ? KNIGHT_LEAPS : KING_STEPS;
+      for (let at = from * LEAP_ROW, to = table[at]!; to >= 0; to = table[++at]!) {
+        if (men[to] === 0 || men[to]! >> 3 !== side) into[end++] = from | (to << 6);
+      }
+      if (kind === KING) end = castling(board, from, into, end);
+    } else {
+      for (let direction = kind === BISHOP ? 4 : 0; direction < (kind === ROOK ? 4 : 8); direction++) {
+        const edge = EDGES[(from << 3) | direction]!;
+        for (let to = from; to !== edge; ) {
+          to += STRIDES[direction]!;
+          if (men[to] !== 0 && men[to]! >> 3 === side) break;
+          into[end++] = from | (to << 6);
+          if (men[to] !== 0) break;
+        }
+      }
+    }
+  }
+  return end;
+}
+
+function pawnMoves({ men, side, passing }: ScratchBoard, from: number, into: Int32Array, start: number): number {
+  let end = start;
+  const stride = side === 0 ? 8 : -8;
+  const rank = from >> 3;
+  const lastBut = side === 0 ? 6 : 1;
+  const home = side === 0 ? 1 : 6;
+  const next = from + stride;
+  if (next < 0 || next > 63) return end;
+  if (men[next] === 0) {
+    end = advance(from, next, rank === lastBut, into, end);
+    if (rank === home && men[next + stride] === 0) into[end++] = from | ((next + stride) << 6) | (DOUBLE << 16);
+  }
+  const row = ((side << 6) | from) * STRIKE_ROW;
+  for (let at = row, to = PAWN_STRIKES[at]!; to >= 0; to = PAWN_STRIKES[++at]!) {
+    if (men[to] !== 0 && men[to]! >> 3 !== side) end = advance(from, to, rank === lastBut, into, end);
+    else if (to === passing && men[to] === 0) into[end++] = from | (to << 6) | (PASSING << 16);
+  }
+  return end;
+}
+
+function advance(from: number, to: number, promotes: boolean, into: Int32Array, start: number): number {
+  let end = start;
+  if (!promotes) {
+    into[end++] = from | (to << 6);
+    return end;
+  }
+  for (let place = QUEEN; place >= KNIGHT; place--) into[end++] = from | (to << 6) | (place << 12);
+  return end;
+}
+
+function castling(board: ScratchBoard, from: number, into: Int32Array, start: number): number {
+  const { men, side, rights } = board;
+  let end = start;
+  const home = side === 0 ? 4 : 60;
+  if (from !== home || (rights & (side === 0 ? 3 : 12)) === 0 || attacks(board, side ^ 1, from)) return end;
+  if (rights & (side === 0 ? 1 : 4) && men[from + 1] === 0 && men[from + 2] === 0 && !attacks(board, side ^ 1, from + 1)) {
+    into[end++] = from | ((from + 2) << 6) | (CASTLE_KING << 16);
+  }
+  if (
+    rights & (side === 0 ? 2 : 8) &&
+    men[from - 1] === 0 &&
+    men[from - 2] === 0 &&
+    men[from - 3] === 0 &&
+    !attacks(board, side ^ 1, from - 1)
+  ) {
+    into[end++] = from | ((from - 2) << 6) | (CASTLE_QUEEN << 16);
+  }
+  return end;
+}
+
+/** Moves of one depth after another, so that a search needs no lists of its own. */
+export class MoveStack {
+  readonly moves = new Int32Array(256 * 32);
+  readonly undo = Array.from({ length: 32 }, newUndo);
+}
+
+/** Number of legal move sequences of that depth (perft, the usual check of move generators). */
+export function countMoves(board: ScratchBoard, depth: number, stack: MoveStack = new MoveStack(), ply = 0): number {
+  if (depth === 0) return 1;
+  const start = ply * 256;
+  const end = pseudoMoves(board, stack.moves, start);
+  const undo = stack.undo[ply]!;
+  const { side } = board;
+  let count = 0;
+  for (let at = start; at < end; at++) {
+    const move = stack.moves[at]!;
+    make(board, move, undo);
+    if (!inCheck(board, side)) count += depth === 1 ? 1 : countMoves(board, depth - 1, stack, ply + 1);
+    unmake(board, move, undo);
+  }
+  return count;
+}
