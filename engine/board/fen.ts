@@ -91,7 +91,7 @@ function fieldsOf(text: string): Result<Fields, Faults> {
       ),
     ]);
   }
-  const isOperation = (word: string | undefined) => word !== undefined && /^[A-Za-z]\w*;?$/.test(word);
+  const isOperation = (word: string | undefined) => word !== undefined && /^[A-Za-z]\w+;?$/.test(word);
   if (half === undefined || (isOperation(half) && parts.length > 5))
     return ok([board, side, castling, enPassant, '0', '1']);
   if (full === undefined) {

@@ -53,6 +53,14 @@ export function relativeRank(square: Square, side: Side): number {
   return side === 'white' ? rankOf(square) + 1 : 8 - rankOf(square);
 }
 
+/**
+ * Order of squares that holds when colours and board are turned: by file, then by rank as the side counts it. Ties
+ * are broken by it, never by the square's number.
+ */
+export function viewOrder(square: Square, side: Side): number {
+  return (fileOf(square) << 3) | (relativeRank(square, side) - 1);
+}
+
 /** Letter of a file, 0 = a. */
 export function fileName(file: number): FileName {
   return FILES[file] as FileName;

@@ -79,10 +79,15 @@ export function explain(values: ReadingValues): Explanation {
  */
 function tieOrder({ squares, men, side }: Fact, mover: Side): number {
   const sideOrder = side === mover ? 0 : side === null ? 1 : 2;
-  const first = squares[0] ?? men[0];
-  if (!first) return sideOrder * 10000;
-  const rank = first.charCodeAt(1) - 48;
-  return sideOrder * 10000 + first.charCodeAt(0) * 10 + (side === 'black' ? 9 - rank : rank);
+  return (
+    sideOrder * 1_000_000 + placeInView(squares[0] ?? men[0], side ?? mover) * 1000 + placeInView(men[0], side ?? mover)
+  );
+}
+
+function placeInView(square: SquareName | undefined, side: Side): number {
+  if (!square) return 0;
+  const rank = square.charCodeAt(1) - 48;
+  return (square.charCodeAt(0) - 96) * 10 + (side === 'black' ? 9 - rank : rank);
 }
 
 /** Names the statement among the others: what it says, of whom, about which men and squares. */

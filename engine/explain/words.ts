@@ -27,8 +27,9 @@ export function counted(count: number, noun: string, plural = `${noun}s`): strin
   return `${inWords(count)} ${count === 1 ? noun : plural}`;
 }
 
-/** The same at the beginning of a sentence. */
+/** A text at the beginning of a sentence; a square's name stays as it is. */
 export function capital(text: string): string {
+  if (/^[a-h][1-8]/.test(text)) return text;
   return text.charAt(0).toUpperCase() + text.slice(1);
 }
 
@@ -84,6 +85,11 @@ export function theMen(men: readonly ManAt[]): string {
 function viewOrder(square: SquareName, side: Side): number {
   const rank = Number(square.charAt(1));
   return square.charCodeAt(0) * 10 + (side === 'white' ? rank : 9 - rank);
+}
+
+/** Which of two squares comes first in a side's view: see `viewOrder`. */
+export function compareInView(a: SquareName, b: SquareName, side: Side): number {
+  return viewOrder(a, side) - viewOrder(b, side);
 }
 
 /** Squares by file, then by rank as the side counts it: the same list when colours and board are turned. */

@@ -1,6 +1,6 @@
 /** Files: open or not, who controls them, where they lead in and what they aim at. */
 import { type AttackMap, QUEEN, ROOK, type SideIndex } from '../attacks';
-import { fileOf, manCode, relativeRank } from '../board';
+import { fileOf, manCode, relativeRank, viewOrder } from '../board';
 import { isSafeHere, type Safety } from '../exchange';
 import type { PawnReading, PawnValues } from '../pawns';
 import type { Reach } from '../reach';
@@ -140,8 +140,9 @@ function takerOf(map: AttackMap, { moves }: Reach, side: Side, file: number): Fi
     if (kind !== ROOK || fileOf(from) === file) continue;
     for (const to of squaresAlong(side, file)) {
       const needed = moves[((row | number) << 6) | to]!;
-      if (needed > 0 && map.board[to] === 0 && (best === null || needed < best.moves))
-        best = { rook: from, to, moves: needed };
+      if (needed <= 0 || map.board[to] !== 0 || (best !== null && needed > best.moves)) continue;
+      const isBetter = best === null || needed < best.moves || viewOrder(from, side) < viewOrder(best.rook, side);
+      if (isBetter) best = { rook: from, to, moves: needed };
     }
   }
   return best;

@@ -1,6 +1,6 @@
 /** The seventh rank: which heavy men stand on it and which can come. */
 import { type AttackMap, QUEEN, ROOK } from '../attacks';
-import { relativeRank } from '../board';
+import { relativeRank, viewOrder } from '../board';
 import type { Reach } from '../reach';
 import type { Side, Square } from '../types';
 
@@ -32,5 +32,8 @@ export function seventhRank(map: AttackMap, { moves }: Reach, side: Side): Seven
     }
     if (nearest) comers.push(nearest);
   }
-  return { there, comers: comers.sort((a, b) => a.moves - b.moves) };
+  return {
+    there,
+    comers: comers.sort((a, b) => a.moves - b.moves || viewOrder(a.from, side) - viewOrder(b.from, side)),
+  };
 }

@@ -5,7 +5,7 @@
  * outside its chain can be active.
  */
 import { BISHOP, firstMen } from '../attacks';
-import { colourOf, fileOf, relativeRank, SQUARES } from '../board';
+import { colourOf, fileOf, relativeRank, SQUARES, viewOrder } from '../board';
 import type { Lever, PawnReading, PawnValues } from '../pawns';
 import { hasBishop } from '../squares';
 import { opponent, type Side, type Square } from '../types';
@@ -112,14 +112,15 @@ function remedyOf(
 ): BishopRemedy {
   const rammers = fixed.filter((pawn) => pawn.rammed).map((pawn) => pawn.stop);
   const levers = pawns.levers.filter((lever) => lever.side === side && rammers.includes(lever.against));
-  levers.sort((a, b) => a.moves - b.moves);
+  levers.sort((a, b) => a.moves - b.moves || viewOrder(a.from, side) - viewOrder(b.from, side));
   const { map } = context;
   const row = ((side === 'white' ? 0 : 32) | map.numbers[square]!) << 6;
   const fixedSquares = fixed.map((pawn) => pawn.square);
   let outside: BishopRemedy['outside'] = null;
   for (const to of SQUARES) {
     const moves = context.reach.moves[row | to]!;
-    if (moves <= 0 || (outside && moves >= outside.moves)) continue;
+    if (moves <= 0 || (outside && moves > outside.moves)) continue;
+    if (outside && moves === outside.moves && viewOrder(to, side) > viewOrder(outside.square, side)) continue;
     if (isOutside(context, side, to, square, fixedSquares)) outside = { square: to, moves };
   }
   return { tradeable: hasBishop(map.board, opponent(side), colourOf(square)), lever: levers[0] ?? null, outside };

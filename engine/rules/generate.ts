@@ -84,7 +84,12 @@ function castling(board: ScratchBoard, from: number, into: Int32Array, start: nu
   let end = start;
   const home = side === 0 ? 4 : 60;
   if (from !== home || (rights & (side === 0 ? 3 : 12)) === 0 || attacks(board, side ^ 1, from)) return end;
-  if (rights & (side === 0 ? 1 : 4) && men[from + 1] === 0 && men[from + 2] === 0 && !attacks(board, side ^ 1, from + 1)) {
+  if (
+    rights & (side === 0 ? 1 : 4) &&
+    men[from + 1] === 0 &&
+    men[from + 2] === 0 &&
+    !attacks(board, side ^ 1, from + 1)
+  ) {
     into[end++] = from | ((from + 2) << 6) | (CASTLE_KING << 16);
   }
   if (

@@ -3,7 +3,15 @@ import type { CastlingRights, Position } from '../board';
 import { KINDS, type Side, type Square } from '../types';
 import { countMoves, pseudoMoves } from './generate';
 import type { Move } from './move';
-import { inCheck as boardInCheck, make, MOVES_MAX, newUndo, type ScratchBoard, scratchBoard, unmake } from './scratch-board';
+import {
+  inCheck as boardInCheck,
+  make,
+  MOVES_MAX,
+  newUndo,
+  type ScratchBoard,
+  scratchBoard,
+  unmake,
+} from './scratch-board';
 
 const SPECIALS = [null, 'double-step', 'en-passant', 'castle-king', 'castle-queen'] as const;
 

@@ -54,7 +54,9 @@ export function fromSan(position: Position, text: string): Result<Move, Fault> {
 /** Replays the main line of the first game of a PGN text. */
 export function replayPgn(text: string): Result<ReplayedGame, Fault> {
   if (text.length > PGN_LENGTH_MAX) {
-    return fail(fault('text', 'text-too-long', `The game has ${text.length} characters; up to ${PGN_LENGTH_MAX} are read.`));
+    return fail(
+      fault('text', 'text-too-long', `The game has ${text.length} characters; up to ${PGN_LENGTH_MAX} are read.`),
+    );
   }
   const chess = new Chess();
   try {

@@ -43,7 +43,9 @@ export function nameStructure(position: Position): StructureMatch | null {
   if (best === undefined) return null;
   const { model, symmetric, reversed } = best;
   const side = symmetric ? position.sideToMove : best.leader;
-  return { id: model.id, name: model.name, side, differs: bestDiffers, reversed, model };
+  // A structure that is alike for both is seen from the side to move.
+  const turned = symmetric ? side === 'black' : reversed;
+  return { id: model.id, name: model.name, side, differs: bestDiffers, reversed: turned, model };
 }
 
 function isBetter(

@@ -4,6 +4,7 @@ import type { Lever } from '../../pawns';
 import { opponent, type Side, type Square } from '../../types';
 import type { LeverFact, Majority, StructureFact } from '../facts/structure';
 import type { ReadingValues } from '../values';
+import { compareInView } from '../words';
 import { manAtOrNull, namesInView } from './names';
 
 /** Levers still to come, minority attacks and majorities of a side. */
@@ -62,7 +63,7 @@ function levers(values: ReadingValues, side: Side, facts: StructureFact[]): void
     (lever.blocker ? 0 : 2) -
     lever.moves +
     ('cdef'.includes(lever.against.charAt(0)) ? 2 : 0);
-  coming.sort((a, b) => worth(b) - worth(a) || (a.pawn < b.pawn ? -1 : 1));
+  coming.sort((a, b) => worth(b) - worth(a) || compareInView(a.pawn, b.pawn, side));
   facts.push(...coming.slice(0, 3));
 }
 

@@ -1,5 +1,5 @@
 /** Facts about pawns that hold in a position. */
-import { ahead, colourOf, fileName, fileOf, relativeRank, squareName } from '../../board';
+import { ahead, colourOf, fileName, fileOf, relativeRank, squareName, viewOrder } from '../../board';
 import { type PawnReading, type PawnSideValue, pawnOn, type Ram } from '../../pawns';
 import { commandOf } from '../../squares';
 import { structureLead } from '../../structures';
@@ -51,7 +51,9 @@ function named(values: ReadingValues, facts: StructureFact[]): void {
 /** The pairs of white and black pawns as names, the side to move first, by file. */
 function pairsOf({ position }: ReadingValues, list: readonly Ram[]): (readonly [SquareName, SquareName])[] {
   const mine = position.sideToMove;
-  return list.map((pair) => [squareName(pair[mine]), squareName(pair[opponent(mine)])] as const);
+  return [...list]
+    .sort((a, b) => viewOrder(a[mine], mine) - viewOrder(b[mine], mine))
+    .map((pair) => [squareName(pair[mine]), squareName(pair[opponent(mine)])] as const);
 }
 
 function centre(values: ReadingValues, facts: StructureFact[]): void {
@@ -69,8 +71,10 @@ function centre(values: ReadingValues, facts: StructureFact[]): void {
       (inCentre(lever.from) || inCentre(lever.against)),
   );
   if (tense.length > 0) {
+    tense.sort(
+      (a, b) => viewOrder(a.from, a.side) - viewOrder(b.from, b.side) || fileOf(a.against) - fileOf(b.against),
+    );
     const pairs = tense.map((lever) => [squareName(lever.from), squareName(lever.against)] as const);
-    pairs.sort((a, b) => (a.join() < b.join() ? -1 : 1));
     facts.push({ id: 'centre-tension', side: null, pairs, squares: [...new Set(pairs.flat())], men: [] });
     return;
   }
@@ -202,7 +206,7 @@ function islands({ pawns }: ReadingValues, facts: StructureFact[]): void {
 
 function rams(values: ReadingValues, facts: StructureFact[]): void {
   if (values.pawns.rams.length < 2) return;
-  const pairs = pairsOf(values, values.pawns.rams).sort((a, b) => (a[0] < b[0] ? -1 : 1));
+  const pairs = pairsOf(values, values.pawns.rams);
   const squares = inView(pairs.flat(), values.position.sideToMove);
   facts.push({ id: 'rams', side: null, pairs, squares, men: squares });
 }
