@@ -13,7 +13,10 @@ describe('legal moves are those of the libraries', () => {
     const wrong: string[] = [];
     for (const fen of realPositions(1500)) {
       const ours = legalMoves(positionOf(fen))
-        .map(({ from, to, promotion }) => `${squareName(from)}${squareName(to)}${promotion === 'knight' ? 'n' : (promotion?.charAt(0) ?? '')}`)
+        .map(
+          ({ from, to, promotion }) =>
+            `${squareName(from)}${squareName(to)}${promotion === 'knight' ? 'n' : (promotion?.charAt(0) ?? '')}`,
+        )
         .sort()
         .join();
       const theirs = new Chess(fen)
@@ -43,7 +46,10 @@ describe('attackers are those of the libraries', () => {
       for (const name of SQUARES) {
         const square = squareNamed(name);
         if (square === undefined) continue;
-        for (const [side, colour] of [['white', 'w'], ['black', 'b']] as const) {
+        for (const [side, colour] of [
+          ['white', 'w'],
+          ['black', 'b'],
+        ] as const) {
           const ours = attackersOf(map, side, square).map(squareName).sort().join();
           const theirs = chess.attackers(name, colour).sort().join();
           if (ours !== theirs) wrong.push(`${fen} ${name} ${side}: ${ours} for ${theirs}`);
@@ -61,7 +67,10 @@ describe('attackers are those of the libraries', () => {
       for (const name of SQUARES) {
         const square = squareNamed(name);
         if (square === undefined) continue;
-        for (const [side, colour] of [['white', 'w'], ['black', 'b']] as const) {
+        for (const [side, colour] of [
+          ['white', 'w'],
+          ['black', 'b'],
+        ] as const) {
           const ours = attackersOf(map, side, square).map(squareName).sort().join();
           const theirs = other.getAttacks(name, colour).sort().join();
           if (ours !== theirs) wrong.push(`${fen} ${name} ${side}: ${ours} for ${theirs}`);

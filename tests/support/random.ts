@@ -45,4 +45,3 @@ export function positionOf(fen: string): Position {
   if (!admitted.ok) throw new Error(`${fen}: ${admitted.fault[0].message}`);
   return admitted.value.position;
 }
-
