@@ -2,8 +2,10 @@
  * The small exact search: captures, promotions, checks and the answers to them, counting material alone.
  *
  * A side not in check may stop at any ply and keep what it has; in check it must find an answer. Quiet checks are
- * tried only by the side that began and only on its first plies (`checkPlies`). Within that the answer is
- * exact; when the nodes run out it says so. Figures are pawns by the trade's common table.
+ * tried only by the side that began and only on its first plies (`checkPlies`). On the first `quietPlies` plies
+ * every move is tried, so that a threat made by a quiet move is seen; there a side that would lose nothing by
+ * passing is not asked for more than that. Within these bounds the answer is exact; when the nodes run out it
+ * says so. Figures are pawns by the trade's common table.
  */
 import { worthOf } from '../exchange';
 import { isInCheck, isStruck, kings, lastTaken, men, play, type PlayedMove, setUp, takeBack } from './desk';
@@ -22,11 +24,15 @@ export interface Bounds {
   readonly nodesMax: number;
   /** Plies of the side that begins on which it may give quiet checks. */
   readonly checkPlies: number;
+  /** Plies on which all moves are tried; none unless said. */
+  readonly quietPlies?: number;
+  /** Gains and losses beyond this are not told apart; MATE unless said. */
+  readonly gainsMax?: number;
 }
 
 /** What a search found. */
 export interface Found {
-  /** Pawns that the side to move gains, 0 where it does best to leave everything alone; negative only when in check. */
+  /** Pawns that the side to move gains; negative where it loses whatever it does (in check, or with all moves tried). */
   readonly gains: number;
   /** The moves by which it does. */
   readonly line: readonly PlayedMove[];
@@ -37,41 +43,45 @@ export interface Found {
 
 const lines = new Int32Array(PLIES_MAX * PLIES_MAX);
 const lineEnds = new Uint8Array(PLIES_MAX);
+/** The last two quiet moves that refuted something on a ply: tried early, for they often do so again. */
+const refuters = new Int32Array(PLIES_MAX * 2);
 const run = { nodes: 0, nodesMax: 0, checkPlies: 0, gaveUp: false };
 
 /** Searches a board with the side (0 White, 1 Black) to move; `passedOver` is the en-passant square, -1 for none. */
-export function searchGain(
-  board: Readonly<Uint8Array>,
-  side: number,
-  { nodesMax, checkPlies }: Bounds,
-  passedOver = -1,
-): Found {
+export function searchGain(board: Readonly<Uint8Array>, side: number, bounds: Bounds, passedOver = -1): Found {
   setUp(board, passedOver);
   run.nodes = 0;
-  run.nodesMax = nodesMax;
-  run.checkPlies = checkPlies;
+  run.nodesMax = bounds.nodesMax;
+  run.checkPlies = bounds.checkPlies;
   run.gaveUp = false;
-  const gains = best(side, -MATE - 1, MATE + 1, 0);
+  refuters.fill(0);
+  const window = bounds.gainsMax ?? MATE;
+  const value = best(side, -window, window, bounds.quietPlies ?? 0, 0);
+  const gains = Math.max(-window, Math.min(window, value));
   return { gains, line: Array.from(lines.subarray(0, lineEnds[0])), complete: !run.gaveUp, nodes: run.nodes };
 }
 
-/** Gain of the side to move within the window, in pawns beyond what stands. */
-function best(side: number, alphaGiven: number, beta: number, ply: number): number {
+/** Gain of the side to move within the window, in pawns beyond what stands; `quiet` plies from here try every move. */
+function best(side: number, alphaGiven: number, beta: number, quiet: number, ply: number): number {
   let alpha = alphaGiven;
   lineEnds[ply] = 0;
   run.nodes++;
   const checked = isInCheck(side);
-  let found = checked ? -MATE : 0;
+  // With one quiet ply left, a quiet move can only parry; a side that is not behind has nothing to parry.
+  const every = checked || quiet > 1 || (quiet === 1 && alpha < 0);
+  let found = every ? -MATE : 0;
   if (found >= beta) return found;
   if (run.nodes > run.nodesMax || ply >= PLIES_MAX - 1) {
     run.gaveUp = true;
-    return checked ? alpha : 0;
+    return every ? alpha : 0;
   }
   if (found > alpha) alpha = found;
-  const withChecks = !checked && (ply & 1) === 0 && ply >> 1 < run.checkPlies;
+  if (quiet > 0 && !checked && ply > 0 && beta <= 0 && isFineWithPassing(side, beta, quiet, ply)) return beta;
   const begin = ply * ROW;
-  const end = listMoves(side, begin, checked || withChecks);
-  order(begin, end);
+  const withChecks = !every && (ply & 1) === 0 && ply >> 1 < run.checkPlies;
+  const end = listMoves(side, begin, every || withChecks);
+  order(begin, end, ply);
+  let legal = false;
   for (let at = begin; at < end; at++) {
     const move = stack[at]! & 0xffff;
     play(move);
@@ -80,24 +90,33 @@ function best(side: number, alphaGiven: number, beta: number, ply: number): numb
       takeBack(move);
       continue;
     }
-    const gives = isInCheck(side ^ 1);
-    // A quiet move that gives no check is looked at only as an answer to one. A capture that gives no check can
-    // bring no more than what it takes, for the other side may stop there.
-    if (!gives && ((prize === 0 && !checked) || prize <= alpha)) {
+    legal = true;
+    // A move that leaves the other side free to stop brings no more than what it takes; a quiet one that gives
+    // no check is otherwise looked at only where every move is.
+    if (quiet <= 1 && ((prize === 0 && !every) || prize <= alpha) && !isInCheck(side ^ 1)) {
       takeBack(move);
-      if (checked && prize > found) found = Math.min(prize, alpha);
+      if (every && prize > found) found = Math.min(prize, alpha);
       continue;
     }
-    const value = prize - best(side ^ 1, prize - beta, prize - alpha, ply + 1);
+    const value = prize - best(side ^ 1, prize - beta, prize - alpha, quiet > 0 ? quiet - 1 : 0, ply + 1);
     takeBack(move);
     if (value > found) found = value;
     if (value > alpha) {
       alpha = value;
       keepLine(move, ply);
-      if (alpha >= beta) break;
+      if (alpha >= beta) {
+        if (prize === 0) keepRefuter(move, ply);
+        break;
+      }
     }
   }
-  return found;
+  // No legal move and no check: a stalemate ends the line with what stands.
+  return every && !checked && !legal ? 0 : found;
+}
+
+/** Whether the other side, moving again, still leaves this side at `beta` or better. */
+function isFineWithPassing(side: number, beta: number, quiet: number, ply: number): boolean {
+  return -best(side ^ 1, -beta, 1 - beta, quiet > 2 ? quiet - 2 : 0, ply + 1) >= beta;
 }
 
 /** What the move just played has won: the man taken, and what a promotion adds. */
@@ -114,17 +133,28 @@ function isLeftInCheck(side: number): boolean {
 function keepLine(move: PlayedMove, ply: number): void {
   const row = ply * PLIES_MAX;
   lines[row] = move;
-  const rest = lineEnds[ply + 1]!;
+  const rest = Math.min(lineEnds[ply + 1]!, PLIES_MAX - 1);
   for (let at = 0; at < rest; at++) lines[row + 1 + at] = lines[row + PLIES_MAX + at]!;
   lineEnds[ply] = rest + 1;
 }
 
-/** Puts the dearest prizes first, of equal ones the cheapest taker; the rank stands above the move's sixteen bits. */
-function order(begin: number, end: number): void {
+function keepRefuter(move: PlayedMove, ply: number): void {
+  if (refuters[ply * 2] === move) return;
+  refuters[ply * 2 + 1] = refuters[ply * 2]!;
+  refuters[ply * 2] = move;
+}
+
+/**
+ * Puts the dearest prizes first, of equal ones the cheapest taker, then the refuters of the ply; the rank stands above
+ * the move's sixteen bits.
+ */
+function order(begin: number, end: number, ply: number): void {
+  const first = refuters[ply * 2]!;
+  const second = refuters[ply * 2 + 1]!;
   for (let at = begin; at < end; at++) {
-    const move = stack[at]!;
+    const move = stack[at]! & 0xffff;
     const prize = worthOf(men[(move >> 6) & 63]!) + ((move >> 12) & 7 ? worthOf((move >> 12) & 7) : 0);
-    const rank = prize === 0 ? 0 : prize * 8 + 7 - (men[move & 63]! & 7);
+    const rank = prize === 0 ? (move === first ? 2 : move === second ? 1 : 0) : prize * 8 + 7 - (men[move & 63]! & 7);
     stack[at] = move | (rank << 16);
   }
   for (let at = begin + 1; at < end; at++) {

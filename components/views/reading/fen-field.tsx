@@ -9,20 +9,22 @@ export interface FenFieldProps {
   readonly refused: boolean;
   readonly layer: string;
   readonly act: (act: Act) => void;
+  /** Reads what was typed: a FEN, or a game whose last position is taken. */
+  readonly onRead: (text: string) => void;
 }
 
-export function FenField({ text, faults, refused, layer, act }: FenFieldProps) {
+export function FenField({ text, faults, refused, layer, act, onRead }: FenFieldProps) {
   return (
     <div className="lg:-mt-[86px] lg:ml-auto lg:w-[50%]">
       <form
         action="/"
         onSubmit={(event) => {
           event.preventDefault();
-          act({ type: 'read', text });
+          onRead(text);
         }}
       >
         <label htmlFor="fen" className="block text-[13px] leading-5 font-medium">
-          Position, as FEN
+          Position, as FEN or as the moves of a game (PGN)
         </label>
         <div className="mt-1 flex gap-x-2">
           <input

@@ -17,8 +17,8 @@ import { PlateCaption } from './plate-caption';
 import { PlateFigure } from './plate-figure';
 import { squareLabels } from './square-label';
 import { Statements } from './statements';
-import { acted, addressOf, shownPosition, stateOf } from './state';
-import { openPosition } from './open-position';
+import { type Act, acted, addressOf, shownPosition, stateOf } from './state';
+import { looksLikeGame, openPosition, textOf } from './open-position';
 import { FIRST_POSITION } from './examples';
 
 /** One set of tables serves every reading of this page. */
@@ -28,6 +28,18 @@ function firstPosition() {
   const { position } = openPosition(FIRST_POSITION);
   if (!position) throw new Error('the first position must be readable');
   return position;
+}
+
+/** Reads a FEN at once; a game goes through the library of notations, which is fetched only then. */
+async function readTyped(text: string, act: (act: Act) => void): Promise<void> {
+  if (!looksLikeGame(text)) {
+    act({ type: 'read', text });
+    return;
+  }
+  const { replayPgn } = await import('@/engine/rules/notation');
+  const game = replayPgn(text);
+  if (!game.ok) act({ type: 'refused', text, faults: [game.fault] });
+  else act({ type: 'read', text: textOf(game.value.positions[game.value.positions.length - 1] ?? game.value.start) });
 }
 
 /** The page's live part. `address` is what the server was asked for; it renders the same without scripts. */
@@ -93,7 +105,14 @@ export function InteractiveReading({ address }: { readonly address: Address }) {
   if (!plate) return null;
   return (
     <>
-      <FenField text={state.text} faults={state.faults} refused={state.refused} layer={state.layer} act={act} />
+      <FenField
+        text={state.text}
+        faults={state.faults}
+        refused={state.refused}
+        layer={state.layer}
+        act={act}
+        onRead={(text) => void readTyped(text, act)}
+      />
       <div className="mt-6 flex flex-wrap items-end justify-between gap-x-8 gap-y-2">
         <LayerBar layer={state.layer} address={addressOf(state)} act={act} />
         <Actions state={state} act={act} />

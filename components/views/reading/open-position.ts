@@ -23,3 +23,8 @@ export function openPosition(text: string): Opened {
 export function textOf(position: Position): string {
   return formatFen(position);
 }
+
+/** Whether a text is a game rather than a FEN: it has a tag in brackets or a numbered move. */
+export function looksLikeGame(text: string): boolean {
+  return /^\s*\[\w+\s+"/m.test(text) || /(^|\s)\d+\.+\s*[a-hKQRBNO]/.test(text);
+}

@@ -33,6 +33,7 @@ export interface PageState {
 export type Act =
   | { readonly type: 'typed'; readonly text: string }
   | { readonly type: 'read'; readonly text: string }
+  | { readonly type: 'refused'; readonly text: string; readonly faults: readonly Fault[] }
   | { readonly type: 'layer'; readonly layer: Layer }
   | { readonly type: 'turn' }
   | { readonly type: 'side' }
@@ -48,13 +49,15 @@ export type Act =
 /** The state that an address opens, with the position to fall back on. */
 export function stateOf(address: Address, fallback: Position): PageState {
   const opened = openPosition(address.fen);
+  const position = opened.position ?? fallback;
+  const stands = address.man !== null && manOn(position, address.man) !== null;
   return {
-    position: opened.position ?? fallback,
+    position,
     text: opened.text,
     faults: opened.faults,
     refused: opened.position === null,
     layer: address.layer,
-    man: address.man,
+    man: stands ? address.man : address.layer === 'mobility' ? firstPiece(position) : null,
     flipped: address.flipped,
     statement: address.statement,
     picked: null,
@@ -85,6 +88,8 @@ export function acted(state: PageState, act: Act): PageState {
       if (!opened.position) return { ...state, text: act.text, faults: opened.faults, refused: true };
       return { ...moved(state, opened.position), text: act.text, faults: opened.faults };
     }
+    case 'refused':
+      return { ...state, text: act.text, faults: act.faults, refused: true };
     case 'layer':
       return {
         ...state,

@@ -100,7 +100,8 @@ export interface EnPriseMan extends FactBase {
   readonly side: Side;
   readonly man: ManAt;
   readonly gain: number;
-  readonly worth: number;
+  /** Own men that guard it. */
+  readonly guards: number;
 }
 
 export interface BishopPair extends FactBase {

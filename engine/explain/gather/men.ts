@@ -3,7 +3,7 @@ import { isPinned } from '../../attacks';
 import { colourOf, DIRECTION_TO, fileOf, relativeRank, squareName } from '../../board';
 import { firstMen } from '../../attacks';
 import { type BishopValue, fillAttacked, type ManValue, newWords, squaresOfWords } from '../../men';
-import { type Kind, opponent, type Side, SIDES, type Square, WORTH } from '../../types';
+import { type Kind, opponent, type Side, SIDES, type Square } from '../../types';
 import type { MenFact, PlacedMan } from '../facts/men';
 import type { ReadingValues } from '../values';
 import { inView } from '../words';
@@ -32,7 +32,7 @@ function oneMan(values: ReadingValues, value: ManValue, facts: MenFact[]): void 
   const man = manAt(values, square);
   const base = { side, man, squares: [man.square], men: [man.square] };
   const isPiece = kind !== 'pawn' && kind !== 'king';
-  if (value.enPrise > 0) facts.push({ ...base, id: 'en-prise', gain: value.enPrise, worth: WORTH[kind] });
+  if (value.enPrise > 0) facts.push({ ...base, id: 'en-prise', gain: value.enPrise, guards: value.defenders.length });
   if (value.trapped) facts.push({ ...base, id: 'trapped', attacked: value.attackers.length > 0 });
   if (notes.includes('out-of-play')) {
     facts.push({ ...base, id: 'out-of-play', safeMoves: value.safeMoves.length, toCentre: value.movesToCentre });

@@ -75,12 +75,12 @@ export const MEN_PHRASES: Phrases<MenFact> = {
     head: `${capital(theMan(man))} is loose`,
     body: `no ${side} man guards it`,
   }),
-  'en-prise': ({ man, side, gain, worth }) => ({
+  'en-prise': ({ man, side, gain, guards }) => ({
     head: `${capital(theMan(man))} is en prise`,
     body:
-      gain === worth
-        ? `${enemyName(side)} can take it for nothing`
-        : `${enemyName(side)} gains ${counted(gain, 'pawn')}’${gain === 1 ? 's' : ''} worth by taking it`,
+      guards === 0
+        ? `no ${side} man guards it, and ${enemyName(side)} can take it`
+        : `${enemyName(side)} gains ${counted(gain, 'pawn')}’${gain === 1 ? 's' : ''} worth by capturing there`,
   }),
   'bishop-pair': ({ side }) => ({
     head: `${name(side)} has the bishop pair`,

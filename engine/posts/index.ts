@@ -1,0 +1,3 @@
+export * from './weights';
+export * from './ground';
+export * from './count-parts';
