@@ -8,14 +8,7 @@
 import { type ChildProcess, spawn } from 'node:child_process';
 import { createServer } from 'node:net';
 import autocannon from 'autocannon';
-
-/** One figure of the bench. `beside` says what it stands beside. */
-export interface Figure {
-  readonly name: string;
-  readonly value: number;
-  readonly unit: string;
-  readonly beside?: string;
-}
+import type { Figure } from './figure';
 
 /** A built server that answers at `url` until it is stopped. */
 export interface BuiltServer {

@@ -1,7 +1,7 @@
-/** Positions of serious games: bare game scores, names removed. */
+/** Positions of serious games: bare game scores, names removed. Read from the root of the repository, where tests and bench run. */
 import { readFileSync } from 'node:fs';
 
-const lines = readFileSync(new URL('./positions/real-20000.fen', import.meta.url), 'utf8')
+const lines = readFileSync('tests/support/positions/real-20000.fen', 'utf8')
   .split('\n')
   .filter((line) => line !== '' && !line.startsWith('#'));
 
