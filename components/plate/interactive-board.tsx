@@ -38,7 +38,14 @@ const CELLS = [0, 1, 2, 3, 4, 5, 6, 7] as const;
 export function InteractiveBoard(props: BoardProps) {
   const { place, figure, board, labels, picked } = props;
   const [focus, setFocus] = useState({ column: 0, row: 7 });
-  const hand = useRef<{ from: Square; x: number; y: number; over: Square | null; moving: boolean } | null>(null);
+  const hand = useRef<{
+    from: Square;
+    x: number;
+    y: number;
+    over: Square | null;
+    moving: boolean;
+    box: DOMRect;
+  } | null>(null);
   const ghost = useRef<HTMLDivElement>(null);
   const [held, setHeld] = useState<Man | null>(null);
   const grid = useRef<HTMLDivElement>(null);
@@ -47,7 +54,8 @@ export function InteractiveBoard(props: BoardProps) {
     (place.flipped ? row * 8 + (7 - column) : (7 - row) * 8 + column) as Square;
 
   const squareUnder = (event: PointerEvent): Square | null => {
-    const box = grid.current?.getBoundingClientRect();
+    // Measured once a drag: asking again would lay the page out at every move.
+    const box = hand.current?.box ?? grid.current?.getBoundingClientRect();
     if (!box) return null;
     const column = Math.floor(((event.clientX - box.left) / box.width) * 8);
     const row = Math.floor(((event.clientY - box.top) / box.height) * 8);
@@ -55,15 +63,16 @@ export function InteractiveBoard(props: BoardProps) {
   };
 
   const float = (event: PointerEvent) => {
-    const box = grid.current?.getBoundingClientRect();
+    const box = hand.current?.box;
     if (!box || !ghost.current) return;
     ghost.current.style.transform = `translate(${event.clientX - box.left}px, ${event.clientY - box.top}px) translate(-50%, -50%)`;
   };
 
   const down = (event: PointerEvent) => {
     const from = squareUnder(event);
-    if (from === null || event.button !== 0) return;
-    hand.current = { from, x: event.clientX, y: event.clientY, over: from, moving: false };
+    const box = grid.current?.getBoundingClientRect();
+    if (from === null || !box || event.button !== 0) return;
+    hand.current = { from, x: event.clientX, y: event.clientY, over: from, moving: false, box };
     event.currentTarget.setPointerCapture(event.pointerId);
   };
 

@@ -12,7 +12,7 @@ import { weakMarks } from './layers/weak';
 import { legendOf } from './legend';
 import { manMarks } from './men';
 import { marginNotes, numberMarks } from './notes';
-import { box, cornerOf, frameInset, framedSide, sizeFor } from './place';
+import { box, cornerOf, frameInset, framedSide, n, sizeFor } from './place';
 import type { BoardPlace, Mark, PlacedNote, Plate, PlateRequest } from './types';
 import { altText, captionText, captionTitle } from './words';
 
@@ -39,24 +39,30 @@ export function plateOf(request: PlateRequest): Plate {
   const board: BoardPlace = { x: (width - side) / 2 + inset, y: 1 + inset, size, flipped };
   const noted = wanted === 'none' ? [] : notesOf(reading, request.noted ?? reading.lead);
 
+  const where = `${n(board.x)} ${n(board.y)} ${n(size)} ${flipped}${print}`;
   const marks: Mark[] = [
-    ...ground(board, id),
-    ...under(request, board, id),
-    ...men(reading, board, layer === 'mobility' ? man : null),
-    ...over(request, board, heat),
+    { type: 'group', key: 'ground', stamp: where, marks: ground(board, id) },
+    { type: 'group', key: 'under', marks: under(request, board, id) },
+    { type: 'group', key: 'men', marks: men(reading, board, where, layer === 'mobility' ? man : null) },
+    { type: 'group', key: 'over', marks: over(request, board, where, heat) },
+    { type: 'group', key: 'frame', stamp: where, marks: frame(board) },
   ];
-  marks.push(...frame(board));
-  if (layer === 'command' || layer === 'files') marks.push(...fileMarks(reading, board));
+  if (layer === 'command' || layer === 'files')
+    marks.push({ type: 'group', key: 'files', marks: fileMarks(reading, board) });
   const bottom = 1 + side;
   let notes: PlacedNote[] = noted;
   if (inMargin) {
     const placed = marginNotes(board, width, { top: 2, bottom }, noted, chosen);
     notes = placed.notes;
-    marks.push(...placed.marks);
+    marks.push({ type: 'group', key: 'notes', marks: placed.marks });
   } else if (noted.length > 0) {
-    marks.push(...numberMarks(board, noted, new Set(reading.men.map(({ square }) => square)), chosen));
+    marks.push({
+      type: 'group',
+      key: 'notes',
+      marks: numberMarks(board, noted, new Set(reading.men.map(({ square }) => square)), chosen),
+    });
   }
-  marks.push(...litMarks(request.lit ?? [], board));
+  marks.push({ type: 'group', key: 'lit', marks: litMarks(request.lit ?? [], board) });
 
   const legend = legendOf(reading, layer, board, id, print);
   const title = request.caption?.title ?? captionTitle(reading, layer, man);
@@ -114,13 +120,17 @@ function under(
 function over(
   { reading, layer, print = false, man = null }: PlateRequest,
   board: BoardPlace,
+  where: string,
   heat: PlateRequest['heat'],
 ): Mark[] {
   switch (layer) {
     case 'command':
-      return [...pipMarks(reading.squares.filter(isMiddle), board), ...outpostMarks(reading.outposts, board, print)];
+      return [
+        ...pipMarks(reading.squares.filter(isMiddle), board, where),
+        ...outpostMarks(reading.outposts, board, print),
+      ];
     case 'control':
-      return pipMarks(reading.squares, board);
+      return pipMarks(reading.squares, board, where);
     case 'outposts':
       return outpostMarks(reading.outposts, board, print);
     case 'mobility':
@@ -132,16 +142,22 @@ function over(
   }
 }
 
-function men(reading: Reading, board: BoardPlace, asked: SquareName | null): Mark[] {
-  const marks = reading.men.flatMap(({ side, kind, square }) => {
+function men(reading: Reading, board: BoardPlace, where: string, asked: SquareName | null): Mark[] {
+  const marks = reading.men.map(({ side, kind, square }): Mark => {
     const { x, y } = cornerOf(board, square);
-    return manMarks(side, kind, x, y, board.size);
+    return {
+      type: 'group',
+      key: square,
+      stamp: `${where} ${side} ${kind}`,
+      marks: manMarks(side, kind, x, y, board.size),
+    };
   });
   if (asked === null) return marks;
   const { x, y } = cornerOf(board, asked);
+  const edge = box(x + 2, y + 2, board.size - 4, board.size - 4);
   return [
     ...marks,
-    { type: 'path', d: box(x + 2, y + 2, board.size - 4, board.size - 4), stroke: 'pick', width: 2, fill: 'none' },
+    { type: 'group', key: 'asked', marks: [{ type: 'path', d: edge, stroke: 'pick', width: 2, fill: 'none' }] },
   ];
 }
 

@@ -66,6 +66,10 @@ export type Mark =
       readonly marks: readonly Mark[];
       /** The statement that the group belongs to. */
       readonly statement?: string;
+      /** Names the group among its neighbours, so that a page can keep what stays. */
+      readonly key?: string;
+      /** Says all that the group's marks hang on: while it is the same, nothing needs drawing anew. */
+      readonly stamp?: string;
     };
 
 /** Shift and scale of a path drawn on its own grid. */

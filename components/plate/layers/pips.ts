@@ -8,15 +8,19 @@ const PIPS_MAX = 5;
 
 type SquareReading = Reading['squares'][number];
 
-/** Pips of the squares given. */
-export function pipMarks(squares: readonly SquareReading[], board: BoardPlace): Mark[] {
-  const marks: Mark[] = [];
+/** Pips of the squares given, a group a square; `where` stamps them with the board's place. */
+export function pipMarks(squares: readonly SquareReading[], board: BoardPlace, where: string): Mark[] {
+  const groups: Mark[] = [];
   for (const { square, attackers, behind } of squares) {
+    const counts = [attackers.white.length, behind.white.length, attackers.black.length, behind.black.length] as const;
+    if (counts[0] + counts[2] === 0) continue;
     const { x, y } = cornerOf(board, square);
-    rowOfPips(marks, 'black', attackers.black.length, behind.black.length, x, y + board.size * 0.1, board.size);
-    rowOfPips(marks, 'white', attackers.white.length, behind.white.length, x, y + board.size * 0.9, board.size);
+    const marks: Mark[] = [];
+    rowOfPips(marks, 'black', counts[2], counts[3], x, y + board.size * 0.1, board.size);
+    rowOfPips(marks, 'white', counts[0], counts[1], x, y + board.size * 0.9, board.size);
+    groups.push({ type: 'group', key: square, stamp: `${where} ${counts.join(' ')}`, marks });
   }
-  return marks;
+  return groups;
 }
 
 function rowOfPips(

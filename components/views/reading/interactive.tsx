@@ -1,7 +1,7 @@
 'use client';
 
 /** The live reading: every act changes the position, and plate, statements and address follow. */
-import { useEffect, useMemo, useReducer, useRef, useState } from 'react';
+import { useCallback, useDeferredValue, useEffect, useMemo, useReducer, useRef, useState } from 'react';
 import { InteractiveBoard } from '@/components/plate/interactive-board';
 import { plateOf } from '@/components/plate/layout';
 import { squareName } from '@/engine/board';
@@ -52,6 +52,8 @@ export function InteractiveReading({ address }: { readonly address: Address }) {
 
   const position = shownPosition(state);
   const reading = useMemo(() => readPosition(position, [], desk), [position]);
+  // The plate and its notes follow at once, the long list below a moment later.
+  const listed = useDeferredValue(reading);
   const drag = state.drag;
   const asked = drag && drag.from === state.man && drag.over !== null ? drag.over : state.man;
   const man = asked === null ? null : squareName(asked);
@@ -96,7 +98,14 @@ export function InteractiveReading({ address }: { readonly address: Address }) {
     return () => observer.disconnect();
   }, []);
 
+  const noteKeys = plate?.notes.map(({ statement }) => statement.key).join(' ') ?? '';
+  const numbers = useMemo(() => new Map(noteKeys.split(' ').map((key, index) => [key, index + 1])), [noteKeys]);
+  const choose = useCallback((key: string) => act({ type: 'statement', key }), []);
   const href = addressHref(addressOf(state));
+  const hrefOf = useCallback(
+    (key: string) => `${href.replace(/&statement=.*$/, '')}&statement=${encodeURIComponent(key)}`,
+    [href],
+  );
   useEffect(() => {
     const timer = setTimeout(() => window.history.replaceState(window.history.state, '', href), 250);
     return () => clearTimeout(timer);
@@ -147,13 +156,13 @@ export function InteractiveReading({ address }: { readonly address: Address }) {
       <ManBox picked={state.picked} act={act} />
       <div className="double-rule-top mt-8 pt-6">
         <Statements
-          reading={reading}
-          numbers={new Map(plate.notes.map(({ number, statement }) => [statement.key, number]))}
+          reading={listed}
+          numbers={numbers}
           chosen={state.statement}
           square={square}
-          hrefOf={(key) => addressHref(addressOf(state), { statement: key })}
+          hrefOf={hrefOf}
           onPoint={setPointed}
-          onChoose={(key) => act({ type: 'statement', key })}
+          onChoose={choose}
         />
       </div>
       <InteractiveKeys act={act} />

@@ -23,7 +23,7 @@ export function PlateFigure({
     if (key) onChoose(key);
   };
   return (
-    <div className={`relative mx-auto max-w-[760px] xl:max-w-none ${SHOWN[only]}`}>
+    <div className={`relative mx-auto max-w-[760px] contain-layout xl:max-w-none ${SHOWN[only]}`}>
       <svg
         viewBox={`0 0 ${plate.width} ${plate.height}`}
         width="100%"

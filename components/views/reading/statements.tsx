@@ -1,4 +1,5 @@
 /** The statements of a reading in three columns, each a link to itself that points at its squares. */
+import { memo } from 'react';
 import type { Reading, Statement } from '@/engine/reading/schema';
 import type { SquareName, Theme } from '@/engine/types';
 
@@ -24,7 +25,7 @@ export interface StatementsProps {
 }
 
 /** The list of statements. */
-export function Statements(props: StatementsProps) {
+export const Statements = memo((props: StatementsProps) => {
   return (
     <div className="grid gap-x-10 gap-y-8 md:grid-cols-2 lg:grid-cols-3">
       {COLUMNS.map(({ title, themes }) => {
@@ -47,7 +48,8 @@ export function Statements(props: StatementsProps) {
       })}
     </div>
   );
-}
+});
+Statements.displayName = 'Statements';
 
 function Items({ list, ...props }: StatementsProps & { readonly list: readonly Statement[] }) {
   return (
