@@ -1,3 +1,3 @@
 export * from './explain';
 export type { Fact, FactId } from './fact';
-export type { ReadingValues, SideTotals } from './values';
+export type { ReadingValues } from './values';

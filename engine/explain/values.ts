@@ -10,11 +10,6 @@ import type { ColourComplex, OutpostValue, SquareTable, SquareTotals, WeakSquare
 import type { StructureMatch } from '../structures';
 import type { BySide } from '../types';
 
-export interface SideTotals extends SquareTotals {
-  /** Safe moves of all men of the side. */
-  readonly safeMoves: number;
-}
-
 export interface ReadingValues {
   readonly position: Position;
   readonly map: AttackMap;
@@ -34,5 +29,5 @@ export interface ReadingValues {
   readonly men: readonly ManValue[];
   readonly bishops: readonly BishopValue[];
   readonly kings: BySide<KingValue | null>;
-  readonly totals: BySide<SideTotals>;
+  readonly totals: BySide<SquareTotals>;
 }

@@ -1,11 +1,11 @@
 /** One man and what it can do from where it stands. */
-import { type AttackMap, attackersOf, isPinned, KING, kindOn, PAWN, type SideIndex, sideOn } from '../attacks';
+import { type AttackMap, isPinned, KING, kindOn, PAWN, type SideIndex, sideOn } from '../attacks';
 import { bitCount, fileOf, type Position } from '../board';
 import { isSafeMove, lossOn, type Safety, worthOf } from '../exchange';
 import { type PawnMap, pawnReach } from '../pawns';
 import type { Reach } from '../reach';
 import type { OutpostValue, SquareTable } from '../squares';
-import { type BySide, bySide, type Kind, opponent, type Side, type Square } from '../types';
+import { type BySide, bySide, type Kind, type Side, type Square } from '../types';
 import { type Duty, dutiesOf, isOverloaded } from './duties';
 import {
   addSquare,
@@ -53,8 +53,9 @@ export interface ManValue {
   readonly pinned: boolean;
   /** Pawns that the enemy gains by taking it now. */
   readonly enPrise: number;
-  readonly attackers: readonly Square[];
-  readonly defenders: readonly Square[];
+  /** Masks of the enemy men that attack it and the own men that guard it. */
+  readonly attackers: number;
+  readonly defenders: number;
   readonly duties: readonly Duty[];
   readonly trapped: boolean;
   /** Safe moves needed to the nearest of d4, e4, d5, e5; null for kings and pawns, and where it takes more than three. */
@@ -108,23 +109,24 @@ function manValue(
   const seesOnlyOwn = ((words[0]! & ~own[side][0]!) | (words[1]! & ~own[side][1]!)) === 0;
   fillMovesOf(map, position, square, words);
   const moves = squaresOfWords(words);
-  const safeMoves = moves.filter((to) => isSafeMove(safety, square, to));
+  const safeMoves: Square[] = [];
+  for (const to of moves) if (isSafeMove(safety, square, to)) safeMoves.push(to);
   const pinned = isPinned(map, square);
   const enPrise = Math.max(0, table.exchanges[((index ^ 1) << 6) | square]!);
-  const attackers = attackersOf(map, opponent(side), square);
-  const defenders = attackersOf(map, side, square);
+  const attackers = map.attackers[((index ^ 1) << 6) | square]!;
+  const defenders = map.attackers[(index << 6) | square]!;
   const duties = dutiesOf(map, table, square);
   const movesToCentre = kind === 'king' || kind === 'pawn' ? null : centreDistance(context.reach, index, square);
-  const trapped = isTrapped(context, square, moves, safeMoves, attackers.length > 0, pinned);
+  const trapped = isTrapped(context, square, moves, safeMoves, attackers !== 0, pinned);
   const isPiece = kind !== 'king' && kind !== 'pawn';
   const notes: Note[] = [];
   if (bishop) notes.push(bishop);
   if (kind === 'knight' && (fileOf(square) === 0 || fileOf(square) === 7)) notes.push('rim');
   if (onOutpost) notes.push('outpost');
-  if (isOverloaded(map, index, duties)) notes.push('overloaded');
+  if (duties.length > 1 && isOverloaded(map, index, duties)) notes.push('overloaded');
   if (trapped) notes.push('trapped');
   if (pinned) notes.push('pinned');
-  if (kind !== 'king' && defenders.length === 0) notes.push('loose');
+  if (kind !== 'king' && defenders === 0) notes.push('loose');
   if (enPrise > 0) notes.push('en-prise');
   if (isPiece && isOutOfPlay(side, square, safeMoves.length, movesToCentre)) notes.push('out-of-play');
   if (isPiece && !pinned && seesOnlyOwn) notes.push('blocked-in');

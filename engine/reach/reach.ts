@@ -53,12 +53,14 @@ export function usersOf(reach: Reach, side: Side, square: Square): User[] {
   const { map } = reach.safety;
   const row = side === 'white' ? 0 : 32;
   const users: User[] = [];
-  for (let number = 0; number < map.counts[row >> 5]!; number++) {
+  // Men are numbered by worth, so pawns come first and are passed over from the rear.
+  for (let number = map.counts[row >> 5]! - 1; number >= 0; number--) {
     const from = map.squares[row | number]!;
     const place = map.board[from]! & 7;
-    if (place === PAWN || place === KING) continue;
+    if (place === PAWN) break;
+    if (place === KING) continue;
     const moves = reach.moves[((row | number) << 6) | square]!;
-    if (moves >= 0) users.push({ from: from as Square, moves });
+    if (moves >= 0) users.unshift({ from: from as Square, moves });
   }
   return users.length > 1 ? users.sort((a, b) => a.moves - b.moves) : users;
 }

@@ -1,12 +1,14 @@
 /** Men, kings, files and diagonals as JSON. */
+import { type AttackMap, menOfMask } from '../attacks';
 import { fileName, squareName } from '../board';
 import type { DiagonalValue, FileValue } from '../files';
 import type { KingValue, ManValue } from '../men';
+import { opponent } from '../types';
 import { names, namesBySide } from './encode-squares';
 import type { Reading } from './schema';
 
 /** The men in square order. */
-export function encodeMen(men: readonly ManValue[]): Reading['men'] {
+export function encodeMen(map: AttackMap, men: readonly ManValue[]): Reading['men'] {
   return men.map((man) => ({
     square: squareName(man.square),
     side: man.side,
@@ -17,8 +19,8 @@ export function encodeMen(men: readonly ManValue[]): Reading['men'] {
     seesAhead: man.seesAhead,
     pinned: man.pinned,
     enPrise: man.enPrise,
-    attackers: names(man.attackers),
-    defenders: names(man.defenders),
+    attackers: names(menOfMask(map, opponent(man.side), man.attackers)),
+    defenders: names(menOfMask(map, man.side, man.defenders)),
     duties: man.duties.map(({ square, loses, by }) => ({ square: squareName(square), loses, by })),
     trapped: man.trapped,
     movesToCentre: man.movesToCentre,

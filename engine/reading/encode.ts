@@ -22,7 +22,7 @@ export function encodeReading(
     warnings: [...warnings],
     sideToMove: position.sideToMove,
     squares: encodeSquares(position, map, table),
-    men: encodeMen(values.men),
+    men: encodeMen(map, values.men),
     pawns: encodePawns(values.pawns, values.structure),
     weakSquares: encodeWeakSquares(map, values.weakSquares),
     outposts: encodeOutposts(map, values.outposts),

@@ -57,6 +57,6 @@ export function readValues(position: Position, desk: Desk = newDesk()): ReadingV
     men,
     bishops,
     kings: bySide((side) => kingValue(safety, side)),
-    totals: bySide((side) => ({ ...squareTotals(map, table, side), safeMoves: safeMovesOf(men, side) })),
+    totals: bySide((side) => squareTotals(map, table, side, safeMovesOf(men, side))),
   };
 }

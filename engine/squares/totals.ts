@@ -14,6 +14,8 @@ export interface SquareTotals {
   readonly centre: number;
   /** Controlled squares among c3 to f6. */
   readonly extendedCentre: number;
+  /** Safe moves of all men of the side. */
+  readonly safeMoves: number;
 }
 
 /** One bit a square: 2 for the extended centre, 1 as well for the centre. */
@@ -24,8 +26,8 @@ const CENTRES: Readonly<Uint8Array> = Uint8Array.from({ length: 64 }, (_, square
   return file >= 2 && file <= 5 && rank >= 2 && rank <= 5 ? (inner ? 3 : 2) : 0;
 });
 
-/** The counts of one side. */
-export function squareTotals(map: AttackMap, table: SquareTable, side: Side): SquareTotals {
+/** The counts of one side; `safeMoves` is counted with the men and handed in. */
+export function squareTotals(map: AttackMap, table: SquareTable, side: Side, safeMoves: number): SquareTotals {
   const index = side === 'white' ? 0 : 1;
   let controlled = 0;
   let commanded = 0;
@@ -41,5 +43,5 @@ export function squareTotals(map: AttackMap, table: SquareTable, side: Side): Sq
     if (place & 1) centre++;
     if (place & 2) extendedCentre++;
   }
-  return { controlled, commanded, enemyHalf, centre, extendedCentre };
+  return { controlled, commanded, enemyHalf, centre, extendedCentre, safeMoves };
 }

@@ -1,6 +1,6 @@
 /** Facts about men that hold in a position. */
 import { isPinned } from '../../attacks';
-import { colourOf, DIRECTION_TO, fileOf, relativeRank, squareName } from '../../board';
+import { bitCount, colourOf, DIRECTION_TO, fileOf, relativeRank, squareName } from '../../board';
 import { firstMen } from '../../attacks';
 import { type BishopValue, fillAttacked, type ManValue, newWords, squaresOfWords } from '../../men';
 import { type Kind, opponent, type Side, SIDES, type Square } from '../../types';
@@ -32,8 +32,8 @@ function oneMan(values: ReadingValues, value: ManValue, facts: MenFact[]): void 
   const man = manAt(values, square);
   const base = { side, man, squares: [man.square], men: [man.square] };
   const isPiece = kind !== 'pawn' && kind !== 'king';
-  if (value.enPrise > 0) facts.push({ ...base, id: 'en-prise', gain: value.enPrise, guards: value.defenders.length });
-  if (value.trapped) facts.push({ ...base, id: 'trapped', attacked: value.attackers.length > 0 });
+  if (value.enPrise > 0) facts.push({ ...base, id: 'en-prise', gain: value.enPrise, guards: bitCount(value.defenders) });
+  if (value.trapped) facts.push({ ...base, id: 'trapped', attacked: value.attackers !== 0 });
   if (notes.includes('out-of-play')) {
     facts.push({ ...base, id: 'out-of-play', safeMoves: value.safeMoves.length, toCentre: value.movesToCentre });
   } else if (notes.includes('rim')) {
@@ -42,7 +42,7 @@ function oneMan(values: ReadingValues, value: ManValue, facts: MenFact[]): void 
   if (value.pinned) pinned(values, value, facts);
   if (notes.includes('overloaded')) overloaded(values, value, facts);
   else if (isPiece && duties.length > 0) tied(values, value, facts);
-  const loose = isPiece && value.defenders.length === 0 && value.enPrise === 0;
+  const loose = isPiece && value.defenders === 0 && value.enPrise === 0;
   if (loose && relativeRank(square, side) >= 4) facts.push({ ...base, id: 'loose' });
 }
 
