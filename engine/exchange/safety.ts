@@ -12,21 +12,27 @@ export interface Safety {
   readonly map: AttackMap;
   /** Entry (side << 9 | kind's place << 6 | square): 0 not asked yet, 1 safe, 2 not. */
   readonly known: Uint8Array;
-  /** The man last asked about; what its leaving can change stands in the next two. */
-  from: number;
+  /** By the square of a man that was asked about: 1 once the next two are found. */
+  readonly aimed: Uint8Array;
   /** One bit a direction: on squares that way the leaving man may uncover a slider behind it. */
-  uncovers: number;
-  /** Its leaving may open or close a pin, so that nothing kept is of use. */
-  touchesPin: boolean;
+  readonly uncovers: Uint8Array;
+  /** 1 where its leaving may open or close a pin, so that nothing kept is of use. */
+  readonly touchesPin: Uint8Array;
 }
 
 /** The safety of one position; `into` gives the tables to clear and use again. */
 export function safetyOf(map: AttackMap, into?: Safety): Safety {
   if (!into || into.map !== map) {
-    return { map, known: new Uint8Array(1024), from: -1, uncovers: 0, touchesPin: false };
+    return {
+      map,
+      known: new Uint8Array(1024),
+      aimed: new Uint8Array(64),
+      uncovers: new Uint8Array(64),
+      touchesPin: new Uint8Array(64),
+    };
   }
   into.known.fill(0);
-  into.from = -1;
+  into.aimed.fill(0);
   return into;
 }
 
@@ -48,17 +54,17 @@ export function isSafeHere({ map, known }: Safety, side: SideIndex, place: numbe
  */
 export function isSafeMove(safety: Safety, from: number, to: number): boolean {
   const { map } = safety;
-  if (safety.from !== from) aim(safety, from);
+  if (safety.aimed[from] === 0) aim(safety, from);
   const code = map.board[from]!;
   const side = (code >> 3) as SideIndex;
   const place = code & 7;
   const direction = DIRECTION_TO[(from << 6) | to]!;
-  const uncovers = direction >= 0 && ((safety.uncovers >>> direction) & 1) === 1;
+  const uncovers = direction >= 0 && ((safety.uncovers[from]! >>> direction) & 1) === 1;
   if (uncovers) return isSafeOn(map, side, place, to, from);
   const enemies = map.attackers[((side ^ 1) << 6) | to]!;
   if (enemies === 0) return true;
   if (place === KING) return false;
-  if (safety.touchesPin) return isSafeOn(map, side, place, to, from);
+  if (safety.touchesPin[from] === 1) return isSafeOn(map, side, place, to, from);
   if (isHitByCheaper(map, side, place, enemies)) return false;
   // The man must not be counted as a guard of its own square, now or from behind.
   const bears = ((map.attackers[(side << 6) | to]! >>> map.numbers[from]!) & 1) === 1;
@@ -88,9 +94,9 @@ function aim(safety: Safety, from: number): void {
       break;
     }
   }
-  safety.from = from;
-  safety.uncovers = uncovers;
-  safety.touchesPin = touchesPinOf(map, 0, from) || touchesPinOf(map, 1, from);
+  safety.aimed[from] = 1;
+  safety.uncovers[from] = uncovers;
+  safety.touchesPin[from] = touchesPinOf(map, 0, from) || touchesPinOf(map, 1, from) ? 1 : 0;
 }
 
 /** Whether the man stands on a line from the side's king with an enemy slider further out, or is such a slider itself. */

@@ -16,6 +16,8 @@ export interface Reach {
   readonly movesMax: number;
   /** Entry ((side << 5 | man's number) << 6 | square): moves needed, 0 where it stands, negative where not within `movesMax`. */
   readonly moves: Int8Array;
+  /** Number of the first man of each side that is no pawn: men are numbered by worth. */
+  readonly firstPieces: readonly [number, number];
 }
 
 const UNKNOWN = -1;
@@ -23,15 +25,22 @@ const UNSAFE = -2;
 
 /** The reach of all men of both sides within `movesMax` own moves; `into` gives the table to use again. */
 export function reachOf(safety: Safety, movesMax: number, into: Int8Array = new Int8Array(4096)): Reach {
+  const white = fillSide(safety, 0, movesMax, into);
+  const black = fillSide(safety, 1, movesMax, into);
+  return { safety, movesMax, moves: into, firstPieces: [white, black] };
+}
+
+/** Fills the rows of a side's pieces; returns the number of its first one. */
+function fillSide(safety: Safety, side: SideIndex, movesMax: number, into: Int8Array): number {
   const { map } = safety;
-  for (let side = 0; side < 2; side++) {
-    for (let number = 0; number < map.counts[side]!; number++) {
-      const man = (side << 5) | number;
-      const place = map.board[map.squares[man]!]! & 7;
-      if (place !== PAWN && place !== KING) fillReach(safety, map.squares[man]!, movesMax, into, man << 6);
-    }
+  let first = 0;
+  for (let number = 0; number < map.counts[side]!; number++) {
+    const man = (side << 5) | number;
+    const place = map.board[map.squares[man]!]! & 7;
+    if (place === PAWN) first = number + 1;
+    else if (place !== KING) fillReach(safety, map.squares[man]!, movesMax, into, man << 6);
   }
-  return { safety, movesMax, moves: into };
+  return first;
 }
 
 /** Moves that the man on `from` needs to stand safely on `to`; undefined where it cannot within the reach's bound. */
@@ -48,20 +57,21 @@ export interface User {
   readonly moves: number;
 }
 
+const NO_USERS: readonly User[] = [];
+
 /** Pieces of the side (king and pawns apart) that can come to stand safely on the square, soonest first, cheaper before dearer. */
-export function usersOf(reach: Reach, side: Side, square: Square): User[] {
-  const { map } = reach.safety;
-  const row = side === 'white' ? 0 : 32;
-  const users: User[] = [];
-  // Men are numbered by worth, so pawns come first and are passed over from the rear.
-  for (let number = map.counts[row >> 5]! - 1; number >= 0; number--) {
-    const from = map.squares[row | number]!;
-    const place = map.board[from]! & 7;
-    if (place === PAWN) break;
-    if (place === KING) continue;
-    const moves = reach.moves[((row | number) << 6) | square]!;
-    if (moves >= 0) users.unshift({ from: from as Square, moves });
+export function usersOf({ safety: { map }, moves, firstPieces }: Reach, side: Side, square: Square): readonly User[] {
+  const index = side === 'white' ? 0 : 1;
+  const row = index << 5;
+  let users: User[] | null = null;
+  for (let number = firstPieces[index]!; number < map.counts[index]!; number++) {
+    const needed = moves[((row | number) << 6) | square]!;
+    const from = map.squares[row | number]! as Square;
+    if (needed < 0 || (map.board[from]! & 7) === KING) continue;
+    if (users === null) users = [{ from, moves: needed }];
+    else users.push({ from, moves: needed });
   }
+  if (users === null) return NO_USERS;
   return users.length > 1 ? users.sort((a, b) => a.moves - b.moves) : users;
 }
 
@@ -133,7 +143,7 @@ function visit(safety: Safety, to: number, out: Int8Array): void {
   const code = map.board[to]!;
   if (code !== 0 && (code >> 3 !== search.enemyRow >> 6 || (code & 7) === KING)) return;
   if (search.pinKing >= 0 && DIRECTION_TO[(search.pinKing << 6) | to] !== search.pinDirection) return;
-  const free = map.attackers[search.enemyRow | to] === 0 && safety.uncovers === 0;
+  const free = map.attackers[search.enemyRow | to] === 0 && safety.uncovers[search.from] === 0;
   if (!free && !isSafeMove(safety, search.from, to)) {
     out[search.offset + to] = UNSAFE;
     return;

@@ -32,7 +32,8 @@ function oneMan(values: ReadingValues, value: ManValue, facts: MenFact[]): void 
   const man = manAt(values, square);
   const base = { side, man, squares: [man.square], men: [man.square] };
   const isPiece = kind !== 'pawn' && kind !== 'king';
-  if (value.enPrise > 0) facts.push({ ...base, id: 'en-prise', gain: value.enPrise, guards: bitCount(value.defenders) });
+  if (value.enPrise > 0)
+    facts.push({ ...base, id: 'en-prise', gain: value.enPrise, guards: bitCount(value.defenders) });
   if (value.trapped) facts.push({ ...base, id: 'trapped', attacked: value.attackers !== 0 });
   if (notes.includes('out-of-play')) {
     facts.push({ ...base, id: 'out-of-play', safeMoves: value.safeMoves.length, toCentre: value.movesToCentre });
