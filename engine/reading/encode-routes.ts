@@ -36,7 +36,7 @@ function encodeChoice(position: Position, side: Side, choice: RouteValue): Route
     shortest: choice.shortest,
     steps: choice.steps.map(encodeStep),
     parts: { ...choice.parts },
-    gain: Math.round(choice.gain * 100) / 100,
+    gain: Math.round(choice.gain * 100) / 100 + 0,
     challenge: choice.challenge && { ...choice.challenge, by: squareName(choice.challenge.by) },
     drops: choice.drops.map(({ square, loses }) => ({ square: squareName(square), loses })),
     preparations: choice.preparations.map((each) => ({ move: move(each), moves: each.moves })),

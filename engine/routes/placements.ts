@@ -29,6 +29,8 @@ export interface Placement {
   readonly there: Float64Array;
   /** The verdict after each stop; undefined until the guard has looked. */
   guard?: GuardValue;
+  /** The stop after which that verdict was given. */
+  guardStop?: Square;
   /** Weighted difference, with what the guard has seen so far. */
   gain: number;
 }
@@ -116,7 +118,11 @@ export function guardPlacement(placement: Placement): void {
   let lost = 0;
   for (const stop of stopsTo(ways, post)) {
     const found = searchGain(moved(field.map.board, man, stop), index ^ 1, GUARD_BOUNDS);
-    heaviest = heavier(heaviest, guardFrom(found));
+    const verdict = guardFrom(found);
+    if (isHeavier(verdict, heaviest)) {
+      heaviest = verdict;
+      placement.guardStop = stop;
+    }
     lost = Math.max(lost, found.gains);
   }
   placement.guard = heaviest;
@@ -135,15 +141,15 @@ export function lookAgain(placement: Placement): void {
   const found = searchGain(moved(field.map.board, man, post), field.ground.index ^ 1, SECOND_LOOK);
   if (!found.complete) return;
   placement.guard = guardFrom(found);
+  placement.guardStop = post;
   there[PLACE.lost] = capped(found.gains);
   there[PLACE.wins] = capped(-found.gains);
   placement.gain = gainOf(placement);
 }
 
-function heavier(a: GuardValue | undefined, b: GuardValue): GuardValue {
-  if (a === undefined) return b;
-  if (a.loses !== b.loses) return a.loses > b.loses ? a : b;
-  return a.verdict === 'holds' ? b : a;
+function isHeavier(a: GuardValue, b: GuardValue | undefined): boolean {
+  if (b === undefined) return true;
+  return a.loses === b.loses ? a.verdict === 'unknown' && b.verdict === 'holds' : a.loses > b.loses;
 }
 
 function capped(gains: number): number {

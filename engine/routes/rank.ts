@@ -1,7 +1,16 @@
 /** The ranking, with the guard in it: cheap counts for all placements, the guard for the likely ones, a second look for the best. */
 import type { Side, Square } from '../types';
 import type { Position } from '../board';
-import { type Field, fieldOf, guardPlacement, lookAgain, merit, type Placement, piecesOf, placementsOf } from './placements';
+import {
+  type Field,
+  fieldOf,
+  guardPlacement,
+  lookAgain,
+  merit,
+  type Placement,
+  piecesOf,
+  placementsOf,
+} from './placements';
 
 export interface RankOptions {
   /** One man only. */
@@ -43,7 +52,7 @@ export function rankPlacements(position: Position, side: Side, options: RankOpti
 }
 
 /** Best first; of equals the shorter, then the one nearer to its own side, so that mirrored boards agree. */
-function byMerit(a: Placement, b: Placement): number {
+export function byMerit(a: Placement, b: Placement): number {
   const difference = merit(b) - merit(a);
   if (Math.abs(difference) > 1e-9) return difference;
   const flip = a.field.ground.index === 0 ? 0 : 56;

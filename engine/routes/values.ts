@@ -50,6 +50,8 @@ export interface RouteValue {
   readonly needs: PreparationValue | null;
   /** The heaviest verdict after any of its steps. */
   readonly guard: GuardValue;
+  /** The stop after which the guard's line begins. */
+  readonly guardStop: Square;
 }
 
 export interface RoutesValue {

@@ -108,7 +108,8 @@ function visit(search: Search, at: Square, to: Square, count: number, next: Squa
   const attackers = map.attackers[((search.side ^ 1) << 6) | to] === 0 ? 0 : 1;
   const cost = danger[at]! + attackers;
   const known = before[to]!;
-  const isSafer = known < 0 || cost < danger[to]! || (cost === danger[to] && rankOf(search, at) < rankOf(search, known));
+  const isSafer =
+    known < 0 || cost < danger[to]! || (cost === danger[to] && rankOf(search, at) < rankOf(search, known));
   if (!isSafer) return;
   danger[to] = cost;
   before[to] = at;
