@@ -21,6 +21,8 @@ const config = [
         { 'ts-expect-error': true, 'ts-ignore': true, 'ts-nocheck': true },
       ],
       '@typescript-eslint/consistent-type-imports': 'error',
+      // A name with an underscore says that something is left out on purpose.
+      '@typescript-eslint/no-unused-vars': ['warn', { varsIgnorePattern: '^_', argsIgnorePattern: '^_' }],
       eqeqeq: 'error',
       'no-restricted-syntax': ['error', DEFAULT_EXPORT],
       'no-warning-comments': ['error', { terms: ['todo', 'fixme', 'xxx'] }],

@@ -1,2 +1,3 @@
 export * from './attack-map';
+export * from './behind';
 export * from './queries';

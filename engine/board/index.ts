@@ -1,8 +1,8 @@
 export * from './squares';
-export * from './square-set';
+export * from './bits';
 export * from './position';
 export * from './geometry';
 export * from './fault';
 export * from './legality';
 export * from './fen';
-export { codeOfLetter, manLetter } from './fen-board';
+export { codeOfLetter } from './fen-board';

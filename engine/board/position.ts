@@ -49,12 +49,6 @@ export function manOn(position: Position, square: Square): Man | null {
   return MEN[position.board[square] as ManCode] ?? null;
 }
 
-/** The square of a side's king; undefined in diagrams without one. Of several, the first. */
-export function kingSquare(position: Position, side: Side): Square | undefined {
-  const at = position.board.indexOf(manCode(side, 'king'));
-  return at < 0 ? undefined : (at as Square);
-}
-
 /**
  * The same board with some squares set anew (null clears): for 'what if' questions. Castling rights
  * and the en-passant square are dropped, and the result counts as a diagram, since nothing proves it legal.

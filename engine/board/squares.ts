@@ -1,14 +1,5 @@
 /** Squares: names, files, ranks, colours, steps. */
-import {
-  type Colour,
-  FILES,
-  type FileName,
-  RANKS,
-  type RankName,
-  type Side,
-  type Square,
-  type SquareName,
-} from '../types';
+import { type Colour, FILES, type FileName, RANKS, type Side, type Square, type SquareName } from '../types';
 
 /** All 64 squares, a1, b1 … h8. */
 export const SQUARES: readonly Square[] = Array.from({ length: 64 }, (_, index) => index as Square);
@@ -64,11 +55,6 @@ export function viewOrder(square: Square, side: Side): number {
 /** Letter of a file, 0 = a. */
 export function fileName(file: number): FileName {
   return FILES[file] as FileName;
-}
-
-/** Figure of a rank, 0 = "1". */
-export function rankName(rank: number): RankName {
-  return RANKS[rank] as RankName;
 }
 
 /** Colour of a square; a1 is dark. */

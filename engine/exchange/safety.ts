@@ -4,7 +4,6 @@
  */
 import { type AttackMap, firstMen, KING, pinnedMask, type SideIndex, slidesAlong } from '../attacks';
 import { DIRECTION_TO, OPPOSITE } from '../board';
-import type { Square } from '../types';
 import { isSafeOn, worthOf } from './exchange';
 
 /** An attack map with the answers found so far. */
@@ -111,9 +110,4 @@ function touchesPinOf(map: AttackMap, side: number, from: number): boolean {
     if (code >> 3 !== side && slidesAlong(code, direction)) return true;
   }
   return false;
-}
-
-/** Squares among the given ones on which the man on `from` is safe. */
-export function safeAmong(safety: Safety, from: Square, squares: readonly Square[]): Square[] {
-  return squares.filter((to) => isSafeMove(safety, from, to));
 }

@@ -104,11 +104,6 @@ export function filesNamed(files: readonly string[]): string {
   return `files ${listed(files)}`;
 }
 
-/** 'light-squared' or 'dark-squared'. */
-export function squared(colour: 'light' | 'dark'): string {
-  return `${colour}-squared`;
-}
-
 /** A man that can come, as a fact holds it. */
 export interface Comer extends ManAt {
   readonly moves: number;

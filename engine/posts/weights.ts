@@ -19,7 +19,7 @@ export interface PostPart {
 export const PARTS = [
   {
     name: 'lost',
-    counts: 'pawns that the enemy wins by force, he to move',
+    counts: 'pawns, up to five, that the enemy wins by force, he to move',
     weight: -1.7,
     reason: 'Nothing a post gives is worth a piece: first see what can be taken.',
   },
@@ -31,7 +31,7 @@ export const PARTS = [
   },
   {
     name: 'wins',
-    counts: 'pawns won by force whatever the enemy answers',
+    counts: 'pawns, up to five, won by force whatever the enemy answers',
     weight: 1.6,
     reason: 'If it wins something outright, play it.',
   },
@@ -203,4 +203,4 @@ export const PLACE: Readonly<Record<PartName, number>> = Object.fromEntries(
 ) as Record<PartName, number>;
 
 /** What each further move of a route costs, in the table's units: a post two moves away must be that much better. */
-export const MOVE_COST = 1;
+export const MOVE_COST = 1.5;

@@ -43,14 +43,6 @@ function fillSide(safety: Safety, side: SideIndex, movesMax: number, into: Int8A
   return first;
 }
 
-/** Moves that the man on `from` needs to stand safely on `to`; undefined where it cannot within the reach's bound. */
-export function movesTo(reach: Reach, from: Square, to: Square): number | undefined {
-  const { map } = reach.safety;
-  const man = ((map.board[from]! >> 3) << 5) | map.numbers[from]!;
-  const moves = reach.moves[(man << 6) | to]!;
-  return moves < 0 ? undefined : moves;
-}
-
 /** A man that can come, and how soon. */
 export interface User {
   readonly from: Square;

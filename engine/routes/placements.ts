@@ -1,5 +1,5 @@
 /** Placements of a side's pieces, weighed: each man on each post, cheap counts for all and searches for the best. */
-import { type AttackMap, attackMap } from '../attacks';
+import { type AttackMap, attackMap, sideIndex } from '../attacks';
 import type { Position } from '../board';
 import { type Safety, safetyOf } from '../exchange';
 import { countParts, type Ground, groundOf, MOVE_COST, PARTS, PLACE } from '../posts';
@@ -35,25 +35,27 @@ export interface Placement {
   gain: number;
 }
 
-/** Losses are not told apart beyond this, as in the second look. */
-const LOSS_MAX = 10;
+/** Pawns beyond which losses and gains are not told apart in the counts: a rook, as in the second look. */
+const LOSS_MAX = 5;
 
 /** Nodes for what the side threatens: captures alone. */
 const THREAT_BOUNDS = { nodesMax: 2000, checkPlies: 0 };
 
 /** Prepares a position for the side's routes. */
 export function fieldOf(position: Position, side: Side): Field {
+  const { board } = position;
+  const own = sideIndex(side);
+  return fieldWith(position, side, {
+    lostNow: capped(searchGain(board, own ^ 1, GUARD_BOUNDS).gains),
+    threatensNow: searchGain(board, own, THREAT_BOUNDS).gains > 0 ? 1 : 0,
+  });
+}
+
+/** The same where what is won and lost now is known, or is that of another position. */
+export function fieldWith(position: Position, side: Side, now: Pick<Field, 'lostNow' | 'threatensNow'>): Field {
   const map = attackMap(position);
-  const ground = groundOf(position, side);
-  const enemy = ground.index ^ 1;
-  return {
-    position,
-    ground,
-    map,
-    safety: safetyOf(map),
-    lostNow: capped(searchGain(position.board, enemy, GUARD_BOUNDS).gains),
-    threatensNow: searchGain(position.board, ground.index, THREAT_BOUNDS).gains > 0 ? 1 : 0,
-  };
+  const { lostNow, threatensNow } = now;
+  return { position, ground: groundOf(position, side), map, safety: safetyOf(map), lostNow, threatensNow };
 }
 
 /** Squares of the side's knights, bishops, rooks and queens. */

@@ -5,7 +5,7 @@ import { PARTS } from '../posts';
 import { type SquareTable, squareTable } from '../squares';
 import type { Side, Square } from '../types';
 import { challengeOf, dropsOf, stepOn } from './describe';
-import { type Field, fieldOf, guardPlacement, merit, type Placement, placementOn, rowNow } from './placements';
+import { type Field, fieldWith, guardPlacement, merit, type Placement, placementOn, rowNow } from './placements';
 import { type Prepared, preparationOn, preparationsFor } from './preparations';
 import { byMerit, rankPlacements } from './rank';
 import type { PartCounts, PreparationValue, RoutesValue, RouteValue } from './values';
@@ -27,7 +27,7 @@ const CHOICES_UNSAID = 12;
 /** Men whose preparations are looked for, in the order of their best placement. */
 const PREPARED_MEN_MAX = 3;
 /** Posts that a preparation opens and that are weighed, a man. */
-const PREPARED_POSTS_MAX = 6;
+const PREPARED_POSTS_MAX = 4;
 
 /** The placements that help a side most, best first, each with the way there. Empty where `from` holds no such piece. */
 export function routes(position: Position, options: RoutesOptions = {}): RoutesValue {
@@ -89,7 +89,8 @@ function preparationsOfMen(field: Field, placements: readonly Placement[], moves
 function openedPosts(field: Field, ways: Ways, prepared: readonly Prepared[]): Choice[] {
   const best = new Map<Square, Choice>();
   for (const each of prepared) {
-    const after = fieldAfter(field, each.position);
+    // What is won and lost is compared with the position before the preparation.
+    const after = fieldWith(each.position, field.ground.side, field);
     const now = rowNow(after, ways.from);
     for (let post = 0; post < 64; post++) {
       if (ways.moves[post]! >= 0) continue;
@@ -103,12 +104,6 @@ function openedPosts(field: Field, ways: Ways, prepared: readonly Prepared[]): C
   const likely = [...best.values()].sort((a, b) => meritOf(b) - meritOf(a)).slice(0, PREPARED_POSTS_MAX);
   for (const { placement } of likely) guardPlacement(placement);
   return likely;
-}
-
-/** The field of a prepared position; what is won and lost there is compared with the position before it. */
-function fieldAfter(field: Field, position: Position): Field {
-  const after = fieldOf(position, field.ground.side);
-  return { ...after, lostNow: field.lostNow, threatensNow: field.threatensNow };
 }
 
 function shortcuts(field: Field, ways: Ways, prepared: readonly Prepared[], post: Square): PreparationValue[] {

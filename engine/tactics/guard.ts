@@ -31,9 +31,10 @@ export const GUARD_BOUNDS: Bounds = { nodesMax: 4000, checkPlies: 1 };
 
 /**
  * The second look: every move of the enemy, every answer and every move after it, then captures. It sees a threat
- * made by a quiet move, a fork or a man hemmed in. Eight pawns are as good as mate to it.
+ * made by a quiet move, a fork or a man hemmed in. More than a rook is
+ * not told apart.
  */
-export const SECOND_LOOK: Bounds = { nodesMax: 12000, checkPlies: 0, quietPlies: 3, gainsMax: 10 };
+export const SECOND_LOOK: Bounds = { nodesMax: 6000, checkPlies: 0, quietPlies: 3, gainsMax: 5 };
 
 /** What a board with the enemy (0 White, 1 Black) to move costs the other side. */
 export function guardOf(

@@ -80,7 +80,8 @@ function gradient(
     let rightSum = 0;
     for (let row = begin; row < end; row++) {
       let score = 0;
-      for (let column = 0; column < width; column++) score += (weights[column]! / scale[column]!) * rows[row * width + column]!;
+      for (let column = 0; column < width; column++)
+        score += (weights[column]! / scale[column]!) * rows[row * width + column]!;
       const chance = Math.exp(Math.min(score, 300));
       chances[row - begin] = chance;
       sum += chance;
@@ -91,14 +92,19 @@ function gradient(
     for (let row = begin; row < end; row++) {
       const chance = chances[row - begin]!;
       const push = much * ((right[row] === 1 ? chance / Math.max(rightSum, 1e-300) : 0) - chance / sum);
-      for (let column = 0; column < width; column++) slope[column]! += (push * rows[row * width + column]!) / scale[column]!;
+      for (let column = 0; column < width; column++)
+        slope[column]! += (push * rows[row * width + column]!) / scale[column]!;
     }
   }
   return total;
 }
 
 /** Place of the best right row of a position under the weights, from 1. */
-export function placeUnder({ rows, width, starts, right }: ChoiceData, weights: Float64Array, position: number): number {
+export function placeUnder(
+  { rows, width, starts, right }: ChoiceData,
+  weights: Float64Array,
+  position: number,
+): number {
   const scores: { score: number; right: boolean }[] = [];
   for (let row = starts[position]!; row < starts[position + 1]!; row++) {
     let score = 0;

@@ -55,7 +55,10 @@ export function attackMapFigures(fens: readonly string[]): Figure[] {
       const square = squareNamed(name);
       const board = boards[index];
       if (square === undefined || !board) continue;
-      for (const [side, colour] of [['white', 'w'], ['black', 'b']] as const) {
+      for (const [side, colour] of [
+        ['white', 'w'],
+        ['black', 'b'],
+      ] as const) {
         const ours = attackersOf(map, side, square).map(squareName).sort().join();
         const theirs = games[index]?.attackers(name, colour).sort().join();
         const others = chessopsAttackers(board, side, square).map(makeSquare).sort().join();

@@ -37,7 +37,9 @@ function candidatesOf({ position, best }: JudgedPosition): Candidate[] {
 }
 
 /** Positions whose right move is among the candidates; those where it is not cannot teach. */
-function choiceData(files: readonly { file: string; importance: number }[]): ChoiceData & { file: number[]; missing: number[] } {
+function choiceData(
+  files: readonly { file: string; importance: number }[],
+): ChoiceData & { file: number[]; missing: number[] } {
   const rows: Float64Array[] = [];
   const right: number[] = [];
   const starts = [0];

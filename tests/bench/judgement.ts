@@ -58,10 +58,18 @@ export function judgement(file: string): void {
     return { theme: each.theme, man: each.man, place };
   });
   const print = (text: string) => process.stdout.write(`${text}\n`);
-  print(`${''.padEnd(40)} ${'number'.padStart(6)} ${'first'.padStart(8)} ${'of three'.padStart(8)} ${'of five'.padStart(8)}`);
+  print(
+    `${''.padEnd(40)} ${'number'.padStart(6)} ${'first'.padStart(8)} ${'of three'.padStart(8)} ${'of five'.padStart(8)}`,
+  );
   print(line('all positions', judged));
   const themes = [...new Set(judged.flatMap(({ theme }) => theme ?? []))].sort();
-  for (const theme of themes) print(line(`  ${theme}`, judged.filter((each) => each.theme === theme)));
+  for (const theme of themes)
+    print(
+      line(
+        `  ${theme}`,
+        judged.filter((each) => each.theme === theme),
+      ),
+    );
   for (const [letter, name] of Object.entries(MEN)) {
     const ofKind = judged.filter(({ man }) => man === letter);
     if (ofKind.length > 0) print(line(`  ${name}`, ofKind));

@@ -56,7 +56,9 @@ async function draggedFrames(page: Page): Promise<number[]> {
     const send = (type: string, square: string) => {
       const clientX = box.left + ((square.charCodeAt(0) - 96.5) * box.width) / 8;
       const clientY = box.top + ((8.5 - Number(square.charAt(1))) * box.height) / 8;
-      grid.dispatchEvent(new PointerEvent(type, { bubbles: true, clientX, clientY, pointerId: 1, button: 0, isPrimary: true }));
+      grid.dispatchEvent(
+        new PointerEvent(type, { bubbles: true, clientX, clientY, pointerId: 1, button: 0, isPrimary: true }),
+      );
     };
     grid.setPointerCapture = () => undefined;
     const times: number[] = [];

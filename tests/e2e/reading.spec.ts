@@ -120,7 +120,10 @@ test('a sentence lights its squares, and a square its sentences', async ({ page 
   await expect(sentence).toHaveAttribute('aria-current', 'true');
   await expect(page).toHaveURL(/statement=/);
   await page.reload();
-  await expect(page.getByRole('link', { name: /half-open for White and bites on nothing/ })).toHaveAttribute('aria-current', 'true');
+  await expect(page.getByRole('link', { name: /half-open for White and bites on nothing/ })).toHaveAttribute(
+    'aria-current',
+    'true',
+  );
 });
 
 test('the figure is the plate: SVG and PNG of the position shown', async ({ page, request }) => {

@@ -1,17 +1,6 @@
-/** Seeded chance, and the two mirrors of a position. */
+/** The two mirrors of a position. */
 import { mirrored, NO_CASTLING, parseFen, type Position } from '@/engine/board';
 import type { Square } from '@/engine/types';
-
-/** Numbers from 0 to 1, the same for the same seed (mulberry32, public domain). */
-export function seeded(seed: number): () => number {
-  let state = seed;
-  return () => {
-    state = (state + 0x6d2b79f5) | 0;
-    let mixed = Math.imul(state ^ (state >>> 15), 1 | state);
-    mixed = (mixed + Math.imul(mixed ^ (mixed >>> 7), 61 | mixed)) ^ mixed;
-    return ((mixed ^ (mixed >>> 14)) >>> 0) / 4294967296;
-  };
-}
 
 /** Colours swapped and the board turned over its middle: White's e4 becomes Black's e5. */
 export function flipped(position: Position): Position {
