@@ -24,3 +24,5 @@ export {
   type Reading,
   type Statement,
 } from './reading';
+export { checkRoute, routes } from './routes';
+export { encodeCheck, encodeRoutes } from './reading/encode-routes';

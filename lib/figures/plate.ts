@@ -5,7 +5,6 @@ import type { ThemeName } from '@/components/plate/tokens';
 import type { PlateRequest } from '@/components/plate/types';
 import { heatMapOf } from '@/engine';
 import type { Reading } from '@/engine/reading/schema';
-import { pngOf } from './png';
 
 /** What a figure is asked for. `width` in px; `man` for the layer of mobility. */
 export type PlateOptions = Pick<
@@ -20,9 +19,4 @@ export function plateSvg(reading: Reading, options: PlateOptions): string {
   const { theme, ...request } = options;
   const heat = options.layer === 'mobility' && options.man ? (heatMapOf(reading.fen, options.man) ?? null) : null;
   return drawSvg(plateOf({ ...request, reading, heat, print: theme === 'print' }), theme);
-}
-
-/** The figure as the bytes of a PNG, exactly as wide as asked. */
-export function platePng(reading: Reading, options: PlateOptions): Uint8Array {
-  return pngOf(plateSvg(reading, options), options.width);
 }
