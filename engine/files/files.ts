@@ -1,5 +1,5 @@
 /** Files: open or not, who controls them, where they lead in and what they aim at. */
-import { type AttackMap, QUEEN, ROOK, type SideIndex } from '../attacks';
+import { type AttackMap, KING, PAWN, QUEEN, ROOK, type SideIndex } from '../attacks';
 import { fileOf, manCode, relativeRank, viewOrder } from '../board';
 import { isSafeHere, type Safety } from '../exchange';
 import type { PawnReading, PawnValues } from '../pawns';
@@ -37,8 +37,8 @@ export interface FileValue {
    */
   readonly control: Side | 'shared' | 'none';
   /**
-   * Entry squares: on the side's 7th and 8th rank, no pawn of either side on the file before them, and a rook of
-   * the side would be safe there (Nimzowitsch, My System, from memory: the 7th and 8th rank are the aim of the file).
+   * Entry squares: on the side's 7th and 8th rank, no pawn and no enemy man that a rook could not safely take on the file
+   * before them, and a rook of the side would be safe there (Nimzowitsch, My System, from memory: the 7th and 8th rank are the aim of the file).
    */
   readonly entries: BySide<readonly Square[]>;
   /** The first enemy pawn on a half-open file, where it is isolated, backward or guarded by no pawn. */
@@ -109,11 +109,13 @@ function entriesOf(safety: Safety, side: Side, file: number): Square[] {
   const index: SideIndex = side === 'white' ? 0 : 1;
   const entries: Square[] = [];
   for (const square of squaresAlong(side, file)) {
-    const kind = board[square]! & 7;
-    const isKing = kind === 6;
-    if (relativeRank(square, side) >= 7 && kind !== 1 && !isKing && isSafeHere(safety, index, ROOK, square))
-      entries.push(square);
-    if (kind === 1) break;
+    const code = board[square]!;
+    const isEnemy = code !== 0 && code >> 3 !== index;
+    const kind = code & 7;
+    const safe = kind !== PAWN && !(isEnemy && kind === KING) && isSafeHere(safety, index, ROOK, square);
+    if (safe && relativeRank(square, side) >= 7) entries.push(square);
+    // A pawn shuts the file, and so does an enemy man that a rook cannot take without loss.
+    if (kind === PAWN || (isEnemy && !safe)) break;
   }
   return entries;
 }
