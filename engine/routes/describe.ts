@@ -1,5 +1,5 @@
 /** What is said beside a route: each step's safety, the enemy's soonest challenge, the duties left behind. */
-import { attackMap, attackersOf, BISHOP, isAttacked, KING, kindOn, menOfMask, PAWN, type SideIndex } from '../attacks';
+import { attackMap, attackersOf, BISHOP, isAttacked, KING, kindOn, PAWN, type SideIndex } from '../attacks';
 import { exchangeOn, lossOn, safetyOf, worthOf } from '../exchange';
 import { dutiesOf } from '../men';
 import { type PawnMap, pawnReach } from '../pawns';
@@ -94,7 +94,9 @@ export function dropsOf(
   return drops;
 }
 
-/** Squares of a side's pieces and pawns on a board, cheapest first. */
-export function menOf({ map, ground: { index, side } }: Field): Square[] {
-  return menOfMask(map, side, map.counts[index] === 32 ? -1 : (1 << map.counts[index]!) - 1);
+/** Squares of a side's men, cheapest first, equal ones from its own side on. */
+export function menOf({ map, ground: { index } }: Field): Square[] {
+  const flip = index === 0 ? 0 : 56;
+  const men = Array.from(map.squares.subarray(index << 5, (index << 5) + map.counts[index]!), (at) => at as Square);
+  return men.sort((a, b) => (map.board[a]! & 7) - (map.board[b]! & 7) || (a ^ flip) - (b ^ flip));
 }

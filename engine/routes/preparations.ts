@@ -6,7 +6,7 @@
  */
 import { attackMap, KING, kindOn, PAWN } from '../attacks';
 import { type Position, withMen, manOn } from '../board';
-import { isSafeMove, type Safety, safetyOf } from '../exchange';
+import { isSafeMove, safetyOf } from '../exchange';
 import type { Square } from '../types';
 import { isKingAttacked, moved } from './boards';
 import type { Field } from './placements';
@@ -36,7 +36,7 @@ export function preparationsFor(field: Field, ways: Ways, movesMax: number): Pre
     if (man === ways.from || place === KING || tried >= TRIED_MAX) continue;
     const isInWay = ways.blockers[man] === 1;
     if (!isInWay && place !== PAWN) continue;
-    for (const to of place === PAWN ? pawnSteps(field, man) : firstMoves(safety, man)) {
+    for (const to of place === PAWN ? pawnSteps(field, man) : firstMoves(field, man)) {
       if (!isInWay && !strikesUnsafe(field, ways, to)) continue;
       if (!isSafeMove(safety, man, to)) continue;
       tried++;
@@ -77,10 +77,12 @@ function pawnSteps({ map: { board }, ground: { index } }: Field, from: Square): 
   return (isHome && board[second] === 0 ? [next, second] : [next]) as Square[];
 }
 
-function firstMoves(safety: Safety, from: Square): Square[] {
+/** Safe quiet moves of a piece, from its own side on. */
+function firstMoves({ safety, ground: { index } }: Field, from: Square): Square[] {
   const { moves } = waysOf(safety, from, 1);
+  const flip = index === 0 ? 0 : 56;
   const squares: Square[] = [];
-  for (let to = 0; to < 64; to++) if (moves[to] === 1) squares.push(to as Square);
+  for (let at = 0; at < 64; at++) if (moves[at ^ flip] === 1) squares.push((at ^ flip) as Square);
   return squares;
 }
 

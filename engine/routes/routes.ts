@@ -40,7 +40,7 @@ export function routes(position: Position, options: RoutesOptions = {}): RoutesV
   const preparedOf = preparationsOfMen(field, ranking.placements, movesMax);
   const opened = [...preparedOf.values()].flatMap(({ ways, prepared }) => openedPosts(field, ways, prepared));
   const all: Choice[] = [...ranking.placements.map((placement) => ({ placement, needs: null })), ...opened];
-  all.sort((a, b) => meritOf(b) - meritOf(a) || byMerit(a.placement, b.placement));
+  all.sort(byMeritOf);
   const choices = all.slice(0, choicesMax).map((choice) => {
     const men = preparedOf.get(choice.placement.man);
     const found = men && choice.needs === null ? shortcuts(field, men.ways, men.prepared, choice.placement.post) : [];
@@ -59,6 +59,10 @@ const GRAIN = 1e-9;
 
 function meritOf({ placement, needs }: Choice): number {
   return Math.round(merit(placement, needs === null ? 0 : 1) / GRAIN) * GRAIN;
+}
+
+function byMeritOf(a: Choice, b: Choice): number {
+  return meritOf(b) - meritOf(a) || byMerit(a.placement, b.placement);
 }
 
 function sideAt({ board }: Position, square: Square): Side {
@@ -101,7 +105,7 @@ function openedPosts(field: Field, ways: Ways, prepared: readonly Prepared[]): C
       if (known === undefined || meritOf(choice) > meritOf(known)) best.set(post as Square, choice);
     }
   }
-  const likely = [...best.values()].sort((a, b) => meritOf(b) - meritOf(a)).slice(0, PREPARED_POSTS_MAX);
+  const likely = [...best.values()].sort(byMeritOf).slice(0, PREPARED_POSTS_MAX);
   for (const { placement } of likely) guardPlacement(placement);
   return likely;
 }

@@ -6,7 +6,7 @@ import type { Square } from '../types';
 import type { PlayedMove } from './desk';
 import { type Bounds, type Found, searchGain } from './search';
 
-/** `unknown`: the nodes ran out before anything was proved. */
+/** `unknown`: the nodes ran out before either was proved. */
 export const VERDICTS = ['holds', 'loses', 'unknown'] as const;
 export type Verdict = (typeof VERDICTS)[number];
 
@@ -46,10 +46,11 @@ export function guardOf(
   return guardFrom(searchGain(board, enemy, bounds, passedOver));
 }
 
-/** A guard's verdict from what the search found. */
+/** A guard's verdict from what the search found; a search that gave up has proved neither. */
 export function guardFrom({ gains, line, complete }: Found): GuardValue {
-  if (gains > 0) return { verdict: 'loses', line: line.map(lineMove), loses: gains };
-  return { verdict: complete ? 'holds' : 'unknown', line: [], loses: 0 };
+  if (!complete) return { verdict: 'unknown', line: [], loses: 0 };
+  if (gains <= 0) return { verdict: 'holds', line: [], loses: 0 };
+  return { verdict: 'loses', line: line.map(lineMove), loses: gains };
 }
 
 function lineMove(move: PlayedMove): LineMove {

@@ -47,18 +47,34 @@ const lineEnds = new Uint8Array(PLIES_MAX);
 const refuters = new Int32Array(PLIES_MAX * 2);
 const run = { nodes: 0, nodesMax: 0, checkPlies: 0, gaveUp: false };
 
-/** Searches a board with the side (0 White, 1 Black) to move; `passedOver` is the en-passant square, -1 for none. */
+/**
+ * Searches a board with the side (0 White, 1 Black) to move; `passedOver` is the en-passant square, -1 for none. With
+ * Black to move the board is turned first, so that nothing, not even where the nodes run out, hangs on the colour.
+ */
 export function searchGain(board: Readonly<Uint8Array>, side: number, bounds: Bounds, passedOver = -1): Found {
-  setUp(board, passedOver);
+  const flip = side === 0 ? 0 : 56;
+  setUp(side === 0 ? board : turned(board), passedOver < 0 ? -1 : passedOver ^ flip);
   run.nodes = 0;
   run.nodesMax = bounds.nodesMax;
   run.checkPlies = bounds.checkPlies;
   run.gaveUp = false;
   refuters.fill(0);
   const window = bounds.gainsMax ?? MATE;
-  const value = best(side, -window, window, bounds.quietPlies ?? 0, 0);
+  const value = best(0, -window, window, bounds.quietPlies ?? 0, 0);
   const gains = Math.max(-window, Math.min(window, value));
-  return { gains, line: Array.from(lines.subarray(0, lineEnds[0])), complete: !run.gaveUp, nodes: run.nodes };
+  const line = Array.from(lines.subarray(0, lineEnds[0]), (move) => move ^ (flip | (flip << 6)));
+  return { gains, line, complete: !run.gaveUp, nodes: run.nodes };
+}
+
+const turnedBoard = new Uint8Array(64);
+
+/** The board with colours swapped and turned over its middle; holds until the next call. */
+function turned(board: Readonly<Uint8Array>): Uint8Array {
+  for (let square = 0; square < 64; square++) {
+    const code = board[square ^ 56]!;
+    turnedBoard[square] = code === 0 ? 0 : code ^ 8;
+  }
+  return turnedBoard;
 }
 
 /** Gain of the side to move within the window, in pawns beyond what stands; `quiet` plies from here try every move. */

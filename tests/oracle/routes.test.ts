@@ -41,10 +41,10 @@ describe('ways', () => {
 });
 
 describe('routes', () => {
-  it('are legal move by move and as long as said, on 60 positions of real games', () => {
+  it('are legal move by move and as long as said, on 30 positions of real games', () => {
     const faults: string[] = [];
     let steps = 0;
-    for (const fen of realPositions(60)) {
+    for (const fen of realPositions(30)) {
       for (const choice of routes(positionOf(fen), { choicesMax: 20 }).choices) {
         const moves = movesOf(choice);
         steps += moves.length;
@@ -52,7 +52,7 @@ describe('routes', () => {
         if (!isReplayed(fen, moves)) faults.push(`${fen}: ${moves.join(' ')}`);
       }
     }
-    expect(steps).toBeGreaterThan(1200);
+    expect(steps).toBeGreaterThan(600);
     expect(faults).toEqual([]);
   }, 60_000);
 });

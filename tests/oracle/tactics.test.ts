@@ -6,10 +6,10 @@ import { positionOf } from '../support/random';
 import { realPositions } from '../support/real-positions';
 import { slowGain } from '../support/slow/gain';
 
-it('finds what plain search finds, with one quiet check, on 250 positions of real games', () => {
+it('finds what plain search finds, with one quiet check, on 80 positions of real games', () => {
   const wrong: string[] = [];
   let gains = 0;
-  for (const fen of realPositions(250)) {
+  for (const fen of realPositions(80)) {
     const { board, sideToMove, enPassant } = positionOf(fen);
     const found = searchGain(
       board,
@@ -21,7 +21,7 @@ it('finds what plain search finds, with one quiet check, on 250 positions of rea
     if (found.gains > 0) gains++;
     if (!found.complete || found.gains !== expected) wrong.push(`${fen}: ${found.gains} for ${expected}`);
   }
-  expect(gains).toBeGreaterThan(25);
+  expect(gains).toBeGreaterThan(8);
   expect(wrong).toEqual([]);
 }, 60_000);
 
