@@ -2,19 +2,21 @@
 import { attackersOf, kindOn, sideOn } from '../../attacks';
 import { fileName, fileOf, relativeRank, squareName } from '../../board';
 import type { DiagonalValue, FileValue } from '../../files';
-import { opponent, type Side, SIDES, type Square } from '../../types';
+import { bySide, opponent, type Side, SIDES, type Square } from '../../types';
 import type { FilesFact } from '../facts/files';
 import type { ReadingValues } from '../values';
-import { manAt, namesInView } from './names';
+import { countOf, manAt, namesInView } from './names';
 
 /** Everything worth saying about files, the seventh rank and diagonals. */
 export function filesFacts(values: ReadingValues): FilesFact[] {
   const facts: FilesFact[] = [];
+  // Files are spoken of for sides that have a rook or a queen to use them.
+  const hasHeavy = bySide((side) => countOf(values, side, 'rook') + countOf(values, side, 'queen') > 0);
   for (const file of values.files) {
-    if (file.status === 'closed') continue;
+    if (file.status === 'closed' || (!hasHeavy.white && !hasHeavy.black)) continue;
     ownership(values, file, facts);
     for (const side of SIDES) {
-      halfOpen(values, file, side, facts);
+      if (hasHeavy[side]) halfOpen(values, file, side, facts);
       doubled(values, file, side, facts);
     }
   }

@@ -26,12 +26,13 @@ function oneKing(values: ReadingValues, king: KingValue): KingFact[] {
   if (checkers.length > 0) {
     facts.push({ ...base, id: 'in-check', checkers, squares: [at, ...checkers.map(({ square }) => square)] });
   }
-  shelter(king, base, facts);
   luft(values, king, base, facts);
   const heavy = values.files
     .filter(({ file }) => king.openBeside.includes(file))
     .flatMap((file) => file.heavy[enemy].map((square) => manAt(values, square)));
   const hasHeavy = values.men.some((man) => man.side === enemy && (man.kind === 'rook' || man.kind === 'queen'));
+  // A king's cover matters while the enemy has a rook or a queen.
+  if (hasHeavy) shelter(king, base, facts);
   if (king.openBeside.length > 0 && hasHeavy) {
     const files = king.openBeside.map(fileName);
     facts.push({

@@ -23,7 +23,7 @@ export const FILES_PHRASES: Phrases<FilesFact> = {
   }),
   'file-open-no-entry': ({ file }) => ({
     head: `The ${file}-file is open and leads nowhere`,
-    body: 'no square on its last two ranks is safe for a rook of either side',
+    body: 'neither side has an entry square on its last two ranks',
   }),
   'half-open-target': ({ side, file, target, why, heavy }) => ({
     head: `The ${file}-file is half-open for ${name(side)} and bites on ${target}`,

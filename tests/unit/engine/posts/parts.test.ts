@@ -18,7 +18,8 @@ function plainCounts(letters: readonly string[], at: number): Partial<Record<Par
   const heavy = [...rooks, ...on('Q')];
   const pieces = [...on('N'), ...on('B'), ...heavy];
   const pawnOn = (letter: string, of: number) => on(letter).some((pawn) => file(pawn) === of);
-  const steps = (from: number, to: number) => Math.max(Math.abs(file(from) - file(to)), Math.abs(rank(from) - rank(to)));
+  const steps = (from: number, to: number) =>
+    Math.max(Math.abs(file(from) - file(to)), Math.abs(rank(from) - rank(to)));
   const struck = (square: number, by: readonly number[]) => by.filter((from) => attacks(letters, from, square)).length;
   const equals: Record<string, readonly string[]> = { N: ['n', 'b'], B: ['n', 'b'], R: ['r'], Q: ['q'] };
   const fromRim = (line: number) => Math.min(line, 7 - line);
@@ -78,7 +79,12 @@ describe('counts', () => {
   ] as const)('%s', (_reason, fen, name, count) => {
     const position = positionOf(fen);
     const row = new Float64Array(PARTS.length);
-    countParts(groundOf(position, 'white'), attackMap(position), fen.includes('3N4/2P1P3') || !fen.includes('3p4') ? 35 : 27, row);
+    countParts(
+      groundOf(position, 'white'),
+      attackMap(position),
+      fen.includes('3N4/2P1P3') || !fen.includes('3p4') ? 35 : 27,
+      row,
+    );
     expect(row[PLACE[name]]).toBe(count);
   });
 

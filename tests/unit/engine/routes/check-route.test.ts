@@ -60,7 +60,8 @@ describe('the JSON', () => {
         expect(routeCheckSchema.parse(JSON.parse(JSON.stringify(check)))).toEqual(check);
         checks++;
         // What the routes recommend holds when it is checked, unless the guard already said that it loses.
-        if (guard.verdict === 'holds' && stops.length > 1) expect(check.holds, `${fen} ${man} ${stops.join(' ')}`).toBe(true);
+        if (guard.verdict === 'holds' && stops.length > 1)
+          expect(check.holds, `${fen} ${man} ${stops.join(' ')}`).toBe(true);
       }
     }
     expect(checks).toBeGreaterThan(80);

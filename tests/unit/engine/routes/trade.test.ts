@@ -20,7 +20,9 @@ describe('rules of the trade', () => {
   });
 
   it('a knight on a supported post in the enemy half ranks above the same knight at home', () => {
-    const { choices } = routes(positionOf('r4rk1/1p3ppp/p2p4/2p1p3/2P1P3/2N5/PP3PPP/R4RK1 w - - 0 1'), { from: sq('c3') });
+    const { choices } = routes(positionOf('r4rk1/1p3ppp/p2p4/2p1p3/2P1P3/2N5/PP3PPP/R4RK1 w - - 0 1'), {
+      from: sq('c3'),
+    });
     const post = choices.find((choice) => choice.post === sq('d5'));
     const home = choices.find((choice) => choice.post === sq('b1'));
     expect(post?.gain).toBeGreaterThan(0);
@@ -103,7 +105,9 @@ describe('answers', () => {
     expect(routes(start, { from: sq('e2') }).choices).toEqual([]);
     expect(routes(start, { from: sq('e4') }).choices).toEqual([]);
     expect(routes(start, { choicesMax: 5 }).choices).toHaveLength(5);
-    expect(routes(start, { side: 'black', movesMax: 1 }).choices.every(({ moves, needs }) => moves === 1 || needs)).toBe(true);
+    expect(
+      routes(start, { side: 'black', movesMax: 1 }).choices.every(({ moves, needs }) => moves === 1 || needs),
+    ).toBe(true);
     expect(routes(start, { from: sq('g8') }).side).toBe('black');
   });
 });
