@@ -39,7 +39,7 @@ export function plateOf(request: PlateRequest): Plate {
   const board: BoardPlace = { x: (width - side) / 2 + inset, y: 1 + inset, size, flipped };
   const noted = wanted === 'none' ? [] : notesOf(reading, request.noted ?? reading.lead);
 
-  const where = `${n(board.x)} ${n(board.y)} ${n(size)} ${flipped}${print}`;
+  const where = `${id} ${n(board.x)} ${n(board.y)} ${n(size)} ${flipped}${print}`;
   const marks: Mark[] = [
     { type: 'group', key: 'ground', stamp: where, marks: ground(board, id) },
     { type: 'group', key: 'under', marks: under(request, board, id) },

@@ -137,3 +137,15 @@ test('the figure is the plate: SVG and PNG of the position shown', async ({ page
   const png = await request.get((href ?? '').replace('plates.svg', 'plates.png'));
   expect((await png.body()).subarray(1, 4).toString()).toBe('PNG');
 });
+
+test('every pattern that the plate uses is there, before and after the page comes alive', async ({ page }) => {
+  const screen = new ReadingScreen(page);
+  await screen.open();
+  await expect(screen.board).toBeVisible();
+  const missing = await page.evaluate(() =>
+    [...document.querySelectorAll('svg[role=img] [fill^="url(#"]')]
+      .map((element) => /#([^)]+)/.exec(element.getAttribute('fill') ?? '')?.[1] ?? '')
+      .filter((id) => document.getElementById(id) === null),
+  );
+  expect(missing).toEqual([]);
+});

@@ -22,6 +22,9 @@ function plainCounts(letters: readonly string[], at: number): Partial<Record<Par
     Math.max(Math.abs(file(from) - file(to)), Math.abs(rank(from) - rank(to)));
   const struck = (square: number, by: readonly number[]) => by.filter((from) => attacks(letters, from, square)).length;
   const equals: Record<string, readonly string[]> = { N: ['n', 'b'], B: ['n', 'b'], R: ['r'], Q: ['q'] };
+  const worth: Record<string, number> = { p: 1, n: 3, b: 3, r: 5, q: 9, k: 100 };
+  const price = (square: number) => worth[(letters[square] ?? '').toLowerCase()] ?? 0;
+  const enemies = squares.filter((square) => letters[square] !== '' && !isWhite(letters[square] ?? ''));
   const fromRim = (line: number) => Math.min(line, 7 - line);
   return {
     hanging: squares
@@ -41,6 +44,10 @@ function plainCounts(letters: readonly string[], at: number): Partial<Record<Par
     knightCentre: letters[at] === 'N' ? fromRim(file(at)) + fromRim(rank(at)) : 0,
     fromOwnKing: steps(at, on('K')[0] ?? at),
     fromEnemyKing: steps(at, on('k')[0] ?? at),
+    check: struck(on('k')[0] ?? at, squares.filter((square) => isWhite(letters[square] ?? ''))) > 0 ? 1 : 0,
+    underCheaper: pieces.filter((man) =>
+      enemies.some((from) => price(from) < price(man) && attacks(letters, from, man)),
+    ).length,
     facesEqual: pieces.filter((man) =>
       squares.some((from) => equals[letters[man] ?? '']?.includes(letters[from] ?? '') && attacks(letters, from, man)),
     ).length,
@@ -93,10 +100,10 @@ describe('counts', () => {
       const position = positionOf(fen);
       const row = new Float64Array(PARTS.length);
       countParts(groundOf(position, 'white'), attackMap(position), 5, row);
-      return row[PLACE.betweenToCastle];
+      return [row[PLACE.betweenToCastle], row[PLACE.castlingKept]];
     };
-    expect(between('4k3/8/8/8/8/8/8/4KBNR w K - 0 1')).toBe(2);
-    expect(between('4k3/8/8/8/8/8/8/4KBNR w - - 0 1')).toBe(0);
+    expect(between('4k3/8/8/8/8/8/8/4KBNR w K - 0 1')).toEqual([2, 1]);
+    expect(between('4k3/8/8/8/8/8/8/4KBNR w - - 0 1')).toEqual([0, 0]);
   });
 });
 
