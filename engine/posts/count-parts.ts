@@ -33,7 +33,7 @@ export function countParts(ground: Ground, map: AttackMap, at: number, row: Floa
   countMen(ground, map, row);
   countMan(ground, map, at, row);
   countPawnDuties(ground, map, row);
-  row[PLACE.betweenToCastle] = betweenToCastle(ground, map.board);
+  countCastling(ground, map.board, row);
 }
 
 /** Centre squares d4, e4, d5, e5 as 1. */
@@ -88,6 +88,7 @@ const heavyOnFile = new Uint8Array(8);
 function countMen(ground: Ground, map: AttackMap, row: Float64Array): void {
   const { index, ownOnFile, enemyOnFile, targets, weak, pawnsWay } = ground;
   const { board, attackers } = map;
+  const minors = enemy[KNIGHT]! | enemy[BISHOP]!;
   heavyOnFile.fill(0);
   for (let number = 0; number < map.counts[index]!; number++) {
     const square = map.squares[(index << 5) | number]!;
@@ -98,8 +99,11 @@ function countMen(ground: Ground, map: AttackMap, row: Float64Array): void {
     if (kind === PAWN || kind === KING) continue;
     const file = square & 7;
     const rank = index === 0 ? square >> 3 : 7 - (square >> 3);
-    const equals = kind <= BISHOP ? enemy[KNIGHT]! | enemy[BISHOP]! : enemy[kind]!;
-    if ((attackers[((index ^ 1) << 6) | square]! & equals) !== 0) row[PLACE.facesEqual]!++;
+    const equals = kind <= BISHOP ? minors : enemy[kind]!;
+    const cheaper = kind <= BISHOP ? enemy[PAWN]! : enemy[PAWN]! | minors | (kind === QUEEN ? enemy[ROOK]! : 0);
+    const attackedBy = attackers[((index ^ 1) << 6) | square]!;
+    if ((attackedBy & equals) !== 0) row[PLACE.facesEqual]!++;
+    if ((attackedBy & cheaper) !== 0) row[PLACE.underCheaper]!++;
     if (weak[square] === 1) row[PLACE.weakSquares]!++;
     if (pawnsWay[square] === 1) row[PLACE.inPawnsWay]!++;
     if (kind === BISHOP) row[PLACE.diagonal]! += diagonalOf(board, index, square);
@@ -166,7 +170,9 @@ function countMan(ground: Ground, map: AttackMap, at: number, row: Float64Array)
   const ownKing = map.kings[ground.index]!;
   const enemyKing = map.kings[ground.index ^ 1]!;
   if (ownKing >= 0) row[PLACE.fromOwnKing] = kingDistance(at as Square, ownKing as Square);
-  if (enemyKing >= 0) row[PLACE.fromEnemyKing] = kingDistance(at as Square, enemyKing as Square);
+  if (enemyKing < 0) return;
+  if (map.attackers[(ground.index << 6) | enemyKing] !== 0) row[PLACE.check] = 1;
+  row[PLACE.fromEnemyKing] = kingDistance(at as Square, enemyKing as Square);
 }
 
 function fromRim(line: number): number {
@@ -182,8 +188,8 @@ function countPawnDuties({ index, targets, ownWeak }: Ground, { attackers }: Att
   }
 }
 
-/** Men between king and rook for the nearer castling whose right and rook are still there; 0 without any. */
-function betweenToCastle({ position, index }: Ground, board: Readonly<Uint8Array>): number {
+/** Castlings whose right and rook are still there, and the men between king and rook for the nearer one. */
+function countCastling({ position, index }: Ground, board: Readonly<Uint8Array>, row: Float64Array): void {
   const { castling } = position;
   const base = index === 0 ? 0 : 56;
   const rook = (index << 3) | ROOK;
@@ -192,10 +198,8 @@ function betweenToCastle({ position, index }: Ground, board: Readonly<Uint8Array
     for (let square = base + from; square <= base + to; square++) if (board[square] !== 0) count++;
     return count;
   };
-  const short = index === 0 ? castling.whiteKing : castling.blackKing;
-  const long = index === 0 ? castling.whiteQueen : castling.blackQueen;
-  let nearest = NEVER;
-  if (short && board[base + 7] === rook) nearest = men(5, 6);
-  if (long && board[base] === rook) nearest = Math.min(nearest, men(1, 3));
-  return nearest === NEVER ? 0 : nearest;
+  const short = (index === 0 ? castling.whiteKing : castling.blackKing) && board[base + 7] === rook;
+  const long = (index === 0 ? castling.whiteQueen : castling.blackQueen) && board[base] === rook;
+  row[PLACE.castlingKept] = (short ? 1 : 0) + (long ? 1 : 0);
+  if (short || long) row[PLACE.betweenToCastle] = Math.min(short ? men(5, 6) : NEVER, long ? men(1, 3) : NEVER);
 }

@@ -37,9 +37,21 @@ export const PARTS = [
   },
   {
     name: 'threatens',
-    counts: '1 where something would be won if the enemy passed',
+    counts: '1 where something would be won if the enemy passed (a check apart: he cannot)',
     weight: 1.1,
     reason: 'A threat gains the time for the next improvement.',
+  },
+  {
+    name: 'check',
+    counts: '1 where the enemy king stands in check',
+    weight: -1.97,
+    reason: 'A check that wins nothing only helps the king to a better square.',
+  },
+  {
+    name: 'underCheaper',
+    counts: 'own pieces that a cheaper enemy man attacks',
+    weight: -0.7,
+    reason: 'What a cheaper man attacks must move again.',
   },
   {
     name: 'pawnHit',
@@ -181,6 +193,12 @@ export const PARTS = [
     reason: 'Bring the minor men first, and the worst placed before the best.',
   },
   { name: 'atHome', counts: 'own knights and bishops on the first rank', weight: -0.23, reason: 'Develop.' },
+  {
+    name: 'castlingKept',
+    counts: 'castlings whose right and rook are still there',
+    weight: 0.55,
+    reason: 'Do not give castling away by a rook move.',
+  },
   {
     name: 'betweenToCastle',
     counts: 'men in the way of the nearer castling still allowed',

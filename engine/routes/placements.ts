@@ -129,8 +129,10 @@ export function guardPlacement(placement: Placement): void {
   }
   placement.guard = heaviest;
   there[PLACE.lost] = capped(lost);
-  const threat = searchGain(moved(field.map.board, man, post), index, THREAT_BOUNDS);
-  there[PLACE.threatens] = threat.gains > 0 ? 1 : 0;
+  // In check the enemy cannot pass, so that nothing more is threatened.
+  const threat =
+    there[PLACE.check] === 1 ? 0 : searchGain(moved(field.map.board, man, post), index, THREAT_BOUNDS).gains;
+  there[PLACE.threatens] = threat > 0 ? 1 : 0;
   placement.gain = gainOf(placement);
 }
 

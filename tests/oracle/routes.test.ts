@@ -41,10 +41,10 @@ describe('ways', () => {
 });
 
 describe('routes', () => {
-  it('are legal move by move and as long as said, on 30 positions of real games', () => {
+  it('are legal move by move and as long as said, on 20 positions of real games', () => {
     const faults: string[] = [];
     let steps = 0;
-    for (const fen of realPositions(30)) {
+    for (const fen of realPositions(20)) {
       for (const choice of routes(positionOf(fen), { choicesMax: 20 }).choices) {
         const moves = movesOf(choice);
         steps += moves.length;
@@ -52,7 +52,7 @@ describe('routes', () => {
         if (!isReplayed(fen, moves)) faults.push(`${fen}: ${moves.join(' ')}`);
       }
     }
-    expect(steps).toBeGreaterThan(600);
+    expect(steps).toBeGreaterThan(400);
     expect(faults).toEqual([]);
   }, 60_000);
 });

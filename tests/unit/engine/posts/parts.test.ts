@@ -44,7 +44,13 @@ function plainCounts(letters: readonly string[], at: number): Partial<Record<Par
     knightCentre: letters[at] === 'N' ? fromRim(file(at)) + fromRim(rank(at)) : 0,
     fromOwnKing: steps(at, on('K')[0] ?? at),
     fromEnemyKing: steps(at, on('k')[0] ?? at),
-    check: struck(on('k')[0] ?? at, squares.filter((square) => isWhite(letters[square] ?? ''))) > 0 ? 1 : 0,
+    check:
+      struck(
+        on('k')[0] ?? at,
+        squares.filter((square) => isWhite(letters[square] ?? '')),
+      ) > 0
+        ? 1
+        : 0,
     underCheaper: pieces.filter((man) =>
       enemies.some((from) => price(from) < price(man) && attacks(letters, from, man)),
     ).length,
