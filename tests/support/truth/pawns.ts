@@ -117,3 +117,10 @@ export function islandCount(scene: Scene, side: Side): number {
   const held = [0, 1, 2, 3, 4, 5, 6, 7].map((file) => pawnsOnFile(scene, side, file).length > 0);
   return held.filter((here, file) => here && !held[file - 1]).length;
 }
+
+/** Whether pawns fix the pawn: one stands before it or holds the square, and it attacks none. */
+export function isFixedByPawns(scene: Scene, side: Side, pawn: number): boolean {
+  const stop = step(side, pawn, 0, 1);
+  const held = scene.hasPawn(other(side), stop) || pawnAttackers(scene, other(side), stop).length > 0;
+  return held && !strikesPawn(scene, side, pawn);
+}

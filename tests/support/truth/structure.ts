@@ -1,0 +1,347 @@
+/** Statements about pawns, recomputed. */
+import type { MinorityAttackFact, StructureFact } from '@/engine/explain/facts/structure';
+import type { Checkers, FactOf, Told } from './claim';
+import {
+  canTake,
+  headToHead,
+  inTheWay,
+  isBackward,
+  isIsolated,
+  isPassed,
+  islandCount,
+  neighbours,
+  pawnAttackers,
+  pawnMoves,
+  pawnsOnFile,
+  road,
+} from './pawns';
+import { colourOf, fileLetter, fileOf, nameOf, other, rankFor, type Scene, type Side, squareOf, step } from './scene';
+import { structureTold } from './structures';
+import {
+  enemyNamed,
+  files,
+  inOrder,
+  list,
+  manOrNull,
+  many,
+  named,
+  names,
+  num,
+  sentences,
+  start,
+  the,
+  verb,
+} from './words';
+
+type Pair = readonly [string, string];
+
+/** Pairs head to head, the pawn of the side to move first, in its order. */
+function rams(scene: Scene): Pair[] {
+  const mine = scene.mover;
+  const pairs = headToHead(scene);
+  const order = inOrder(
+    pairs.map((pair) => pair[mine]),
+    mine,
+  );
+  return order.map((at) => {
+    const pair = pairs.find((each) => each[mine] === at);
+    return [nameOf(at), nameOf(pair ? pair[other(mine)] : at)];
+  });
+}
+
+const against = (pairs: readonly Pair[]) => list(pairs.map(([one, two]) => `${one} against ${two}`));
+const central = (square: number) => fileOf(square) === 3 || fileOf(square) === 4;
+
+/** Pawn pairs that attack each other with one of them on the d- or e-file. */
+function tension(scene: Scene): Pair[] {
+  const mine = scene.mover;
+  return inOrder(scene.pawns(mine), mine).flatMap((pawn) =>
+    [-1, 1]
+      .map((side) => step(mine, pawn, side, 1))
+      .filter((to) => scene.hasPawn(other(mine), to) && (central(pawn) || central(to)))
+      .map((to): Pair => [nameOf(pawn), nameOf(to)]),
+  );
+}
+
+/** The front pawn has no own pawn before it on its file. */
+const isFront = (scene: Scene, side: Side, pawn: number) => !road(side, pawn).some((at) => scene.hasPawn(side, at));
+
+function passed(scene: Scene, { side, pawn }: FactOf<'passed-pawn'>): Told {
+  const at = squareOf(pawn);
+  const guards = names(pawnAttackers(scene, side, at), side);
+  const blocker = manOrNull(scene, step(side, at, 0, 1));
+  const moves = pawnMoves(side, at, road(side, at).at(-1) ?? at);
+  const last = `${many(moves, 'move')} from the last rank`;
+  const noStop = `no ${other(side)} pawn can stop it`;
+  const text =
+    guards.length > 0
+      ? sentences(
+          `The pawn on ${pawn} is a protected passed pawn: ${list(guards)} ${verb(guards.length, 'guard')} it, and ${noStop}`,
+          blocker ? `${start(the(blocker))} stands in its way` : `It is ${last}`,
+        )
+      : sentences(
+          `The pawn on ${pawn} is passed: ${noStop}${blocker ? `, but ${the(blocker)} stands in its way` : `, ${last}`}`,
+        );
+  return {
+    facts: { pawn, moves, blocker, guards },
+    text,
+    claims: {
+      'a pawn of the side': scene.hasPawn(side, at),
+      'no enemy pawn ahead': isPassed(scene, side, at),
+      'no own pawn ahead': isFront(scene, side, at),
+    },
+  };
+}
+
+function lever(scene: Scene, fact: FactOf<'lever-ready'>): Told {
+  const { side } = fact;
+  const [pawn, on, target] = [squareOf(fact.pawn), squareOf(fact.on), squareOf(fact.against)];
+  const moves = pawnMoves(side, pawn, on);
+  const way = inTheWay(scene, side, pawn, on);
+  const blocker = manOrNull(scene, way);
+  const supported = pawnAttackers(scene, side, on).length > 0;
+  const support = supported ? ', with a pawn to support it' : '';
+  const text = blocker
+    ? `The lever ${fact.pawn}-${fact.on} waits: ${the(blocker)} stands in its way; it would strike at ${fact.against}${support}.`
+    : moves === 1
+      ? `The lever ${fact.pawn}-${fact.on} is ready: it strikes at ${fact.against}${support}.`
+      : `${named(side)} has the lever ${fact.on} against ${fact.against} in ${many(moves, 'move')}: the pawn comes from ${fact.pawn}${support}.`;
+  return {
+    facts: { pawn: fact.pawn, on: fact.on, against: fact.against, moves, blocker, supported },
+    text,
+    claims: {
+      'own pawn': scene.hasPawn(side, pawn),
+      'same file, ahead': fileOf(pawn) === fileOf(on) && rankFor(side, on) > rankFor(side, pawn),
+      'enemy pawn there': scene.hasPawn(other(side), target),
+      'struck from there': [-1, 1].some((each) => step(side, on, each, 1) === target),
+      'no pawn for good in the way': way < 0 || scene.kindOn(way) !== 'pawn',
+      'one move where it is ready': fact.id === 'lever-coming' || moves === 1,
+      'free to move where it is ready': blocker !== null || moves > 1 || scene.moves(pawn).includes(on),
+    },
+  };
+}
+
+const WINGS = { queenside: [0, 1, 2], centre: [3, 4], kingside: [5, 6, 7] } as const;
+type Wing = keyof typeof WINGS;
+const onWing = (scene: Scene, side: Side, wing: Wing) =>
+  scene.pawns(side).filter((pawn) => WINGS[wing].some((file) => file === fileOf(pawn)));
+
+function minority(scene: Scene, fact: MinorityAttackFact): Told {
+  const { side, wing } = fact;
+  const [pawn, on, target] = [squareOf(fact.pawn), squareOf(fact.on), squareOf(fact.against)];
+  const own = onWing(scene, side, wing).length;
+  const enemy = onWing(scene, other(side), wing).length;
+  const moves = pawnMoves(side, pawn, on);
+  const strike =
+    moves === 0
+      ? `${fact.pawn} strikes at ${fact.against} now`
+      : `the pawn from ${fact.pawn} strikes at ${fact.against} from ${fact.on}, ${many(moves, 'move')} away`;
+  const inner = wing === 'queenside' ? 2 : 5;
+  return {
+    facts: { wing, own, enemy, pawn: fact.pawn, on: fact.on, against: fact.against, moves },
+    text: `${named(side)} has a minority attack on the ${wing}: ${many(own, 'pawn')} against ${num(enemy)}, and ${strike}.`,
+    claims: {
+      'fewer pawns': own < enemy,
+      'own pawn': scene.hasPawn(side, pawn),
+      'enemy pawn': scene.hasPawn(other(side), target) && fileOf(target) === inner,
+      'no own pawn on that file': pawnsOnFile(scene, side, inner).length === 0,
+      'struck from there': [-1, 1].some((each) => step(side, on, each, 1) === target),
+      'nobody in the way': moves === 0 || inTheWay(scene, side, pawn, on) < 0,
+    },
+  };
+}
+
+function majority(scene: Scene, { id, side, wing }: FactOf<'majority'>): Told {
+  const own = onWing(scene, side, wing);
+  const enemy = onWing(scene, other(side), wing);
+  const filesHeld = (pawns: readonly number[]) => new Set(pawns.map(fileOf)).size;
+  const crippled = filesHeld(own) <= filesHeld(enemy);
+  const doubled = crippled
+    ? names(
+        own.filter((pawn) => pawnsOnFile(scene, side, fileOf(pawn)).length > 1),
+        side,
+      )
+    : [];
+  const where = wing === 'centre' ? 'in the centre' : `on the ${wing}`;
+  const count = `${many(own.length, 'pawn')} against ${enemy.length === 0 ? 'none' : num(enemy.length)}`;
+  return {
+    facts: { wing, own: own.length, enemy: enemy.length, doubled },
+    text: crippled
+      ? `${named(side)}’s majority ${where} is crippled: ${count}, but with ${list(doubled)} doubled it makes no passed pawn by itself.`
+      : `${named(side)} has the majority ${where}: ${count}.`,
+    claims: { more: own.length > enemy.length, 'id fits': crippled === (id === 'crippled-majority') },
+  };
+}
+
+export const STRUCTURE: Checkers<StructureFact> = {
+  'named-structure': structureTold,
+  'centre-fixed': (scene) => {
+    const pairs = rams(scene).filter(([pawn]) => central(squareOf(pawn)));
+    const pawns = [...scene.pawns('white'), ...scene.pawns('black')];
+    const takesThere = pawns.filter((pawn) => {
+      const side = scene.sideOn(pawn) ?? 'white';
+      return [-1, 1].some((each) => {
+        const to = step(side, pawn, each, 1);
+        if (to < 0 || !(central(pawn) || central(to))) return false;
+        return scene.hasPawn(other(side), to) || (to === scene.passing && side === scene.mover);
+      });
+    });
+    const stuck = pawns.filter(central).every((pawn) => {
+      const side = scene.sideOn(pawn) ?? 'white';
+      return scene.advances(pawn).length === 0 && !canTake(scene, side, pawn);
+    });
+    return {
+      facts: { pairs },
+      text: `The centre is fixed: ${against(pairs)}, and no pawn can take there now.`,
+      claims: {
+        'a pair head to head': pairs.length > 0,
+        'no centre pawn can step or take': stuck,
+        'no pawn takes a pawn there': takesThere.length === 0,
+      },
+    };
+  },
+  'centre-open': (scene) => ({
+    facts: { pairs: [] },
+    text: 'The centre is open: no pawn stands on the d-file or the e-file.',
+    claims: { 'no pawn there': ![...scene.pawns('white'), ...scene.pawns('black')].some(central) },
+  }),
+  'centre-tension': (scene) => {
+    const pairs = tension(scene);
+    return {
+      facts: { pairs },
+      text: `The centre is in tension: ${list(
+        pairs.map(([one, two]) => `${one} and ${two}`),
+        'as well as',
+      )} attack each other.`,
+      claims: { 'at least one pair': pairs.length > 0 },
+    };
+  },
+  'isolated-pawn': (scene, { side, pawn }) => {
+    const at = squareOf(pawn);
+    const next = [fileOf(at) - 1, fileOf(at) + 1].filter((file) => file >= 0 && file < 8).map(fileLetter);
+    const halfOpen = pawnsOnFile(scene, other(side), fileOf(at)).length === 0;
+    return {
+      facts: { pawn, neighbours: next, halfOpen },
+      text: sentences(
+        `The pawn on ${pawn} is isolated: no ${side} pawn stands on the ${files(next)} to guard it`,
+        halfOpen ? `Its file is half-open for ${enemyNamed(side)}` : null,
+      ),
+      claims: { 'own pawn': scene.hasPawn(side, at), alone: isIsolated(scene, side, at) },
+    };
+  },
+  'doubled-pawns': (scene, { side, pawns }) => {
+    const file = fileOf(squareOf(pawns[0] ?? 'a1'));
+    const all = pawnsOnFile(scene, side, file);
+    const isolated = all.every((pawn) => isIsolated(scene, side, pawn));
+    return {
+      facts: { pawns: names(all, side), isolated },
+      text: `${named(side)}’s pawns on ${list(names(all, side))} are doubled: they cannot guard each other${
+        isolated ? ', and no neighbour can guard them' : ''
+      }.`,
+      claims: { 'two or more': all.length > 1 },
+    };
+  },
+  'backward-pawn': (scene, { side, pawn }) => {
+    const at = squareOf(pawn);
+    const stop = step(side, at, 0, 1);
+    const enemy = other(side);
+    const byPawn = pawnAttackers(scene, enemy, stop).length > 0;
+    const stopHeldBy = byPawn ? 'pawn' : scene.command(stop) === enemy ? 'command' : null;
+    const halfOpen = pawnsOnFile(scene, enemy, fileOf(at)).length === 0;
+    const file = fileLetter(fileOf(at));
+    const held =
+      stopHeldBy === 'pawn'
+        ? `a ${enemy} pawn holds its stop square ${nameOf(stop)}`
+        : stopHeldBy === 'command'
+          ? `${named(enemy)} commands its stop square ${nameOf(stop)}`
+          : `a ${enemy} pawn bears on its way forward`;
+    return {
+      facts: { pawn, file, stop: nameOf(stop), stopHeldBy, halfOpen },
+      text: sentences(
+        `The pawn on ${pawn} is backward: no pawn can come to guard it, and ${held}`,
+        halfOpen ? `The ${file}-file is half-open for ${named(enemy)}` : null,
+      ),
+      claims: { 'own pawn': scene.hasPawn(side, at), backward: isBackward(scene, side, at) },
+    };
+  },
+  'passed-pawn': passed,
+  'protected-passed-pawn': passed,
+  'candidate-pawn': (scene, { side, pawn }) => {
+    const at = squareOf(pawn);
+    const ahead = (one: number) => rankFor(side, one) > rankFor(side, at);
+    const own = neighbours(scene, side, at).filter((one) => !ahead(one)).length;
+    const enemy = neighbours(scene, other(side), at).filter(ahead).length;
+    const file = fileLetter(fileOf(at));
+    return {
+      facts: { pawn, file },
+      text: `The pawn on ${pawn} can become passed: no pawn stands before it on the ${file}-file, and beside it ${named(side)} is not outnumbered.`,
+      claims: {
+        'own pawn': scene.hasPawn(side, at),
+        'not passed yet': !isPassed(scene, side, at),
+        'no pawn before it': !road(side, at).some((one) => scene.kindOn(one) === 'pawn'),
+        'not outnumbered': own >= enemy,
+      },
+    };
+  },
+  'pawn-chain': (scene, { side, pawns }) => {
+    const chain = pawns.map(squareOf);
+    const [base = 0, head = 0] = [chain[0], chain.at(-1)];
+    return {
+      facts: { pawns: chain.map(nameOf) },
+      text: `${named(side)}’s pawn chain runs from ${nameOf(base)} to ${nameOf(head)}: its base on ${nameOf(base)} has no pawn to guard it.`,
+      claims: {
+        'three or more own pawns': chain.length > 2 && chain.every((pawn) => scene.hasPawn(side, pawn)),
+        'each guards the next': chain.every(
+          (pawn, index) => index === 0 || [-1, 1].some((each) => step(side, chain[index - 1] ?? 0, each, 1) === pawn),
+        ),
+        'nothing guards the base': pawnAttackers(scene, side, base).length === 0,
+        'the head guards no further pawn': ![-1, 1].some((each) => scene.hasPawn(side, step(side, head, each, 1))),
+      },
+    };
+  },
+  rams: (scene) => {
+    const pairs = rams(scene);
+    return {
+      facts: { pairs },
+      text: `${start(num(pairs.length))} pairs of pawns stand head to head: ${against(pairs)}.`,
+      claims: { 'two or more': pairs.length > 1 },
+    };
+  },
+  'lever-ready': lever,
+  'lever-coming': lever,
+  'minority-attack': minority,
+  majority,
+  'crippled-majority': majority,
+  'hanging-pawns': (scene, { side, pawns }) => {
+    const two = pawns.map(squareOf);
+    const held = two.map(fileOf);
+    return {
+      facts: { pawns: two.map(nameOf) },
+      text: `${named(side)}’s pawns on ${list(two.map(nameOf))} hang: no own pawn stands beside them, and both files are half-open for ${enemyNamed(side)}.`,
+      claims: {
+        'two own pawns abreast': two.length === 2 && two.every((at) => scene.hasPawn(side, at)),
+        'next to each other on the fourth rank':
+          Math.abs((held[0] ?? 0) - (held[1] ?? 0)) === 1 && two.every((at) => rankFor(side, at) === 4),
+        'nobody beside them': two.every((at) => neighbours(scene, side, at).every((one) => two.includes(one))),
+        'both files half-open': held.every((file) => pawnsOnFile(scene, other(side), file).length === 0),
+      },
+    };
+  },
+  islands: (scene, { fewer }) => {
+    const [fewest, most] = [islandCount(scene, fewer), islandCount(scene, other(fewer))];
+    return {
+      facts: { fewer, fewest, most },
+      text: `${named(fewer)} has ${many(fewest, 'pawn island')}, ${enemyNamed(fewer)} ${num(most)}.`,
+      claims: { fewer: fewest < most, some: fewest > 0 },
+    };
+  },
+  'pawns-on-colour': (scene, { side, colour }) => {
+    const all = scene.pawns(side);
+    const count = all.filter((pawn) => colourOf(pawn) === colour).length;
+    return {
+      facts: { colour, count, total: all.length },
+      text: `${start(num(count))} of ${named(side)}’s ${num(all.length)} pawns stand on ${colour} squares.`,
+      claims: { 'three quarters': count * 4 >= all.length * 3 },
+    };
+  },
+};
