@@ -5,7 +5,7 @@ import { type Safety, safetyOf } from '../exchange';
 import { countParts, type Ground, groundOf, MOVE_COST, PARTS, PLACE } from '../posts';
 import { GUARD_BOUNDS, type GuardValue, guardFrom, SECOND_LOOK, searchGain } from '../tactics';
 import type { Side, Square } from '../types';
-import { mapOf, moved } from './boards';
+import { isKingAttacked, mapOf, moved } from './boards';
 import { stopsTo, type Ways, waysOf } from './ways';
 
 /** The position as routes of one side see it. */
@@ -14,7 +14,7 @@ export interface Field {
   readonly ground: Ground;
   readonly map: AttackMap;
   readonly safety: Safety;
-  /** What the enemy would win and the side would win if it were their move now. */
+  /** What the enemy would win and the side would win if it were their move now; a side in check cannot wait, so 0. */
   readonly lostNow: number;
   readonly threatensNow: number;
 }
@@ -45,8 +45,9 @@ const THREAT_BOUNDS = { nodesMax: 2000, checkPlies: 0 };
 export function fieldOf(position: Position, side: Side): Field {
   const { board } = position;
   const own = sideIndex(side);
+  const mustMove = isKingAttacked(mapOf(board), own);
   return fieldWith(position, side, {
-    lostNow: capped(searchGain(board, own ^ 1, GUARD_BOUNDS).gains),
+    lostNow: mustMove ? 0 : capped(searchGain(board, own ^ 1, GUARD_BOUNDS).gains),
     threatensNow: searchGain(board, own, THREAT_BOUNDS).gains > 0 ? 1 : 0,
   });
 }

@@ -7,8 +7,10 @@
  * passing is not asked for more than that. Within these bounds the answer is exact; when the nodes run out it
  * says so. Figures are pawns by the trade's common table.
  */
+import { KNIGHT } from '../attacks';
+import { DIRECTION_TO } from '../board';
 import { worthOf } from '../exchange';
-import { isInCheck, isStruck, kings, lastTaken, men, play, type PlayedMove, setUp, takeBack } from './desk';
+import { IN_PASSING, isInCheck, isStruck, kings, lastTaken, men, play, type PlayedMove, setUp, takeBack } from './desk';
 import { listMoves, stack } from './moves';
 
 /** Stands for mate in figures of material; more than all men of a side are worth. */
@@ -60,7 +62,7 @@ export function searchGain(board: Readonly<Uint8Array>, side: number, bounds: Bo
   run.gaveUp = false;
   refuters.fill(0);
   const window = bounds.gainsMax ?? MATE;
-  const value = best(0, -window, window, bounds.quietPlies ?? 0, 0);
+  const value = best(0, isInCheck(0), -window, window, bounds.quietPlies ?? 0, 0);
   const gains = Math.max(-window, Math.min(window, value));
   const line = Array.from(lines.subarray(0, lineEnds[0]), (move) => move ^ (flip | (flip << 6)));
   return { gains, line, complete: !run.gaveUp, nodes: run.nodes };
@@ -78,11 +80,10 @@ function turned(board: Readonly<Uint8Array>): Uint8Array {
 }
 
 /** Gain of the side to move within the window, in pawns beyond what stands; `quiet` plies from here try every move. */
-function best(side: number, alphaGiven: number, beta: number, quiet: number, ply: number): number {
+function best(side: number, checked: boolean, alphaGiven: number, beta: number, quiet: number, ply: number): number {
   let alpha = alphaGiven;
   lineEnds[ply] = 0;
   run.nodes++;
-  const checked = isInCheck(side);
   // With one quiet ply left, a quiet move can only parry; a side that is not behind has nothing to parry.
   const every = checked || quiet > 1 || (quiet === 1 && alpha < 0);
   let found = every ? -MATE : 0;
@@ -102,19 +103,20 @@ function best(side: number, alphaGiven: number, beta: number, quiet: number, ply
     const move = stack[at]! & 0xffff;
     play(move);
     const prize = prizeOf(move);
-    if (isLeftInCheck(side)) {
+    if (isLeftInCheck(side, move, checked)) {
       takeBack(move);
       continue;
     }
     legal = true;
+    const gives = givesCheck(side ^ 1, move);
     // A move that leaves the other side free to stop brings no more than what it takes; a quiet one that gives
     // no check is otherwise looked at only where every move is.
-    if (quiet <= 1 && ((prize === 0 && !every) || prize <= alpha) && !isInCheck(side ^ 1)) {
+    if (quiet <= 1 && ((prize === 0 && !every) || prize <= alpha) && !gives) {
       takeBack(move);
       if (every && prize > found) found = Math.min(prize, alpha);
       continue;
     }
-    const value = prize - best(side ^ 1, prize - beta, prize - alpha, quiet > 0 ? quiet - 1 : 0, ply + 1);
+    const value = prize - best(side ^ 1, gives, prize - beta, prize - alpha, quiet > 0 ? quiet - 1 : 0, ply + 1);
     takeBack(move);
     if (value > found) found = value;
     if (value > alpha) {
@@ -132,7 +134,7 @@ function best(side: number, alphaGiven: number, beta: number, quiet: number, ply
 
 /** Whether the other side, moving again, still leaves this side at `beta` or better. */
 function isFineWithPassing(side: number, beta: number, quiet: number, ply: number): boolean {
-  return -best(side ^ 1, -beta, 1 - beta, quiet > 2 ? quiet - 2 : 0, ply + 1) >= beta;
+  return -best(side ^ 1, isInCheck(side ^ 1), -beta, 1 - beta, quiet > 2 ? quiet - 2 : 0, ply + 1) >= beta;
 }
 
 /** What the move just played has won: the man taken, and what a promotion adds. */
@@ -141,9 +143,25 @@ function prizeOf(move: PlayedMove): number {
   return worthOf(lastTaken()) + (promoted === 0 ? 0 : worthOf(promoted) - 1);
 }
 
-function isLeftInCheck(side: number): boolean {
+/** Whether the move just played leaves its own king in check: only a king, or a man that stood on a line with it, can. */
+function isLeftInCheck(side: number, move: PlayedMove, checked: boolean): boolean {
   const king = kings[side]!;
-  return king >= 0 && isStruck(king, side ^ 1);
+  if (king < 0) return false;
+  const mayLay = checked || move & IN_PASSING || king === ((move >> 6) & 63) || isOnLine(king, move & 63);
+  return mayLay ? isStruck(king, side ^ 1) : false;
+}
+
+/** Whether the move just played gives check to the side: from its new square, or by leaving a line. */
+function givesCheck(side: number, move: PlayedMove): boolean {
+  const king = kings[side]!;
+  if (king < 0) return false;
+  const to = (move >> 6) & 63;
+  const mayGive = isOnLine(king, to) || isOnLine(king, move & 63) || move & IN_PASSING || (men[to]! & 7) === KNIGHT;
+  return mayGive ? isStruck(king, side ^ 1) : false;
+}
+
+function isOnLine(king: number, square: number): boolean {
+  return DIRECTION_TO[(king << 6) | square]! >= 0;
 }
 
 function keepLine(move: PlayedMove, ply: number): void {

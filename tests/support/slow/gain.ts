@@ -2,7 +2,7 @@
  * The small search once more, on a rules library (chess.js) instead of our own board: captures, promotions to queen and
  * knight, every answer to a check, and quiet checks on the first ply. A cut where a side has enough, and no other.
  */
-import { Chess, type Move } from 'chess.js';
+import type { Chess, Move } from 'chess.js';
 
 const WORTH: Readonly<Record<string, number>> = { p: 1, n: 3, b: 3, r: 5, q: 9, k: 0 };
 
