@@ -5,13 +5,21 @@ import { slowReach } from '../slow/reach';
 export type SideName = 'white' | 'black';
 export const other = (side: SideName): SideName => (side === 'white' ? 'black' : 'white');
 
-const LETTER: Readonly<Record<string, string>> = { pawn: 'p', knight: 'n', bishop: 'b', rook: 'r', queen: 'q', king: 'k' };
+const LETTER: Readonly<Record<string, string>> = {
+  pawn: 'p',
+  knight: 'n',
+  bishop: 'b',
+  rook: 'r',
+  queen: 'q',
+  king: 'k',
+};
 
 export const indexOf = (name: string): number => name.charCodeAt(0) - 97 + 8 * (Number(name.charAt(1)) - 1);
 export const nameOf = (index: number): string => `${'abcdefgh'.charAt(index % 8)}${Math.floor(index / 8) + 1}`;
 export const fileOf = (name: string): number => name.charCodeAt(0) - 97;
 /** Rank as the side counts it, 1 to 8. */
-export const relative = (name: string, side: SideName): number => (side === 'white' ? Number(name.charAt(1)) : 9 - Number(name.charAt(1)));
+export const relative = (name: string, side: SideName): number =>
+  side === 'white' ? Number(name.charAt(1)) : 9 - Number(name.charAt(1));
 /** The square on a file and relative rank, undefined off the board. */
 export function at(file: number, rank: number, side: SideName): string | undefined {
   if (file < 0 || file > 7 || rank < 1 || rank > 8) return undefined;
@@ -72,7 +80,12 @@ export class SlowBoard {
   /** What the enemy gains by capturing a man of the kind put on the square, taken off its origin. */
   loss(side: SideName, kind: string, square: string, origin: string | null): number {
     const letter = LETTER[kind] ?? '';
-    return slowLoss(this.letters, side === 'white' ? letter.toUpperCase() : letter, indexOf(square), origin === null ? -1 : indexOf(origin));
+    return slowLoss(
+      this.letters,
+      side === 'white' ? letter.toUpperCase() : letter,
+      indexOf(square),
+      origin === null ? -1 : indexOf(origin),
+    );
   }
 
   /** Who commands the square, tested with a knight of each side. */
@@ -83,7 +96,9 @@ export class SlowBoard {
   }
 
   reach(from: string, movesMax = 3): Map<string, number> {
-    return new Map([...slowReach(this.letters, indexOf(from), movesMax)].map(([square, moves]) => [nameOf(square), moves]));
+    return new Map(
+      [...slowReach(this.letters, indexOf(from), movesMax)].map(([square, moves]) => [nameOf(square), moves]),
+    );
   }
 
   /** The first man from a square by steps of file and rank, null where there is none. */
@@ -111,9 +126,15 @@ export class SlowBoard {
     });
     if (!king || from === king) return targets;
     return targets.filter((to) => {
-      const after = this.letters.map((letter, index) => (index === indexOf(to) ? this.letter(from) : index === indexOf(from) ? '' : letter));
-      const sliders = this.men(enemy).filter((each) => each !== to && ['bishop', 'rook', 'queen'].includes(this.kindOn(each) ?? ''));
-      return !sliders.some((each) => attacks(after, indexOf(each), indexOf(king)) && !attacks(this.letters, indexOf(each), indexOf(king)));
+      const after = this.letters.map((letter, index) =>
+        index === indexOf(to) ? this.letter(from) : index === indexOf(from) ? '' : letter,
+      );
+      const sliders = this.men(enemy).filter(
+        (each) => each !== to && ['bishop', 'rook', 'queen'].includes(this.kindOn(each) ?? ''),
+      );
+      return !sliders.some(
+        (each) => attacks(after, indexOf(each), indexOf(king)) && !attacks(this.letters, indexOf(each), indexOf(king)),
+      );
     });
   }
 

@@ -7,7 +7,8 @@ const beside = (a: number, b: number) => Math.abs(fileOf(a) - fileOf(b)) === 1;
 export const neighbours = (scene: Scene, side: Side, square: number): number[] =>
   scene.pawns(side).filter((pawn) => beside(pawn, square));
 
-export const isIsolated = (scene: Scene, side: Side, pawn: number): boolean => neighbours(scene, side, pawn).length === 0;
+export const isIsolated = (scene: Scene, side: Side, pawn: number): boolean =>
+  neighbours(scene, side, pawn).length === 0;
 
 export const pawnsOnFile = (scene: Scene, side: Side, file: number): number[] =>
   scene.pawns(side).filter((pawn) => fileOf(pawn) === file);
@@ -50,7 +51,13 @@ export function comingPawns(scene: Scene, side: Side, square: number): OnTheWay[
         pawnAttackers(scene, other(side), at).length > 0 && pawnAttackers(scene, side, at).length === 0;
       const stop = way.find((at) => ram(at) || controlled(at)) ?? -1;
       const landing = way.at(-1) ?? pawn;
-      return { pawn, landing, moves: pawnMoves(side, pawn, landing), stop, by: stop >= 0 && ram(stop) ? 'ram' : 'controlled' };
+      return {
+        pawn,
+        landing,
+        moves: pawnMoves(side, pawn, landing),
+        stop,
+        by: stop >= 0 && ram(stop) ? 'ram' : 'controlled',
+      };
     });
 }
 
@@ -99,9 +106,7 @@ export function isBackward(scene: Scene, side: Side, pawn: number): boolean {
   const own = neighbours(scene, side, pawn);
   if (own.length === 0 || own.some((one) => rankFor(side, one) <= rankFor(side, pawn))) return false;
   const level = Math.min(...own.map((one) => rankFor(side, one)));
-  return road(side, pawn).some(
-    (at) => rankFor(side, at) <= level && pawnAttackers(scene, other(side), at).length > 0,
-  );
+  return road(side, pawn).some((at) => rankFor(side, at) <= level && pawnAttackers(scene, other(side), at).length > 0);
 }
 
 /** All pairs of pawns head to head, White's first. */

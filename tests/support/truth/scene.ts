@@ -123,9 +123,7 @@ export class Scene {
     if (king < 0 || king === square) return -1;
     const bare = this.without(square);
     const enemies = this.men(other(side));
-    return (
-      enemies.find((from) => attacks(bare.board, from, king) && !attacks(this.board, from, king)) ?? -1
-    );
+    return enemies.find((from) => attacks(bare.board, from, king) && !attacks(this.board, from, king)) ?? -1;
   }
 
   /** Moves with pins kept: castling and captures of kings left out, kings may step into check. */

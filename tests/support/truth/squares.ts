@@ -3,7 +3,21 @@ import type { SquaresFact } from '@/engine/explain/facts/squares';
 import type { Checkers, FactOf, Told } from './claim';
 import { comingPawns, holdAgainst } from './pawns';
 import { colourOf, fileOf, nameOf, other, rankFor, type Scene, type Side, squareOf } from './scene';
-import { enemyNamed, inOrder, list, man, type ManAt, many, named, names, num, sentences, start, the, theAll } from './words';
+import {
+  enemyNamed,
+  inOrder,
+  list,
+  man,
+  type ManAt,
+  many,
+  named,
+  names,
+  num,
+  sentences,
+  start,
+  the,
+  theAll,
+} from './words';
 
 export interface Comer extends ManAt {
   readonly moves: number;
@@ -49,8 +63,7 @@ function weak(scene: Scene, { id, side, square }: FactOf<'weak-for-good'>): Told
       !all.some((each) => fileOf(each.pawn) === fileOf(pawn) && rankFor(side, each.pawn) > rankFor(side, pawn)),
   );
   const [first] = front.sort((a, b) => fileOf(a.pawn) - fileOf(b.pawn));
-  const stopped =
-    hold === 'fixed' && first ? { pawn: nameOf(first.pawn), on: nameOf(first.stop), by: first.by } : null;
+  const stopped = hold === 'fixed' && first ? { pawn: nameOf(first.pawn), on: nameOf(first.stop), by: first.by } : null;
   const usage = occupant
     ? `${start(the(occupant))} stands there`
     : (comingText(scene, enemy, comers) ?? (commandedByEnemy ? `${named(enemy)} commands it` : null));
@@ -113,8 +126,7 @@ export const SQUARES: Checkers<SquaresFact> = {
       claims: {
         'three or more': commanded.length >= 3,
         'bishops as knights': commanded.every(
-          (at) =>
-            scene.lost(other(side), 'b', squareOf(at)) && !scene.lost(side, 'b', squareOf(at)),
+          (at) => scene.lost(other(side), 'b', squareOf(at)) && !scene.lost(side, 'b', squareOf(at)),
         ),
       },
     };

@@ -19,7 +19,9 @@ function differing(scene: Scene, side: Side, { core, bare, usual }: StructureSid
   if (!tokens(core).every(stands)) return null;
   if (tokens(bare).some(stands)) return null;
   const coreFiles = tokens(core).map((token) => token.charAt(0));
-  const stray = pawns.some((pawn) => coreFiles.includes(nameOf(pawn).charAt(0)) && !tokens(core).some((token) => allows(token, pawn, turned)));
+  const stray = pawns.some(
+    (pawn) => coreFiles.includes(nameOf(pawn).charAt(0)) && !tokens(core).some((token) => allows(token, pawn, turned)),
+  );
   if (stray) return null;
   const men = tokens(core).length + tokens(usual).length;
   return Math.max(0, pawns.length - men) + tokens(usual).filter((token) => !stands(token)).length;
@@ -46,7 +48,9 @@ export function structureTold(scene: Scene, { name, leader }: FactOf<'named-stru
     text: sentences(
       `Pawn structure: ${name}`,
       start(lead),
-      differs === 0 ? null : `${start(many(differs ?? 0, 'pawn'))} ${differs === 1 ? 'differs' : 'differ'} from the book form`,
+      differs === 0
+        ? null
+        : `${start(many(differs ?? 0, 'pawn'))} ${differs === 1 ? 'differs' : 'differ'} from the book form`,
     ),
     claims: { 'the core stands': differs !== null, 'two pawns at most differ': (differs ?? 9) <= 2 },
   };
