@@ -47,7 +47,8 @@ function standsAside(side: number, from: number): boolean {
   if (direction < 0 || DIRECTION_TO[(king << 6) | target] === direction) return false;
   if (nextMan(king, direction) !== from) return false;
   const pinner = nextMan(from, direction);
-  if (pinner < 0) return false;
+  // A king that has left its square is not laid open.
+  if (pinner < 0 || isGone(king)) return false;
   const code = map.board[pinner]!;
   return code >> 3 !== side && slidesAlong(code, direction);
 }

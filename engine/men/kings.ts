@@ -1,5 +1,5 @@
 /** A king: its shelter, the men that reach and guard its zone, its flights and its luft. */
-import { type AttackMap, attackersOf, isPinned, KING, menOfMask, PAWN, QUEEN, ROOK } from '../attacks';
+import { type AttackMap, attackersOf, isAttacked, isPinned, KING, menOfMask, QUEEN, ROOK } from '../attacks';
 import { ahead, fileOf, KING_STEPS, LEAP_ROW, manCode, rankOf, relativeRank, squareAt } from '../board';
 import { isSafeMove, type Safety } from '../exchange';
 import { opponent, type Side, type Square } from '../types';
@@ -28,7 +28,7 @@ export interface KingValue {
   readonly flights: readonly Square[];
   /** Flights off its back rank; empty for a king that stands elsewhere. */
   readonly luft: readonly Square[];
-  /** Own pawn moves that would give a king on its back rank its first luft: the pawn and where it goes. */
+  /** Pawn moves that would give a king on its back rank, not in check, its first luft: see `luftMoves`. */
   readonly luftMoves: readonly { readonly from: Square; readonly to: Square }[];
   /**
    * The back rank is weak: the king stands on it without luft, no own rook or queen does, and the enemy has a rook
@@ -44,6 +44,7 @@ export function kingValue(safety: Safety, side: Side): KingValue | null {
   if (at < 0) return null;
   const square = at as Square;
   const onBackRank = relativeRank(square, side) === 1;
+  const isInCheck = isAttacked(map, opponent(side), square);
   const flights = flightsOf(safety, square, side);
   const luft = onBackRank ? flights.filter((to) => rankOf(to) !== rankOf(square)) : [];
   const shelter = shelterOf(map, side, square);
@@ -57,7 +58,7 @@ export function kingValue(safety: Safety, side: Side): KingValue | null {
     guardedBy: bearing(map, side, zone),
     flights,
     luft,
-    luftMoves: onBackRank && luft.length === 0 ? luftMoves(map, side, square) : [],
+    luftMoves: onBackRank && luft.length === 0 && !isInCheck ? luftMoves(map, side, square) : [],
     weakBackRank:
       onBackRank && luft.length === 0 && !hasHeavy(map, side, rankOf(square)) && hasHeavy(map, opponent(side), null),
   };
@@ -123,22 +124,28 @@ function hasHeavy(map: AttackMap, side: Side, rank: number | null): boolean {
 
 /**
  * Pawn moves beside a king without luft that give it some: the pawn stands next to the king on its second rank, can
- * step, is not pinned, and no enemy man attacks the square that it leaves. A slider that bears on that square along
- * the pawn's own file is shut out by the pawn where it has gone.
+ * step, and no enemy man attacks the square that it leaves. A slider that bears on that square from ahead along the
+ * pawn's own file, pinning it there or not, is shut out by the pawn where it has gone. Captures, and steps that
+ * shut a line elsewhere, are not looked for.
  */
 function luftMoves(map: AttackMap, side: Side, king: Square): { from: Square; to: Square }[] {
   const moves: { from: Square; to: Square }[] = [];
   for (const from of zoneOf(king)) {
-    if (map.board[from] !== manCode(side, 'pawn') || relativeRank(from, side) !== 2 || isPinned(map, from)) continue;
+    if (map.board[from] !== manCode(side, 'pawn') || relativeRank(from, side) !== 2) continue;
     const to = ahead(from, side);
     if (to === undefined || map.board[to] !== 0) continue;
-    const attackers = attackersOf(map, opponent(side), from).filter(
-      (enemy) => fileOf(enemy) !== fileOf(from) || (map.board[enemy]! & 7) === PAWN || (map.board[enemy]! & 7) === KING,
-    );
-    if (attackers.length > 0) continue;
+    if (isPinned(map, from) && fileOf(from) !== fileOf(king)) continue;
+    const attackers = attackersOf(map, opponent(side), from);
+    if (attackers.some((enemy) => !isShutOut(map, enemy, from, to))) continue;
     moves.push({ from, to });
     const second = ahead(from, side, 2);
     if (second !== undefined && map.board[second] === 0) moves.push({ from, to: second });
   }
   return moves.sort((a, b) => a.from - b.from || a.to - b.to);
+}
+
+/** Whether the pawn that steps from one square to the next shuts out a slider that attacks the first. */
+function isShutOut({ board }: AttackMap, enemy: Square, from: Square, to: Square): boolean {
+  const isSlider = (board[enemy]! & 7) === ROOK || (board[enemy]! & 7) === QUEEN;
+  return isSlider && fileOf(enemy) === fileOf(from) && enemy > from === to > from;
 }

@@ -50,21 +50,25 @@ function pawnMoves(board: Letters, from: number, passing: number): number[] {
   return [...strikes, ...steps];
 }
 
+/** Where the man could go if there were no pins. */
+function goalsOf(board: Letters, from: number, passing: number): number[] {
+  const letter = board[from] ?? '';
+  if (letter.toLowerCase() === 'p') return pawnMoves(board, from, passing);
+  return [...board.keys()].filter((to) => {
+    const prize = board[to];
+    if (prize && (isWhite(prize) === isWhite(letter) || prize.toLowerCase() === 'k')) return false;
+    return attacks(board, from, to);
+  });
+}
+
 /**
  * Pseudo-legal moves, castling left out: a pinned man may block the pinner or capture it, and nothing else. `passing` is
  * the square on which the man may capture in passing if it is a pawn, -1 for none.
  */
 export function slowMoves(board: Letters, from: number, passing: number): number[] {
-  const letter = board[from] ?? '';
-  const white = isWhite(letter);
+  const white = isWhite(board[from] ?? '');
   const pinner = slowPinner(board, from);
-  const goals =
-    letter.toLowerCase() === 'p'
-      ? pawnMoves(board, from, passing)
-      : [...board.keys()]
-          .filter((to) => attacks(board, from, to))
-          .filter((to) => !board[to] || (isWhite(board[to]) !== white && board[to].toLowerCase() !== 'k'));
-  return goals
+  return goalsOf(board, from, passing)
     .filter((to) => pinner === undefined || to === pinner || !checkers(moved(board, from, to), white).includes(pinner))
     .sort((a, b) => a - b);
 }
@@ -72,6 +76,13 @@ export function slowMoves(board: Letters, from: number, passing: number): number
 /** Of the moves those after which capturing the man where it went gains nothing. */
 export function slowSafeMoves(board: Letters, from: number, passing: number): number[] {
   return slowMoves(board, from, passing).filter((to) => slowLoss(board, board[from] ?? '', to, from) === 0);
+}
+
+/** Moves and safe moves of a man that has left `origin` and is asked on a square; pins are not looked at. */
+export function slowHeat(board: Letters, letter: string, square: number, origin: number): [number, number] {
+  const asked = board.map((man, at) => (at === square ? letter : at === origin ? '' : man));
+  const goals = goalsOf(asked, square, -1);
+  return [goals.length, goals.filter((to) => slowLoss(board, letter, to, origin) === 0).length];
 }
 
 /** What the enemy gains more on each own man, kings apart, with the man on `from` off the board: pawns by square. */
