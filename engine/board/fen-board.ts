@@ -17,7 +17,8 @@ export function codeOfLetter(letter: string): number | undefined {
   return code > 0 && letter.length === 1 ? code : undefined;
 }
 
-function inWords(count: number): string {
+/** A small count as a word, a greater one as a figure. */
+export function inWords(count: number): string {
   return COUNT_WORDS[count] ?? String(count);
 }
 

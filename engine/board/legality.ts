@@ -1,9 +1,10 @@
 /** What must hold of men, rights and checks before a position can have come from play. */
 import { SIDES, type Side, type Square } from '../types';
 import { type Fault, fault } from './fault';
+import { inWords } from './fen-board';
 import { EDGES, KNIGHT_LEAPS, LEAP_ROW, STRIDES } from './geometry';
-import { type CastlingRights, manCode } from './position';
-import { ahead, kingDistance, rankOf, relativeRank, squareName, step } from './squares';
+import { type CastlingRights, manCode, NO_CASTLING } from './position';
+import { ahead, colourOf, kingDistance, rankOf, relativeRank, squareName, step } from './squares';
 
 /** Men of one side that a diagram may hold: the attack map keeps one bit a man. */
 export const MEN_MAX = 32;
@@ -57,23 +58,24 @@ function countFaults(board: Readonly<Uint8Array>, side: Side): Fault[] {
       ),
     ];
   }
+  const bishops = squaresWith(board, manCode(side, 'bishop'));
+  const lightBishops = bishops.filter((square) => colourOf(square) === 'light').length;
   const faults: Fault[] = [];
   if (pawns > 8) faults.push(fault('board', 'too-many-pawns', `${who} has ${pawns} pawns; there are at most eight.`));
   if (total > 16)
     faults.push(fault('board', 'men-count', `${who} has ${total} men; a game starts with sixteen a side.`));
   const promoted =
     Math.max(0, count('knight') - 2) +
-    Math.max(0, count('bishop') - 2) +
+    // One bishop a colour of squares is there from the start; it can never change to the other.
+    Math.max(0, lightBishops - 1) +
+    Math.max(0, bishops.length - lightBishops - 1) +
     Math.max(0, count('rook') - 2) +
     Math.max(0, count('queen') - 1);
-  if (pawns <= 8 && total <= 16 && promoted > 8 - pawns) {
-    faults.push(
-      fault(
-        'board',
-        'promoted-count',
-        `${who} has ${promoted} men from promotion, but only ${8 - pawns} pawns are gone.`,
-      ),
-    );
+  const gone = 8 - pawns;
+  if (gone >= 0 && total <= 16 && promoted > gone) {
+    const men = promoted === 1 ? 'one man' : `${inWords(promoted)} men`;
+    const goneText = gone === 0 ? 'no pawn is' : gone === 1 ? 'only one pawn is' : `only ${inWords(gone)} pawns are`;
+    faults.push(fault('board', 'promoted-count', `${who} must have ${men} from promotion, but ${goneText} gone.`));
   }
   return faults;
 }
@@ -170,6 +172,18 @@ export function castlingFaults(board: Readonly<Uint8Array>, rights: CastlingRigh
     }
   }
   return faults;
+}
+
+/** The rights that king and rook stand ready for; the others are dropped. */
+export function soundRights(board: Readonly<Uint8Array>, rights: CastlingRights): CastlingRights {
+  const isSound = (right: keyof CastlingRights) =>
+    rights[right] && castlingFaults(board, { ...NO_CASTLING, [right]: true }).length === 0;
+  return {
+    whiteKing: isSound('whiteKing'),
+    whiteQueen: isSound('whiteQueen'),
+    blackKing: isSound('blackKing'),
+    blackQueen: isSound('blackQueen'),
+  };
 }
 
 /** Faults of the square passed over by a pawn's double step, against rank, pawn and empty squares. */

@@ -1,5 +1,5 @@
 /** Pseudo-legal moves of a scratch board, packed; legality is asked by making the move. */
-import { EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, PAWN_STRIKES, STRIDES, STRIKE_ROW } from '../board';
+import { DIRECTION_TO, EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, PAWN_STRIKES, STRIDES, STRIKE_ROW } from '../board';
 import {
   attacks,
   BISHOP,
@@ -10,12 +10,14 @@ import {
   KING,
   KNIGHT,
   make,
+  MOVES_MAX,
   newUndo,
   PASSING,
   PAWN,
   QUEEN,
   ROOK,
   type ScratchBoard,
+  type Undo,
   unmake,
 } from './scratch-board';
 
@@ -104,24 +106,49 @@ function castling(board: ScratchBoard, from: number, into: Int32Array, start: nu
   return end;
 }
 
-/** Moves of one depth after another, so that a search needs no lists of its own. */
-export class MoveStack {
-  readonly moves = new Int32Array(256 * 32);
-  readonly undo = Array.from({ length: 32 }, newUndo);
+/**
+ * Whether a pseudo-legal move is legal. A man that does not stand in one line with its king uncovers nothing, so that
+ * out of check only moves of the king, of men in line with it and captures in passing have to be tried out.
+ */
+export function isLegal(board: ScratchBoard, move: number, checked: boolean, undo: Undo): boolean {
+  const { side, men } = board;
+  const from = move & 63;
+  if ((men[(move >> 6) & 63]! & 7) === KING) return false;
+  const king = board.kings[side]!;
+  if (king < 0) return true;
+  const special = (move >> 16) & 7;
+  if (!checked && from !== king && special !== PASSING && DIRECTION_TO[(king << 6) | from]! < 0) return true;
+  make(board, move, undo);
+  const legal = !inCheck(board, side);
+  unmake(board, move, undo);
+  return legal;
 }
 
-/** Number of legal move sequences of that depth (perft, the usual check of move generators). */
-export function countMoves(board: ScratchBoard, depth: number, stack: MoveStack = new MoveStack(), ply = 0): number {
-  if (depth === 0) return 1;
-  const start = ply * 256;
+/** Deepest count of `countMoves`, in plies. */
+const DEPTH_MAX = 16;
+
+/** Room for the moves of one depth after another, so that counting needs no lists of its own. */
+class MoveStack {
+  readonly moves = new Int32Array(MOVES_MAX * DEPTH_MAX);
+  readonly undo = Array.from({ length: DEPTH_MAX }, newUndo);
+}
+
+/** Number of legal move sequences of that depth (perft, the usual check of move generators), 16 plies at most. */
+export function countMoves(board: ScratchBoard, depth: number, stack = new MoveStack(), start = 0): number {
+  if (depth <= 0) return 1;
   const end = pseudoMoves(board, stack.moves, start);
-  const undo = stack.undo[ply]!;
-  const { side } = board;
+  const undo = stack.undo[depth - 1]!;
+  const checked = inCheck(board, board.side);
   let count = 0;
   for (let at = start; at < end; at++) {
     const move = stack.moves[at]!;
+    if (!isLegal(board, move, checked, undo)) continue;
+    if (depth === 1) {
+      count++;
+      continue;
+    }
     make(board, move, undo);
-    if (!inCheck(board, side)) count += depth === 1 ? 1 : countMoves(board, depth - 1, stack, ply + 1);
+    count += countMoves(board, depth - 1, stack, end);
     unmake(board, move, undo);
   }
   return count;

@@ -17,8 +17,8 @@ export const PASSING = 2;
 export const CASTLE_KING = 3;
 export const CASTLE_QUEEN = 4;
 
-/** Most moves that a position can have: 218 is the known record (from memory); rows are kept wide enough. */
-export const MOVES_MAX = 256;
+/** Pseudo-legal moves of any board stay below this: 32 men of a side, each with fewer than 28 (a queen in the centre). */
+export const MOVES_MAX = 1024;
 
 export interface ScratchBoard {
   readonly men: Uint8Array;
@@ -43,7 +43,10 @@ const RIGHTS_LOST: Readonly<Uint8Array> = (() => {
   return table;
 })();
 
-/** A scratch board of a position. A side without a king has -1 there and is never in check. */
+/**
+ * A scratch board of a position. A side without a king has -1 there and is never in check; of several kings, as
+ * diagrams may have them, the first from a1 on is the one that must not be left in check.
+ */
 export function scratchBoard(position: Position): ScratchBoard {
   const { castling } = position;
   const men = Uint8Array.from(position.board);
@@ -123,7 +126,7 @@ export function make(board: ScratchBoard, move: number, undo: Undo): void {
   men[capturedOn] = 0;
   men[from] = 0;
   men[to] = promotion === 0 ? man : (side << 3) | promotion;
-  if ((man & 7) === KING) board.kings[side] = to;
+  if (board.kings[side] === from) board.kings[side] = to;
   if (special === CASTLE_KING) moveRook(men, to + 1, to - 1);
   else if (special === CASTLE_QUEEN) moveRook(men, to - 2, to + 1);
   board.rights &= ~(RIGHTS_LOST[from]! | RIGHTS_LOST[to]!);
@@ -142,7 +145,7 @@ export function unmake(board: ScratchBoard, move: number, undo: Undo): void {
   men[to] = 0;
   men[from] = man;
   men[undo.capturedOn] = undo.captured;
-  if ((man & 7) === KING) board.kings[side] = from;
+  if (board.kings[side] === to) board.kings[side] = from;
   if (special === CASTLE_KING) moveRook(men, to - 1, to + 1);
   else if (special === CASTLE_QUEEN) moveRook(men, to + 1, to - 2);
   board.rights = undo.rights;
