@@ -173,6 +173,13 @@ function isOutOfPlay(side: Side, square: Square, safeMoves: number, movesToCentr
   return developed && safeMoves <= bound && (movesToCentre === null || movesToCentre >= 3);
 }
 
+/** Whether the enemy pawn, not pinned, has a free road to the rank from which it attacks the square. */
+function canStepUp(map: AttackMap, pawn: Square, square: Square): boolean {
+  const stride = map.board[pawn]! >> 3 ? -8 : 8;
+  for (let at = pawn + stride; at >> 3 !== square >> 3; at += stride) if (map.board[at] !== 0) return false;
+  return !isPinned(map, pawn);
+}
+
 /**
  * Trapped: a knight, bishop, rook or queen, not pinned, that is attacked now or can be attacked by an enemy pawn in
  * one move, has no safe move, and no capture that gives back what it costs.
@@ -191,7 +198,7 @@ function isTrapped(
   const side = (code >> 3) as SideIndex;
   if (!attacked) {
     const { soonest } = pawnReach(pawns, side === 0 ? 'black' : 'white', square);
-    if (soonest === null || soonest.moves > 1) return false;
+    if (soonest === null || soonest.moves > 1 || !canStepUp(map, soonest.from, square)) return false;
   }
   return !moves.some((to) => {
     const prize = safety.map.board[to]!;

@@ -85,7 +85,10 @@ export interface TiedMan extends FactBase {
   readonly side: Side;
   readonly man: ManAt;
   readonly ward: ManAt;
+  /** Pawns that the enemy gains there once it has left, beyond those of `already`. */
   readonly loses: number;
+  /** Pawns that the enemy gains there now. */
+  readonly already: number;
   readonly by: 'guard' | 'screen';
 }
 

@@ -101,6 +101,8 @@ export interface MinorityAttackFact extends FactBase {
   readonly against: SquareName;
   /** Pawn moves until it strikes; 0: it does now. */
   readonly moves: number;
+  /** A man of either side in the pawn's way. */
+  readonly blocker: ManAt | null;
 }
 
 export interface Majority extends FactBase {

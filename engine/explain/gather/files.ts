@@ -37,7 +37,7 @@ function ownership(values: ReadingValues, file: FileValue, facts: FilesFact[]): 
     // On a half-open file the enemy pawn is the point: its sentence says it.
     if (status === 'half-open') return;
     const men = heavy[control].map((square) => manAt(values, square));
-    const inTo = entries[control].map(squareName);
+    const inTo = entries[control].filter((entry) => canGo(values, heavy[control], entry)).map(squareName);
     facts.push({
       id: 'file-owned',
       side: control,
@@ -60,6 +60,11 @@ function ownership(values: ReadingValues, file: FileValue, facts: FilesFact[]): 
     const ends = namesInView([file.file as Square, (56 + file.file) as Square], mine);
     facts.push({ id: 'file-open-no-entry', side: null, file: name, squares: ends, men: [] });
   }
+}
+
+/** Whether one of the men can go to the square now and is safe there: a queen may be lost where a rook would not. */
+function canGo({ men }: ReadingValues, from: readonly Square[], to: Square): boolean {
+  return men.some((man) => from.includes(man.square) && man.safeMoves.includes(to));
 }
 
 function halfOpen(

@@ -8,6 +8,7 @@ import type { MenFact, PlacedMan } from '../facts/men';
 import type { ReadingValues } from '../values';
 import { inView } from '../words';
 import { countOf, manAt, namesInView } from './names';
+import { blockerOf } from './pawn-plans';
 
 /** Most moves of each kind on an empty board: the handbooks' table. */
 const MOST: Partial<Record<Kind, number>> = { knight: 8, bishop: 13, rook: 14, queen: 27 };
@@ -72,7 +73,9 @@ function tied(values: ReadingValues, { side, square, duties }: ManValue, facts: 
   const man = manAt(values, square);
   const ward = manAt(values, best.square);
   const men = [man.square, ward.square];
-  facts.push({ id: 'tied', side, man, ward, loses: best.loses, by: best.by, squares: [ward.square], men });
+  const { loses, by, square: on } = best;
+  const already = values.men.find((each) => each.square === on)?.enPrise ?? 0;
+  facts.push({ id: 'tied', side, man, ward, loses, already, by, squares: [ward.square], men });
 }
 
 function pinned(values: ReadingValues, { square, side }: ManValue, facts: MenFact[]): void {
@@ -112,6 +115,7 @@ function oneBishop(values: ReadingValues, bishop: BishopValue, facts: MenFact[])
     return;
   }
   const fixed = inView(bishop.fixedCentre.map(squareName), side);
+  const lever = remedy?.lever && blockerOf(values, remedy.lever) === null ? remedy.lever : null;
   facts.push({
     id: 'bad-bishop',
     side,
@@ -121,14 +125,12 @@ function oneBishop(values: ReadingValues, bishop: BishopValue, facts: MenFact[])
     pawns: ownPawns,
     fixed,
     tradeable: remedy?.tradeable ?? false,
-    lever: remedy?.lever
-      ? {
-          pawn: squareName(remedy.lever.from),
-          on: squareName(remedy.lever.on),
-          against: squareName(remedy.lever.against),
-          moves: remedy.lever.moves,
-        }
-      : null,
+    lever: lever && {
+      pawn: squareName(lever.from),
+      on: squareName(lever.on),
+      against: squareName(lever.against),
+      moves: lever.moves,
+    },
     outside: remedy?.outside ? { square: squareName(remedy.outside.square), moves: remedy.outside.moves } : null,
     squares: [square, ...fixed],
     men: [square],

@@ -1,4 +1,5 @@
 /** Facts about what pawns can still do: levers, minority attacks, majorities. */
+import { isPinned } from '../../attacks';
 import { ahead, fileName, fileOf, squareName } from '../../board';
 import type { Lever } from '../../pawns';
 import { opponent, type Side, type Square } from '../../types';
@@ -17,12 +18,18 @@ export function planFacts(values: ReadingValues, side: Side): StructureFact[] {
 }
 
 /** The first man in the way of a lever's pawn, its strike square included. */
-function blockerOf(values: ReadingValues, lever: Lever): Square | null {
+export function blockerOf(values: ReadingValues, lever: Lever): Square | null {
+  if (lever.moves === 0) return null;
   for (let square = ahead(lever.from, lever.side); square !== undefined; square = ahead(square, lever.side)) {
     if (values.map.board[square] !== 0) return square;
     if (square === lever.on) return null;
   }
   return null;
+}
+
+/** Whether a pin keeps the lever's pawn from going straight on. */
+function isHeldOffItsFile({ map }: ReadingValues, { from, side }: Lever): boolean {
+  return isPinned(map, from) && fileOf(from) !== fileOf(map.kings[side === 'white' ? 0 : 1] as Square);
 }
 
 /** Levers still to be played: of each pawn the soonest, central and supported ones first, three a side at most. */
@@ -42,6 +49,7 @@ function levers(values: ReadingValues, side: Side, facts: StructureFact[]): void
     )
       continue;
     seen.add(lever.from);
+    if (isHeldOffItsFile(values, lever)) continue;
     const blocker = blockerOf(values, lever);
     if (blocker !== null && lever.moves > 1) continue;
     const [pawn, on, against] = [squareName(lever.from), squareName(lever.on), squareName(lever.against)];
@@ -86,6 +94,7 @@ function minority(values: ReadingValues, side: Side, facts: StructureFact[]): vo
       on,
       against,
       moves: lever.moves,
+      blocker: manAtOrNull(values, blockerOf(values, lever)),
       squares: [pawn, on, against],
       men: [pawn],
     });

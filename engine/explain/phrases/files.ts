@@ -1,7 +1,8 @@
 /** Sentences about files, the seventh rank and diagonals. */
 import type { FilesFact } from '../facts/files';
 import type { Phrases } from '../phrase';
-import { capital, counted, inWords, listed, name, possessive, theMan, theMen } from '../words';
+import type { Side } from '../../types';
+import { capital, counted, inWords, listed, type ManAt, name, possessive, theMan, theMen } from '../words';
 
 const WHY = {
   isolated: 'the pawn there is isolated',
@@ -9,13 +10,18 @@ const WHY = {
   unguarded: 'no pawn guards the pawn there',
 } as const;
 
+/** Whether one of the men stands on the last two ranks already. */
+function hasEntered(heavy: readonly ManAt[], side: Side): boolean {
+  return heavy.some(({ square }) => (side === 'white' ? /[78]$/ : /[12]$/).test(square));
+}
+
 export const FILES_PHRASES: Phrases<FilesFact> = {
   'file-owned': ({ side, file, heavy, entries }) => ({
     head: `${name(side)} owns the ${file}-file`,
     body:
       entries.length > 0
         ? `${theMen(heavy)} can enter on ${listed(entries, 'or')}`
-        : `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there alone, but no entry square is safe yet`,
+        : `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there alone${hasEntered(heavy, side) ? '' : ', but with no safe way in yet'}`,
   }),
   'file-contested': ({ file, heavy }) => ({
     head: `The ${file}-file is contested`,
@@ -57,7 +63,7 @@ export const FILES_PHRASES: Phrases<FilesFact> = {
   }),
   'long-diagonal-open': ({ man, last, seen }) => ({
     head: `${capital(theMan(man))} has the long diagonal open`,
-    body: `it sees ${counted(seen, 'square')} of it, as far as ${last}`,
+    body: `it sees ${counted(seen, 'square')} ahead on it, as far as ${last}`,
   }),
   'diagonal-shut': ({ side, man, stopper, stopperSide }) => ({
     head: `${capital(theMan(man))} looks at a wall`,

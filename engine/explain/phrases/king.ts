@@ -51,7 +51,7 @@ export const KING_PHRASES: Phrases<KingFact> = {
         : `${enemyName(side)} has a rook or queen left to use ${files.length === 1 ? 'it' : 'them'}`,
   }),
   'king-zone': ({ side, king, attackers, guards }) => ({
-    head: `${capital(inWords(attackers.length))} ${enemyOf(side)} men bear on the squares round the king on ${king}`,
+    head: `${capital(inWords(attackers.length))} ${enemyOf(side)} men bear on the king on ${king} and the squares round it`,
     body: `${theMen(attackers)}, against ${guards === 0 ? 'no guard' : counted(guards, 'guard')} besides the king`,
   }),
   'weak-back-rank': ({ side, king }) => ({

@@ -26,7 +26,7 @@ function placed({ id, side, man, safeMoves, most, enemyHalf, toCentre: centre }:
 function remedy({ side, colour, tradeable, lever, outside }: BadBishop): string | null {
   if (lever) {
     const pawn = `the pawn on ${lever.against} that helps to shut it in`;
-    if (lever.moves === 0) return `The pawn on ${lever.pawn} can take ${pawn}`;
+    if (lever.moves === 0) return `The pawn on ${lever.pawn} attacks ${pawn}`;
     return `The lever ${lever.pawn}-${lever.on}, ${counted(lever.moves, 'move')} away, strikes at ${pawn}`;
   }
   if (outside) return `It gets outside the chain, to ${outside.square}, in ${counted(outside.moves, 'move')}`;
@@ -56,8 +56,8 @@ export const MEN_PHRASES: Phrases<MenFact> = {
   trapped: ({ man, attacked }) => ({
     head: `${capital(theMan(man))} is trapped`,
     body: attacked
-      ? 'it is attacked and has no safe square'
-      : 'a pawn can attack it in one move, and it has no safe square',
+      ? 'it is attacked and has no safe square to go to'
+      : 'a pawn can attack it in one move, and it has no safe square to go to',
   }),
   pinned: ({ man, pinner, king }) => ({
     head: `${capital(theMan(man))} is pinned`,
@@ -67,9 +67,9 @@ export const MEN_PHRASES: Phrases<MenFact> = {
     head: `${capital(theMan(man))} is overloaded`,
     body: `${theMen(guards)} both need it as a guard, and both are attacked`,
   }),
-  tied: ({ man, ward, side, loses, by }) => ({
+  tied: ({ man, ward, side, loses, already, by }) => ({
     head: `${capital(theMan(man))} is tied to ${theMan(ward)}`,
-    body: `${by === 'screen' ? 'it shuts the line; ' : ''}if it leaves, ${enemyName(side)} gains ${counted(loses, 'pawn')}’${loses === 1 ? 's' : ''} worth there`,
+    body: `${by === 'screen' ? 'it shuts the line; ' : ''}if it leaves, ${enemyName(side)} gains ${counted(loses, 'pawn')}’${loses === 1 ? 's' : ''} worth ${already > 0 ? 'more ' : ''}there`,
   }),
   loose: ({ man, side }) => ({
     head: `${capital(theMan(man))} is loose`,

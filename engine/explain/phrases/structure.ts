@@ -73,7 +73,7 @@ export const STRUCTURE_PHRASES: Phrases<StructureFact> = {
     body: `${listed(
       levers.map(([one, other]) => `${one} and ${other}`),
       'as well as',
-    )} can take each other`,
+    )} attack each other`,
   }),
   'isolated-pawn': ({ side, pawn, neighbours, halfOpen }) => ({
     head: `The pawn on ${pawn} is isolated`,
@@ -110,9 +110,9 @@ export const STRUCTURE_PHRASES: Phrases<StructureFact> = {
   }),
   'lever-ready': lever,
   'lever-coming': lever,
-  'minority-attack': ({ side, wing, own, enemy, pawn, on, against, moves }) => ({
+  'minority-attack': ({ side, wing, own, enemy, pawn, on, against, moves, blocker }) => ({
     head: `${name(side)} has a minority attack on the ${wing}`,
-    body: `${inWords(own)} ${own === 1 ? 'pawn' : 'pawns'} against ${inWords(enemy)}, and ${moves === 0 ? `${pawn} strikes at ${against} now` : `the pawn from ${pawn} strikes at ${against} from ${on}, ${counted(moves, 'move')} away`}`,
+    body: `${inWords(own)} ${own === 1 ? 'pawn' : 'pawns'} against ${inWords(enemy)}, and ${moves === 0 ? `${pawn} strikes at ${against} now` : `the pawn from ${pawn} strikes at ${against} from ${on}, ${counted(moves, 'move')} away${blocker ? `, once ${theMan(blocker)} has moved` : ''}`}`,
   }),
   majority,
   'crippled-majority': majority,

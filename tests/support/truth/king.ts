@@ -142,7 +142,7 @@ export const KING: Checkers<KingFact> = {
   },
   'king-zone': (scene, { side, king }) => {
     const at = squareOf(king);
-    const round = scene.seen(at);
+    const round = [at, ...scene.seen(at)];
     const bearing = (of: Side) =>
       scene
         .men(of)
@@ -151,7 +151,7 @@ export const KING: Checkers<KingFact> = {
     const guards = bearing(side).length;
     return {
       facts: { king, attackers, guards },
-      text: `${start(num(attackers.length))} ${other(side)} men bear on the squares round the king on ${king}: ${theAll(attackers)}, against ${
+      text: `${start(num(attackers.length))} ${other(side)} men bear on the king on ${king} and the squares round it: ${theAll(attackers)}, against ${
         guards === 0 ? 'no guard' : many(guards, 'guard')
       } besides the king.`,
       claims: { 'own king': scene.king(side) === at, 'three or more': attackers.length >= 3 },

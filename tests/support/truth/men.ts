@@ -1,9 +1,9 @@
 /** Statements about men, recomputed: how they stand, what they do, what threatens them. */
 import type { MenFact, PlacedMan } from '@/engine/explain/facts/men';
+import { slowBehind } from '../slow/behind';
 import { slowLoss } from '../slow/exchange';
 import { BISHOPS } from './bishops';
 import type { Checkers, FactOf, Told } from './claim';
-import { slowBehind } from '../slow/behind';
 import { fileOf, nameOf, other, rankFor, type Scene, type Side, squareOf } from './scene';
 import { enemyNamed, man, many, named, names, num, start, the, theAll } from './words';
 
@@ -60,9 +60,18 @@ function lossWithout(scene: Scene, side: Side, from: number, ward: number): numb
   return slowLoss(scene.without(from).board, letter, ward, -1) - scene.gain(other(side), ward);
 }
 
-/** Whether the man guards the square, directly or from behind another. */
-const guards = (scene: Scene, side: Side, from: number, ward: number) =>
-  scene.attackers(side, ward).includes(from) || slowBehind(scene.board, side === 'white', ward).has(from);
+/**
+ * Whether the man guards the ward: directly, from behind another, through enemy men that attack it on the same line, or by
+ * holding an enemy attacker in a pin.
+ */
+function guards(scene: Scene, side: Side, from: number, ward: number): boolean {
+  if (scene.attackers(side, ward).includes(from) || slowBehind(scene.board, side === 'white', ward).has(from))
+    return true;
+  const attackers = scene.attackers(other(side), ward);
+  const thinned = scene.with(scene.board.map((letter, at) => (attackers.includes(at) && at !== ward ? '' : letter)));
+  if (thinned.attackers(side, ward).includes(from)) return true;
+  return attackers.some((at) => scene.pinner(at) === from);
+}
 
 /** Whether an enemy man attacks the ward as soon as this one is gone. */
 const screens = (scene: Scene, side: Side, from: number, ward: number) =>
@@ -171,7 +180,7 @@ export const MEN: Checkers<MenFact> = {
     const now = scene.gain(other(side), ward);
     const [who, what] = [man(scene, at), man(scene, ward)];
     return {
-      facts: { man: who, ward: what, loses, by },
+      facts: { man: who, ward: what, loses, already: now, by },
       text: `${start(the(who))} is tied to ${the(what)}: ${by === 'screen' ? 'it shuts the line; ' : ''}if it leaves, ${enemyNamed(side)} gains ${many(loses, 'pawn')}’${loses === 1 ? 's' : ''} worth ${now > 0 ? 'more ' : ''}there.`,
       claims: {
         'own men': scene.sideOn(at) === side && scene.sideOn(ward) === side,

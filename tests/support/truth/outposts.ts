@@ -17,7 +17,9 @@ interface Way {
 function soonest(scene: Scene, side: Side, square: number): Way | null {
   const left = fileOf(square) < 4;
   const [first] = soonestPawns(scene, side, square).sort((a, b) =>
-    left ? fileOf(a.pawn) - fileOf(b.pawn) : fileOf(b.pawn) - fileOf(a.pawn),
+    fileOf(a.pawn) === fileOf(b.pawn)
+      ? rankFor(side, b.pawn) - rankFor(side, a.pawn)
+      : (fileOf(a.pawn) - fileOf(b.pawn)) * (left ? 1 : -1),
   );
   return first ? wayOf(scene, side, first) : null;
 }

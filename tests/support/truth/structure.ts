@@ -137,16 +137,18 @@ function minority(scene: Scene, fact: MinorityAttackFact): Told {
       ? `${fact.pawn} strikes at ${fact.against} now`
       : `the pawn from ${fact.pawn} strikes at ${fact.against} from ${fact.on}, ${many(moves, 'move')} away`;
   const inner = wing === 'queenside' ? 2 : 5;
+  const blocker = moves === 0 ? null : manOrNull(scene, inTheWay(scene, side, pawn, on));
+  const then = blocker ? `, once ${the(blocker)} has moved` : '';
   return {
-    facts: { wing, own, enemy, pawn: fact.pawn, on: fact.on, against: fact.against, moves },
-    text: `${named(side)} has a minority attack on the ${wing}: ${many(own, 'pawn')} against ${num(enemy)}, and ${strike}.`,
+    facts: { wing, own, enemy, pawn: fact.pawn, on: fact.on, against: fact.against, moves, blocker },
+    text: `${named(side)} has a minority attack on the ${wing}: ${many(own, 'pawn')} against ${num(enemy)}, and ${strike}${then}.`,
     claims: {
       'fewer pawns': own < enemy,
       'own pawn': scene.hasPawn(side, pawn),
       'enemy pawn': scene.hasPawn(other(side), target) && fileOf(target) === inner,
       'no own pawn on that file': pawnsOnFile(scene, side, inner).length === 0,
       'struck from there': [-1, 1].some((each) => step(side, on, each, 1) === target),
-      'nobody in the way': moves === 0 || inTheWay(scene, side, pawn, on) < 0,
+      'no pawn for good in the way': blocker?.kind !== 'pawn',
     },
   };
 }
