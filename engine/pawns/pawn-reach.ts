@@ -51,12 +51,6 @@ export function pawnHold(pawns: PawnMap, side: Side, square: Square): PawnHold {
   return (at(view.freeSpan, lane) >> rank) & 1 ? 'open' : 'fixed';
 }
 
-/** Whether a pawn of the side attacks the square or can come to attack it without being stopped. */
-export function canEverAttack(pawns: PawnMap, side: Side, square: Square): boolean {
-  const hold = pawnHold(pawns, side, square);
-  return hold === 'attacked' || hold === 'open';
-}
-
 /** The pawns of a side that attack a square now or soonest, and those that are stopped on the way. */
 export function pawnReach(pawns: PawnMap, side: Side, square: Square): PawnReach {
   const hold = pawnHold(pawns, side, square);
