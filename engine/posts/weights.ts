@@ -221,4 +221,4 @@ export const PLACE: Readonly<Record<PartName, number>> = Object.fromEntries(
 ) as Record<PartName, number>;
 
 /** What each further move of a route costs, in the table's units: a post two moves away must be that much better. */
-export const MOVE_COST = 1.5;
+export const MOVE_COST = 2;
