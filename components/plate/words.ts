@@ -46,7 +46,7 @@ export function captionTitle(reading: Reading, layer: Layer, man: SquareName | n
 export function captionText(reading: Reading, layer: Layer): string {
   const what =
     layer === 'mobility'
-      ? `Safe moves it would have from there; in brackets where it would itself be lost by exchange.`
+      ? `Safe moves it would have from there, tinted where it can get; in brackets where it would itself be lost by exchange.`
       : LAYER_TEXTS[layer];
   return `${moverText(reading)} ${what}`;
 }

@@ -7,7 +7,7 @@ import type { BoardPlace, HeatCell, Mark } from '../types';
 /** Tint under the men. Figures come over them with `mobilityFigures`. */
 export function mobilityTints(heat: readonly HeatCell[], board: BoardPlace, man: SquareName | null): Mark[] {
   return asked(heat, man).flatMap(({ name, cell }): Mark[] => {
-    if (!cell.safe) return [];
+    if (!cell.safe || !isWithin(heat, cell)) return [];
     const { x, y } = cornerOf(board, name);
     return [
       {
@@ -32,12 +32,17 @@ export function mobilityFigures(heat: readonly HeatCell[], board: BoardPlace, ma
       y: own ? y + 0.24 * board.size : y + board.size / 2 + size * 0.36,
       text: cell.safe ? String(cell.safeMoves) : `(${cell.safeMoves})`,
       size,
-      weight: cell.safe ? (cell.safeMoves >= 5 ? 700 : 400) : 300,
-      fill: cell.safe ? 'ink' : 'soft',
+      weight: cell.safe && isWithin(heat, cell) ? (cell.safeMoves >= 5 ? 700 : 400) : 300,
+      fill: cell.safe && isWithin(heat, cell) ? 'ink' : 'soft',
       anchor: 'middle',
       halo: 2,
     };
   });
+}
+
+/** Whether the man can get there; men whose ways are not looked for (kings, pawns) count as able. */
+function isWithin(heat: readonly HeatCell[], cell: HeatCell): boolean {
+  return cell.reached !== null || heat.every(({ reached }) => reached === null);
 }
 
 function asked(heat: readonly HeatCell[], man: SquareName | null): { name: SquareName; cell: HeatCell }[] {
