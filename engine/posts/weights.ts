@@ -222,3 +222,6 @@ export const PLACE: Readonly<Record<PartName, number>> = Object.fromEntries(
 
 /** What each further move of a route costs, in the table's units: a post two moves away must be that much better. */
 export const MOVE_COST = 2;
+
+/** What a preparation costs besides, in moves: it shows the plan before the man has stirred. */
+export const PREPARATION_MOVES = 2;

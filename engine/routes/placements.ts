@@ -2,7 +2,7 @@
 import { type AttackMap, attackMap, sideIndex } from '../attacks';
 import type { Position } from '../board';
 import { type Safety, safetyOf } from '../exchange';
-import { countParts, type Ground, groundOf, MOVE_COST, PARTS, PLACE } from '../posts';
+import { countParts, type Ground, groundOf, MOVE_COST, PARTS, PLACE, PREPARATION_MOVES } from '../posts';
 import { GUARD_BOUNDS, type GuardValue, guardFrom, SECOND_LOOK, searchGain } from '../tactics';
 import type { Side, Square } from '../types';
 import { isKingAttacked, mapOf, moved } from './boards';
@@ -109,8 +109,8 @@ export function gainOf({ now, there }: Pick<Placement, 'now' | 'there'>): number
 }
 
 /** What orders placements: the gain, less the time it takes. */
-export function merit({ gain, moves }: Placement, preparation = 0): number {
-  return gain - MOVE_COST * (moves + preparation - 1);
+export function merit({ gain, moves }: Placement, isPrepared = false): number {
+  return gain - MOVE_COST * (moves - 1 + (isPrepared ? PREPARATION_MOVES : 0));
 }
 
 /** The guard looks at every stop, and whether the man threatens something from its post. */

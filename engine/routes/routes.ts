@@ -58,7 +58,7 @@ interface Choice {
 const GRAIN = 1e-9;
 
 function meritOf({ placement, needs }: Choice): number {
-  return Math.round(merit(placement, needs === null ? 0 : 1) / GRAIN) * GRAIN;
+  return Math.round(merit(placement, needs !== null) / GRAIN) * GRAIN;
 }
 
 function byMeritOf(a: Choice, b: Choice): number {

@@ -34,7 +34,7 @@ export const GUARD_BOUNDS: Bounds = { nodesMax: 4000, checkPlies: 1 };
  * made by a quiet move, a fork or a man hemmed in. More than a rook is
  * not told apart.
  */
-export const SECOND_LOOK: Bounds = { nodesMax: 6000, checkPlies: 0, quietPlies: 3, gainsMax: 5 };
+export const SECOND_LOOK: Bounds = { nodesMax: 20000, checkPlies: 0, quietPlies: 3, gainsMax: 5 };
 
 /** What a board with the enemy (0 White, 1 Black) to move costs the other side. */
 export function guardOf(
