@@ -5,7 +5,7 @@
  * outside its chain can be active.
  */
 import { BISHOP, firstMen } from '../attacks';
-import { colourOf, fileOf, relativeRank, SQUARES, viewOrder } from '../board';
+import { colourOf, fileOf, rankOf, relativeRank, SQUARES, viewOrder } from '../board';
 import type { Lever, PawnReading, PawnValues } from '../pawns';
 import { hasBishop } from '../squares';
 import { opponent, type Side, type Square } from '../types';
@@ -50,7 +50,8 @@ function bishopValue(context: MenContext, pawns: PawnValues, square: Square): Bi
   for (const pawn of pawns.pawns) {
     if (pawn.side !== side || colourOf(pawn.square) !== colour) continue;
     onColour.push(pawn.square);
-    if (isFixedByPawns(pawn) && fileOf(pawn.square) >= 2 && fileOf(pawn.square) <= 5) fixed.push(pawn);
+    const isCentral = fileOf(pawn.square) >= 2 && fileOf(pawn.square) <= 5;
+    if (isCentral && isFixedByPawns(pawn, pawns[side].pawns)) fixed.push(pawn);
   }
   const ownPawns = pawns[side].pawns.length;
   const fixedCentre = fixed.map((pawn) => pawn.square);
@@ -69,11 +70,15 @@ function bishopValue(context: MenContext, pawns: PawnValues, square: Square): Bi
 }
 
 /**
- * Fixed by pawns: it cannot take one, and an enemy pawn stands before it or attacks the square before it. A pawn that
- * only a piece stands before is not fixed: the piece will go.
+ * Fixed by pawns: it cannot take one, and an enemy pawn stands before it or holds the square before it while no own pawn
+ * guards that square. With a neighbour at its side it may step up as a lever, like f7-f6 against e5. A pawn that only a
+ * piece stands before is not fixed: the piece will go.
  */
-function isFixedByPawns({ rammed, stopAttacked, levers }: PawnReading): boolean {
-  return (rammed || stopAttacked) && !levers.some(({ moves }) => moves === 0);
+function isFixedByPawns({ square, rammed, stopAttacked, levers }: PawnReading, own: readonly Square[]): boolean {
+  if (levers.some(({ moves }) => moves === 0)) return false;
+  if (rammed) return true;
+  // An own pawn guards the stop square just when it stands beside this one.
+  return stopAttacked && !own.some((pawn) => rankOf(pawn) === rankOf(square) && Math.abs(pawn - square) === 1);
 }
 
 /**

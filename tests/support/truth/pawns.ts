@@ -123,9 +123,9 @@ export function islandCount(scene: Scene, side: Side): number {
   return held.filter((here, file) => here && !held[file - 1]).length;
 }
 
-/** Whether pawns fix the pawn: one stands before it or holds the square, and it attacks none. */
+/** Whether pawns fix the pawn: one stands before it, or holds the square that no own pawn guards, and it attacks none. */
 export function isFixedByPawns(scene: Scene, side: Side, pawn: number): boolean {
   const stop = step(side, pawn, 0, 1);
-  const held = scene.hasPawn(other(side), stop) || pawnAttackers(scene, other(side), stop).length > 0;
-  return held && !strikesPawn(scene, side, pawn);
+  const held = pawnAttackers(scene, other(side), stop).length > 0 && pawnAttackers(scene, side, stop).length === 0;
+  return (held || scene.hasPawn(other(side), stop)) && !strikesPawn(scene, side, pawn);
 }
