@@ -37,7 +37,7 @@ function ownership(values: ReadingValues, file: FileValue, facts: FilesFact[]): 
     // On a half-open file the enemy pawn is the point: its sentence says it.
     if (status === 'half-open') return;
     const men = heavy[control].map((square) => manAt(values, square));
-    const inTo = entries[control].filter((entry) => canGo(values, heavy[control], entry)).map(squareName);
+    const inTo = waysIn(values, control, heavy[control]).map(squareName);
     facts.push({
       id: 'file-owned',
       side: control,
@@ -62,9 +62,16 @@ function ownership(values: ReadingValues, file: FileValue, facts: FilesFact[]): 
   }
 }
 
-/** Whether one of the men can go to the square now and is safe there: a queen may be lost where a rook would not. */
-function canGo({ men }: ReadingValues, from: readonly Square[], to: Square): boolean {
-  return men.some((man) => from.includes(man.square) && man.safeMoves.includes(to));
+/**
+ * Squares of the last two ranks of their file to which one of the heavy men can go now and be safe: a queen may be lost where
+ * a rook would not.
+ */
+function waysIn({ men }: ReadingValues, side: Side, heavy: readonly Square[]): Square[] {
+  const [first] = heavy;
+  if (first === undefined) return [];
+  return [7, 8]
+    .map((rank) => ((side === 'white' ? rank - 1 : 8 - rank) * 8 + fileOf(first)) as Square)
+    .filter((to) => men.some((man) => heavy.includes(man.square) && man.safeMoves.includes(to)));
 }
 
 function halfOpen(

@@ -1,13 +1,12 @@
 /** Facts about men that hold in a position. */
-import { isPinned } from '../../attacks';
+import { attackerMask, attackersOf, firstMen, isPinned } from '../../attacks';
 import { bitCount, colourOf, DIRECTION_TO, fileOf, relativeRank, squareName } from '../../board';
-import { firstMen } from '../../attacks';
 import { type BishopValue, fillAttacked, type ManValue, newWords, squaresOfWords } from '../../men';
 import { type Kind, opponent, type Side, SIDES, type Square } from '../../types';
 import type { MenFact, PlacedMan } from '../facts/men';
 import type { ReadingValues } from '../values';
-import { inView } from '../words';
-import { countOf, manAt, namesInView } from './names';
+import { compareInView, inView } from '../words';
+import { countOf, manAt } from './names';
 import { blockerOf } from './pawn-plans';
 
 /** Most moves of each kind on an empty board: the handbooks' table. */
@@ -42,23 +41,30 @@ function oneMan(values: ReadingValues, value: ManValue, facts: MenFact[]): void 
     facts.push({ ...base, id: 'knight-on-rim', square: man.square, sees: value.sees });
   }
   if (value.pinned) pinned(values, value, facts);
-  if (notes.includes('overloaded')) overloaded(values, value, facts);
+  const load = notes.includes('overloaded') ? overloaded(values, value) : null;
+  if (load) facts.push(load);
   else if (isPiece && duties.length > 0) tied(values, value, facts);
   const loose = isPiece && value.defenders === 0 && value.enPrise === 0;
   if (loose && relativeRank(square, side) >= 4) facts.push({ ...base, id: 'loose' });
 }
 
-function overloaded(values: ReadingValues, { side, square, duties }: ManValue, facts: MenFact[]): void {
-  const man = manAt(values, square);
-  const guarded = duties.filter(({ by }) => by === 'guard');
-  const wards = namesInView(
-    guarded.map((duty) => duty.square),
-    side,
-  ).slice(0, 2);
-  const guards = wards.map((name) =>
-    manAt(values, guarded.find((duty) => squareName(duty.square) === name)?.square ?? square),
-  );
-  facts.push({ id: 'overloaded', side, man, guards, squares: wards, men: [man.square] });
+/** Two men that it guards itself and that different enemy men attack, the first such pair in its side's view. */
+function overloaded(values: ReadingValues, { side, square, duties }: ManValue): MenFact | null {
+  const { map } = values;
+  const attackers = (ward: Square) => attackerMask(map, opponent(side), ward);
+  const wards = duties
+    .filter((duty) => duty.by === 'guard' && attackersOf(map, side, duty.square).includes(square))
+    .map((duty) => duty.square)
+    .filter((ward) => attackers(ward) !== 0)
+    .sort((a, b) => compareInView(squareName(a), squareName(b), side));
+  for (const [index, first] of wards.entries()) {
+    const second = wards.slice(index + 1).find((ward) => bitCount(attackers(first) | attackers(ward)) > 1);
+    if (second === undefined) continue;
+    const guards = [manAt(values, first), manAt(values, second)];
+    const man = manAt(values, square);
+    return { id: 'overloaded', side, man, guards, squares: guards.map((ward) => ward.square), men: [man.square] };
+  }
+  return null;
 }
 
 /** Of several duties the dearest; of equals the first in its side's view. */

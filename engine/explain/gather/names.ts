@@ -1,6 +1,6 @@
 /** From engine values to what facts hold: names of squares, men as they stand, comers in a stable order. */
-import { kindOn } from '../../attacks';
-import { ahead, rankOf, squareName } from '../../board';
+import { isPinned, kindOn } from '../../attacks';
+import { ahead, fileOf, rankOf, squareName } from '../../board';
 import type { User } from '../../reach';
 import { KINDS, type Side, type Square, type SquareName } from '../../types';
 import type { ReadingValues } from '../values';
@@ -41,6 +41,11 @@ export function comers(values: ReadingValues, users: readonly User[], side: Side
 /** Men of one kind that a side has. */
 export function countOf({ men }: ReadingValues, side: Side, kind: ManAt['kind']): number {
   return men.reduce((sum, man) => sum + (man.side === side && man.kind === kind ? 1 : 0), 0);
+}
+
+/** Whether a pin keeps a pawn of the side from going straight on. */
+export function isHeldOffItsFile({ map }: ReadingValues, side: Side, pawn: Square): boolean {
+  return isPinned(map, pawn) && fileOf(pawn) !== fileOf(map.kings[side === 'white' ? 0 : 1] as Square);
 }
 
 /** A pawn of the side on its way to attack a square, with the first man that stands in its way. */

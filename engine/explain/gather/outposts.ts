@@ -1,10 +1,10 @@
 /** Facts about outposts that hold in a position. */
 import { relativeRank, squareName } from '../../board';
 import type { OutpostValue } from '../../squares';
-import { opponent } from '../../types';
+import { opponent, type Side, type Square } from '../../types';
 import type { OutpostsFact } from '../facts/outposts';
 import type { ReadingValues } from '../values';
-import { comers, countOf, manAt, pawnOnItsWay } from './names';
+import { comers, countOf, isHeldOffItsFile, manAt, pawnOnItsWay } from './names';
 
 /** Everything worth saying about outposts. */
 export function outpostsFacts(values: ReadingValues): OutpostsFact[] {
@@ -21,6 +21,9 @@ function outpostFact(values: ReadingValues, post: OutpostValue): OutpostsFact | 
   const name = squareName(square);
   const man = occupant === null ? null : manAt(values, square);
   const settled = man !== null && man.kind !== 'king' && man.kind !== 'queen';
+  const isHeld = (of: Side, pawn: { moves: number } | null, from: Square | undefined) =>
+    pawn !== null && pawn.moves > 0 && from !== undefined && isHeldOffItsFile(values, of, from);
+  if (isHeld(side, support, support?.pawn) || isHeld(opponent(side), challenge, challenge?.from)) return null;
   if (post.rank === 'outpost' && support && hold !== 'open') {
     const base = { side, hold, support: pawnOnItsWay(values, side, support.pawn, support.moves, square) };
     if (settled) return { ...base, id: 'outpost-taken', man, tradable, squares: [name], men: [name] };

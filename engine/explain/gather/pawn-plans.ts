@@ -1,12 +1,11 @@
 /** Facts about what pawns can still do: levers, minority attacks, majorities. */
-import { isPinned } from '../../attacks';
 import { ahead, fileName, fileOf, squareName } from '../../board';
 import type { Lever } from '../../pawns';
 import { opponent, type Side, type Square } from '../../types';
 import type { LeverFact, Majority, StructureFact } from '../facts/structure';
 import type { ReadingValues } from '../values';
 import { compareInView } from '../words';
-import { manAtOrNull, namesInView } from './names';
+import { isHeldOffItsFile, manAtOrNull, namesInView } from './names';
 
 /** Levers still to come, minority attacks and majorities of a side. */
 export function planFacts(values: ReadingValues, side: Side): StructureFact[] {
@@ -27,11 +26,6 @@ export function blockerOf(values: ReadingValues, lever: Lever): Square | null {
   return null;
 }
 
-/** Whether a pin keeps the lever's pawn from going straight on. */
-function isHeldOffItsFile({ map }: ReadingValues, { from, side }: Lever): boolean {
-  return isPinned(map, from) && fileOf(from) !== fileOf(map.kings[side === 'white' ? 0 : 1] as Square);
-}
-
 /** Levers still to be played: of each pawn the soonest, central and supported ones first, three a side at most. */
 function levers(values: ReadingValues, side: Side, facts: StructureFact[]): void {
   const { pawns } = values;
@@ -49,7 +43,7 @@ function levers(values: ReadingValues, side: Side, facts: StructureFact[]): void
     )
       continue;
     seen.add(lever.from);
-    if (isHeldOffItsFile(values, lever)) continue;
+    if (isHeldOffItsFile(values, side, lever.from)) continue;
     const blocker = blockerOf(values, lever);
     if (blocker !== null && lever.moves > 1) continue;
     const [pawn, on, against] = [squareName(lever.from), squareName(lever.on), squareName(lever.against)];

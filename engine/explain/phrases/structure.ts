@@ -65,7 +65,7 @@ export const STRUCTURE_PHRASES: Phrases<StructureFact> = {
   }),
   'centre-fixed': ({ pairs: rams }) => ({
     head: 'The centre is fixed',
-    body: `${pairs(rams)}, and no pawn can take there now`,
+    body: `${pairs(rams)}, and no pawn can take another there now`,
   }),
   'centre-open': () => ({ head: 'The centre is open', body: 'no pawn stands on the d-file or the e-file' }),
   'centre-tension': ({ pairs: levers }) => ({

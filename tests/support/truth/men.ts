@@ -73,9 +73,17 @@ function guards(scene: Scene, side: Side, from: number, ward: number): boolean {
   return attackers.some((at) => scene.pinner(at) === from);
 }
 
-/** Whether an enemy man attacks the ward as soon as this one is gone. */
-const screens = (scene: Scene, side: Side, from: number, ward: number) =>
-  scene.without(from).attackers(other(side), ward).length > scene.attackers(other(side), ward).length;
+/** Whether the man stands between an enemy slider and the ward, or its own king, on a line on which that slider moves. */
+function screens(scene: Scene, side: Side, from: number, ward: number): boolean {
+  const bare = scene.board.map((letter, at) => (at === ward || at === scene.king(side) ? letter : ''));
+  return scene.men(other(side), 'bishop', 'rook', 'queen').some((slider) => {
+    const line = scene.with(bare.map((letter, at) => (at === slider ? scene.letter(slider) : letter)));
+    const shut = scene.with(line.board.map((letter, at) => (at === from ? scene.letter(from) : letter)));
+    return [ward, scene.king(side)].some(
+      (end) => end >= 0 && line.seen(slider).includes(end) && !shut.seen(slider).includes(end),
+    );
+  });
+}
 
 function trapped(scene: Scene, { side, man: { square } }: FactOf<'trapped'>): Told {
   const at = squareOf(square);
@@ -185,7 +193,7 @@ export const MEN: Checkers<MenFact> = {
       claims: {
         'own men': scene.sideOn(at) === side && scene.sideOn(ward) === side,
         'something falls': loses > 0,
-        'as it says': by === 'guard' ? guards(scene, side, at, ward) : screens(scene, side, at, ward),
+        'it shuts a line': by === 'guard' || screens(scene, side, at, ward),
       },
     };
   },

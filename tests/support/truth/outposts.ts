@@ -29,6 +29,13 @@ function wayOf(scene: Scene, side: Side, { pawn, landing, moves }: OnTheWay): Wa
   return { pawn: nameOf(pawn), moves, blocker };
 }
 
+/** No pin keeps the pawn from going straight on, where nothing else stands in its way. */
+function mayGo(scene: Scene, { pawn, moves, blocker }: Way): boolean {
+  return (
+    moves === 0 || blocker !== null || scene.moves(squareOf(pawn)).some((to) => fileOf(to) === fileOf(squareOf(pawn)))
+  );
+}
+
 const once = ({ blocker }: Way) => (blocker ? `, once ${the(blocker)} has moved` : '');
 
 function supportText(way: Way): string {
@@ -56,6 +63,7 @@ function post(scene: Scene, side: Side, square: number) {
   const claims = {
     'no pawn can challenge it': hold === 'permanent' || hold === 'fixed',
     'a pawn supports it now or in one move': support.moves <= 1,
+    'that pawn may move': mayGo(scene, support),
     'on the fourth to seventh rank': rankFor(side, square) >= 4 && rankFor(side, square) <= 7,
   };
   return { hold, support, body: `${challenge}, and ${supportText(support)}`, claims };
@@ -101,6 +109,7 @@ export const OUTPOSTS: Checkers<OutpostsFact> = {
       ),
       claims: {
         'an own man': scene.sideOn(at) === side,
+        'that pawn may move': mayGo(scene, challenge),
         'a pawn can come': holdAgainst(scene, other(side), at) === 'open',
         'in the enemy half': rankFor(side, at) >= 5,
       },

@@ -88,6 +88,7 @@ function weak(scene: Scene, { id, side, square }: FactOf<'weak-for-good'>): Told
       'held as it says': hold === (id === 'weak-for-good' ? 'permanent' : 'fixed'),
       'on the third to fifth rank': rankFor(side, at) >= 3 && rankFor(side, at) <= 5,
       'no pawn stands on it': scene.kindOn(at) !== 'pawn',
+      'one pawn and no other': stopped === null || front.length === 1,
       'of use to the enemy': commandedByEnemy || comers.length > 0,
     },
   };

@@ -185,7 +185,8 @@ export const STRUCTURE: Checkers<StructureFact> = {
       return [-1, 1].some((each) => {
         const to = step(side, pawn, each, 1);
         if (to < 0 || !(central(pawn) || central(to))) return false;
-        return scene.hasPawn(other(side), to) || (to === scene.passing && side === scene.mover);
+        if (to === scene.passing && side === scene.mover) return true;
+        return scene.hasPawn(other(side), to);
       });
     });
     const stuck = pawns.filter(central).every((pawn) => {
@@ -194,11 +195,11 @@ export const STRUCTURE: Checkers<StructureFact> = {
     });
     return {
       facts: { pairs },
-      text: `The centre is fixed: ${against(pairs)}, and no pawn can take there now.`,
+      text: `The centre is fixed: ${against(pairs)}, and no pawn can take another there now.`,
       claims: {
         'a pair head to head': pairs.length > 0,
         'no centre pawn can step or take': stuck,
-        'no pawn takes a pawn there': takesThere.length === 0,
+        'no pawn takes there': takesThere.length === 0,
       },
     };
   },
