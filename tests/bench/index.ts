@@ -1,14 +1,21 @@
 /**
  * `npm run bench`: prints figures from one run, asserts none. `--json` prints one object a line. Needs a build
- * (`npm run build`). `--only engine|http|page` runs a part.
+ * (`npm run build`). `--only engine|http|page` runs a part. `judgement FILE` ranks the positions of a file instead.
  */
 import { realPositions } from '../support/real-positions';
 import { attackMapFigures, readingFigures } from './engine';
 import type { Figure } from './figure';
 import { httpFigures, startBuiltServer } from './http';
+import { judgement } from './judgement';
 import { pageFigures } from './page';
 
 const args = process.argv.slice(2);
+if (args[0] === 'judgement') {
+  const file = args[1];
+  if (file === undefined) throw new Error('npm run bench -- judgement FILE');
+  judgement(file);
+  process.exit(0);
+}
 const asJson = args.includes('--json');
 const only = args.includes('--only') ? args[args.indexOf('--only') + 1] : undefined;
 const wants = (part: string) => only === undefined || only === part;
