@@ -3,6 +3,12 @@ import type { Colour, Side, SquareName } from '../../types';
 import type { Comer, ManAt } from '../words';
 import type { FactBase } from './base';
 
+export interface StoppedPawn {
+  readonly pawn: SquareName;
+  readonly on: SquareName;
+  readonly by: 'ram' | 'controlled';
+}
+
 export interface WeakSquareFact extends FactBase {
   readonly id: 'weak-for-good' | 'weak-while-fixed';
   /** The side whose weakness it is. */
@@ -15,8 +21,8 @@ export interface WeakSquareFact extends FactBase {
   readonly comers: readonly Comer[];
   /** Knights that the enemy has. */
   readonly enemyKnights: number;
-  /** Where it is fixed: the pawn that is stopped, the square that stops it, and how. */
-  readonly stopped: { readonly pawn: SquareName; readonly on: SquareName; readonly by: 'ram' | 'controlled' } | null;
+  /** Where it is fixed: the pawns that are stopped, the squares that stop them, and how. */
+  readonly stopped: readonly StoppedPawn[];
 }
 
 export interface WeakComplex extends FactBase {

@@ -1,6 +1,6 @@
 /** Facts about squares that hold in a position. */
 import { attackerMask } from '../../attacks';
-import { bitCount, relativeRank, squareName } from '../../board';
+import { bitCount, fileOf, relativeRank, squareName } from '../../board';
 import { commandOf, type WeakSquareValue } from '../../squares';
 import { opponent, type Side, SIDES, type Square } from '../../types';
 import type { SquaresFact } from '../facts/squares';
@@ -28,7 +28,7 @@ function weakSquare(values: ReadingValues, weak: WeakSquareValue): SquaresFact {
   const at = squareName(square);
   const occupant = users.find(({ from }) => from === square);
   const coming = comers(values, users, enemy);
-  const [stopped] = weak.stopped;
+  const stopped = [...weak.stopped].sort((a, b) => fileOf(a.from) - fileOf(b.from));
   return {
     id: hold === 'permanent' ? 'weak-for-good' : 'weak-while-fixed',
     side,
@@ -37,7 +37,7 @@ function weakSquare(values: ReadingValues, weak: WeakSquareValue): SquaresFact {
     occupant: occupant ? manAt(values, square) : null,
     comers: coming,
     enemyKnights: countOf(values, enemy, 'knight'),
-    stopped: stopped ? { pawn: squareName(stopped.from), on: squareName(stopped.stoppedOn), by: stopped.by } : null,
+    stopped: stopped.map(({ from, stoppedOn, by }) => ({ pawn: squareName(from), on: squareName(stoppedOn), by })),
     squares: [at],
     men: occupant ? [at] : coming.filter(({ moves }) => moves === coming[0]?.moves).map((comer) => comer.square),
   };

@@ -1,5 +1,6 @@
 /** Sentences about squares. */
-import type { SquaresFact, WeakSquareFact } from '../facts/squares';
+import type { Side } from '../../types';
+import type { SquaresFact, StoppedPawn, WeakSquareFact } from '../facts/squares';
 import type { Phrase, Phrases } from '../phrase';
 import { capital, comersSentence, counted, enemyName, enemyOf, inWords, listed, name, theMan } from '../words';
 
@@ -11,18 +12,22 @@ function usage({ side, occupant, comers, commandedByEnemy, enemyKnights }: WeakS
   );
 }
 
+/** What stops a pawn: the pawn before it, or one that holds the next square. */
+function stop({ on, by }: StoppedPawn, side: Side): string {
+  return by === 'ram' ? `by the pawn on ${on}` : `before ${on}, which a ${enemyOf(side)} pawn holds`;
+}
+
 function weak(fact: WeakSquareFact): Phrase {
-  const { id, square, side, stopped } = fact;
-  if (id === 'weak-for-good' || !stopped) {
+  const { square, side, stopped } = fact;
+  const [first, second] = stopped;
+  if (!first) {
     return { head: `${square} is weak for good`, body: `no ${side} pawn can guard it any more`, more: [usage(fact)] };
   }
-  const reason =
-    stopped.by === 'ram'
-      ? `is stopped by the pawn on ${stopped.on}`
-      : `is stopped before ${stopped.on}, which a ${enemyOf(side)} pawn holds`;
   return {
     head: `${square} is weak as the pawns stand`,
-    body: `the pawn on ${stopped.pawn} that could guard it ${reason}`,
+    body: second
+      ? `of the pawns that could guard it, the one on ${first.pawn} is stopped ${stop(first, side)}, and the one on ${second.pawn} ${stop(second, side)}`
+      : `the pawn on ${first.pawn} that could guard it is stopped ${stop(first, side)}`,
     more: [usage(fact)],
   };
 }

@@ -62,18 +62,20 @@ function weak(scene: Scene, { id, side, square }: FactOf<'weak-for-good'>): Told
     ({ pawn }, _, all) =>
       !all.some((each) => fileOf(each.pawn) === fileOf(pawn) && rankFor(side, each.pawn) > rankFor(side, pawn)),
   );
-  const [first] = front.sort((a, b) => fileOf(a.pawn) - fileOf(b.pawn));
-  const stopped = hold === 'fixed' && first ? { pawn: nameOf(first.pawn), on: nameOf(first.stop), by: first.by } : null;
+  const stopped = hold === 'fixed' ? front.sort((a, b) => fileOf(a.pawn) - fileOf(b.pawn)) : [];
   const usage = occupant
     ? `${start(the(occupant))} stands there`
     : (comingText(scene, enemy, comers) ?? (commandedByEnemy ? `${named(enemy)} commands it` : null));
-  const why = stopped
-    ? `the pawn on ${stopped.pawn} that could guard it ${
-        stopped.by === 'ram'
-          ? `is stopped by the pawn on ${stopped.on}`
-          : `is stopped before ${stopped.on}, which a ${enemy} pawn holds`
-      }`
-    : `no ${side} pawn can guard it any more`;
+  const stops = stopped.map(({ stop, by }) =>
+    by === 'ram' ? `by the pawn on ${nameOf(stop)}` : `before ${nameOf(stop)}, which a ${enemy} pawn holds`,
+  );
+  const pawns = stopped.map(({ pawn }) => nameOf(pawn));
+  const why =
+    stops.length === 0
+      ? `no ${side} pawn can guard it any more`
+      : stops.length === 1
+        ? `the pawn on ${pawns[0]} that could guard it is stopped ${stops[0]}`
+        : `of the pawns that could guard it, the one on ${pawns[0]} is stopped ${stops[0]}, and the one on ${pawns[1]} ${stops[1]}`;
   return {
     facts: {
       square,
@@ -81,14 +83,13 @@ function weak(scene: Scene, { id, side, square }: FactOf<'weak-for-good'>): Told
       occupant,
       comers,
       enemyKnights: scene.men(enemy, 'knight').length,
-      stopped,
+      stopped: stopped.map(({ pawn, stop, by }) => ({ pawn: nameOf(pawn), on: nameOf(stop), by })),
     },
-    text: sentences(`${square} is weak ${stopped ? 'as the pawns stand' : 'for good'}: ${why}`, usage),
+    text: sentences(`${square} is weak ${stops.length > 0 ? 'as the pawns stand' : 'for good'}: ${why}`, usage),
     claims: {
       'held as it says': hold === (id === 'weak-for-good' ? 'permanent' : 'fixed'),
       'on the third to fifth rank': rankFor(side, at) >= 3 && rankFor(side, at) <= 5,
       'no pawn stands on it': scene.kindOn(at) !== 'pawn',
-      'one pawn and no other': stopped === null || front.length === 1,
       'of use to the enemy': commandedByEnemy || comers.length > 0,
     },
   };
