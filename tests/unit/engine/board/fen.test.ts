@@ -49,6 +49,7 @@ const REFUSED = [
   ['rnbqkbnr/pppppppp/8/8/8/8/PPPPPPPP/RNBQKBNR w KQkq - 0 99999999999999999999', 'fullmove-range', 'a huge number'],
   ['rnbqkbnr/pppppppp/8/8/8/8/PPPPPPPP/RNBQKBNR w KQkq - -1 1', 'halfmove-form', 'less than nothing'],
   ['4k3/8/8/8/8/8/PPPPPPPP/B1B1K3 w - - 0 1', 'promoted-count', 'two bishops on dark squares and all pawns'],
+  ['4k3/8/8/8/8/8/PPPPPPPP/1B1BK3 w - - 0 1', 'promoted-count', 'two bishops on light squares and all pawns'],
   ['8/8/8/3kK3/8/8/8/8 w - - 0 1', 'opponent-in-check', 'kings side by side'],
   ['rnbqkbnr/pppppppp/8/8/8/8/PPPPPPPP/RNBQKBNR w KQkq - 0 1 2', 'field-count', 'seven fields'],
 ] as const;

@@ -79,3 +79,14 @@ it('a board of queens has room for all its moves', () => {
   const replies = legalMoves(position).map((move) => perft(play(position, move), 1));
   expect(perft(position, 2)).toBe(replies.reduce((sum, count) => sum + count, 0));
 });
+
+it('a capture in passing is no move where the captured pawn covers the king', () => {
+  const moves = legalMoves(positionOf('4k1b1/8/8/3pP3/8/1K6/8/8 w - d6 0 1'));
+  expect(named(moves)).not.toContain('e5d6 null pawn en-passant');
+  expect(named(moves)).toContain('e5e6 null null null');
+});
+
+it('of several kings the first stays the one to be covered, whichever moves are tried before', () => {
+  const rook = legalMoves(positionOf('r3k3/8/8/8/8/8/R7/KK6 w - - 0 1')).filter(({ kind }) => kind === 'rook');
+  expect(rook.map(({ to }) => squareName(to))).toEqual(['a3', 'a4', 'a5', 'a6', 'a7', 'a8']);
+});
