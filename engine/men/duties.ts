@@ -1,6 +1,6 @@
 /** Duties: what falls if a man leaves its square. */
 import { type AttackMap, firstMen, KING, type SideIndex, slidesAlong } from '../attacks';
-import { DIRECTION_TO } from '../board';
+import { DIRECTION_TO, OPPOSITE } from '../board';
 import { lossOn } from '../exchange';
 import type { SquareTable } from '../squares';
 import type { Square } from '../types';
@@ -23,36 +23,50 @@ const NONE: readonly Duty[] = [];
 export function dutiesOf(map: AttackMap, table: SquareTable, from: Square): readonly Duty[] {
   const side = (map.board[from]! >> 3) as SideIndex;
   const enemyRow = (side ^ 1) << 6;
+  const pins = isOnPinLine(map, side, from);
   let duties: Duty[] | null = null;
   for (let other = 0; other < map.counts[side]!; other++) {
     const square = map.squares[(side << 5) | other]!;
-    const place = map.board[square]! & 7;
-    if (square === from || place === KING) continue;
-    const isAttacked = map.attackers[enemyRow | square] !== 0;
-    const by = isAttacked ? bond(map, table, side, from, square) : shutsLine(map, side, from, square) ? 'screen' : null;
-    if (by === null) continue;
-    const loses = lossOn(map, side, place, square, from) - Math.max(0, table.exchanges[enemyRow | square]!);
-    if (loses <= 0) continue;
-    const duty: Duty = { square: square as Square, loses, by };
-    if (duties === null) duties = [duty];
-    else duties.push(duty);
+    if (map.attackers[enemyRow | square] === 0 || square === from) continue;
+    const by = bond(map, table, side, from, square) ?? (pins ? pinBond(map, table, side, from, square) : null);
+    if (by !== null) duties = withDuty(duties, map, table, from, square, by);
+  }
+  // Men that nothing attacks yet: only the line that this man alone keeps shut can change that.
+  const lines = firstMen(map);
+  for (let direction = 0; direction < 8; direction++) {
+    if (!isEnemySlider(map, side, lines[(from << 3) | direction]!, direction)) continue;
+    const square = lines[(from << 3) | OPPOSITE[direction]!]!;
+    if (square < 0 || map.board[square]! >> 3 !== side || map.attackers[enemyRow | square] !== 0) continue;
+    duties = withDuty(duties, map, table, from, square, 'screen');
   }
   return duties === null ? NONE : duties.sort((a, b) => a.square - b.square);
 }
 
-/** Whether the man alone keeps an enemy slider from attacking the own man on a square. */
-function shutsLine(map: AttackMap, side: SideIndex, from: number, square: number): boolean {
-  const direction = DIRECTION_TO[(square << 6) | from]!;
-  if (direction < 0) return false;
-  const lines = firstMen(map);
-  const slider = lines[(from << 3) | direction]!;
-  return isEnemySlider(map, side, slider, direction) && lines[(square << 3) | direction] === from;
+/** Adds the duty to the own man on a square where the enemy gains there by the man's leaving. */
+function withDuty(
+  duties: Duty[] | null,
+  map: AttackMap,
+  table: SquareTable,
+  from: Square,
+  square: number,
+  by: Duty['by'],
+): Duty[] | null {
+  const code = map.board[square]!;
+  const side = (code >> 3) as SideIndex;
+  const place = code & 7;
+  if (place === KING) return duties;
+  const now = Math.max(0, table.exchanges[((side ^ 1) << 6) | square]!);
+  const loses = lossOn(map, side, place, square, from) - now;
+  if (loses <= 0) return duties;
+  const duty: Duty = { square: square as Square, loses, by };
+  if (duties === null) return [duty];
+  duties.push(duty);
+  return duties;
 }
 
 /**
  * How the man on `from` can matter to an attacked own man on a square: it guards it, directly, from behind or through the men
- * that attack it on the same line; it shuts the line of an enemy slider; or it takes part in a pin. Null where
- * it does nothing of these, so that the exchange need not be played out.
+ * that attack it on the same line; or it shuts the line of an enemy slider. Null where it does neither.
  */
 function bond(map: AttackMap, table: SquareTable, side: SideIndex, from: number, square: number): Duty['by'] | null {
   if (bears(map, table, from, square)) return 'guard';
@@ -64,13 +78,22 @@ function bond(map: AttackMap, table: SquareTable, side: SideIndex, from: number,
       if (sliderBeyond(map, side, from, direction) >= 0) return 'screen';
     }
   }
-  return pinBond(map, table, side, from, square);
+  return null;
 }
 
 /** Whether the man attacks the square or stands behind one of its side that does. */
 function bears({ attackers, board, numbers }: AttackMap, table: SquareTable, man: number, square: number): boolean {
   const entry = ((board[man]! >> 3) << 6) | square;
   return (((attackers[entry]! | table.behind[entry]!) >>> numbers[man]!) & 1) === 1;
+}
+
+/** Whether the man can take part in a pin at all: it looks along a line at the enemy king, or stands on one with its own. */
+function isOnPinLine({ board, kings }: AttackMap, side: SideIndex, from: number): boolean {
+  const king = kings[side]!;
+  if (king >= 0 && DIRECTION_TO[(king << 6) | from]! >= 0) return true;
+  const enemyKing = kings[side ^ 1]!;
+  const direction = enemyKing < 0 ? -1 : DIRECTION_TO[(from << 6) | enemyKing]!;
+  return direction >= 0 && slidesAlong(board[from]!, direction);
 }
 
 /**

@@ -28,7 +28,7 @@ describe('files', () => {
         const holds = SIDES.filter((side) => open !== 'closed' && slowHold(letters, side === 'white', file) > 0);
         const held = holds.length === 2 ? 'shared' : (holds[0] ?? 'none');
         seen[held] = (seen[held] ?? 0) + 1;
-        const ours = [status, halfOpenFor, control];
+        const ours: (string | null)[] = [status, halfOpenFor, control];
         const slow: (string | null)[] = [open, half, held];
         for (const side of SIDES) {
           ours.push(named(heavy[side]), named(entries[side]));
