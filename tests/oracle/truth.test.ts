@@ -6,7 +6,7 @@ import { isTrue } from '../support/truth';
 import { Scene } from '../support/truth/scene';
 
 /** How many real positions; TRUTH=20000 runs all of them. */
-const COUNT = Number(process.env['TRUTH'] ?? 150);
+const COUNT = Number(process.env['TRUTH'] ?? 400);
 
 it(`0 false statements over ${COUNT} real positions`, { timeout: 36_000_000 }, () => {
   const wrong: string[] = [];
