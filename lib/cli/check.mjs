@@ -54,7 +54,9 @@ async function check() {
     async () => (await runProgram('next', ['typegen'])) && (await runProgram('tsc', ['--noEmit', '-p', '.'])),
   );
   await step('dead code', () => runProgram('knip', ['--no-progress', '--no-config-hints']));
-  await step('dead code, as shipped', () => runProgram('knip', ['--no-progress', '--no-config-hints', '--production', '--exclude', 'types']));
+  await step('dead code, as shipped', () =>
+    runProgram('knip', ['--no-progress', '--no-config-hints', '--production', '--exclude', 'types']),
+  );
   await step(
     'tests',
     () => runProgram('vitest', ['run', '--reporter=default', '--reporter=json', `--outputFile.json=${UNIT_REPORT}`]),

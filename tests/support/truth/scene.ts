@@ -17,7 +17,6 @@ const KIND_OF: Readonly<Record<string, Kind>> = {
   k: 'king',
 };
 
-const SIDES: readonly Side[] = ['white', 'black'];
 export const other = (side: Side): Side => (side === 'white' ? 'black' : 'white');
 export const fileOf = (square: number): number => square % 8;
 /** Rank as the side counts it, 1 to 8. */
