@@ -48,8 +48,21 @@ const GATHER: Readonly<Record<Theme, (values: ReadingValues) => readonly Fact[]>
 
 /** Most statements of one kind that a side gets; the heaviest stay. */
 const MOST_OF_A_KIND = 4;
+/** Most statements of a theme; the heaviest stay. Together as many as a person reads of one position. */
+const MOST_OF_A_THEME: Readonly<Record<Theme, number>> = {
+  structure: 10,
+  squares: 8,
+  outposts: 6,
+  files: 7,
+  men: 9,
+  king: 5,
+  control: 3,
+};
 /** Most leading statements: as many as stand beside a plate. */
 const LEAD_MAX = 5;
+/** The lead never falls short of so many for want of weight; further ones must weigh LEAD_WEIGHT. */
+const LEAD_LEAST = 3;
+const LEAD_WEIGHT = 40;
 
 interface Weighed {
   readonly theme: Theme;
@@ -99,7 +112,7 @@ function keyOf({ id, side, men, squares }: Fact): string {
   return key.slice(0, -1);
 }
 
-/** Drops what an outpost's sentence says better, and all but the heaviest of a kind. */
+/** Drops what an outpost's sentence says better, and all but the heaviest of a kind and of a theme. */
 function withoutRepeats(weighed: readonly Weighed[]): Weighed[] {
   const posts = new Set<SquareName>();
   for (const { fact } of weighed) {
@@ -107,12 +120,16 @@ function withoutRepeats(weighed: readonly Weighed[]): Weighed[] {
     if (fact.id === 'outpost-taken') posts.add(fact.man.square);
   }
   const counts = new Map<string, number>();
-  return weighed.filter(({ fact }) => {
+  const themes = new Map<Theme, number>();
+  return weighed.filter(({ theme, fact }) => {
     if ((fact.id === 'weak-for-good' || fact.id === 'weak-while-fixed') && posts.has(fact.square)) return false;
     const kind = fact.side === 'black' ? `-${fact.id}` : fact.id;
     const count = (counts.get(kind) ?? 0) + 1;
     counts.set(kind, count);
-    return count <= MOST_OF_A_KIND;
+    if (count > MOST_OF_A_KIND) return false;
+    const ofTheme = (themes.get(theme) ?? 0) + 1;
+    themes.set(theme, ofTheme);
+    return ofTheme <= MOST_OF_A_THEME[theme];
   });
 }
 
@@ -137,8 +154,8 @@ function leading(statements: readonly StatementValue[]): string[] {
   const themes = new Set<Theme>();
   const taken = new Set<SquareName>();
   const lead: string[] = [];
-  for (const { key, theme, men, squares } of statements) {
-    if (lead.length === LEAD_MAX) break;
+  for (const { key, theme, men, squares, weight } of statements) {
+    if (lead.length === LEAD_MAX || (lead.length >= LEAD_LEAST && weight < LEAD_WEIGHT)) break;
     if (themes.has(theme) || squares.length + men.length === 0 || men.some((man) => taken.has(man))) continue;
     themes.add(theme);
     for (const man of men) taken.add(man);

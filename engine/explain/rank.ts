@@ -85,6 +85,15 @@ function edgeCost(square: string): number {
   return file === 'a' || file === 'h' ? 12 : file === 'b' || file === 'g' ? 5 : 0;
 }
 
+function isInOwnHalf(square: string, side: 'white' | 'black'): boolean {
+  return side === 'white' ? square.charAt(1) <= '4' : square.charAt(1) >= '5';
+}
+
+/** A square of the fifth rank, as the side sees it, lies outside its camp. */
+function isOutsideCamp(square: string, side: 'white' | 'black'): boolean {
+  return square.charAt(1) === (side === 'white' ? '5' : '4');
+}
+
 /** What raises or lowers a statement within its kind. */
 function adjustment(fact: Fact): number {
   switch (fact.id) {
@@ -93,16 +102,33 @@ function adjustment(fact: Fact): number {
     case 'named-structure':
       return -6 * fact.differs;
     case 'outpost-taken':
-      return fact.tradable ? 0 : 4;
+      return (
+        (fact.tradable ? 0 : 4) -
+        (fact.man.kind === 'rook' ? 8 : 0) -
+        (isInOwnHalf(fact.man.square, fact.side) ? 14 : 0) -
+        edgeCost(fact.man.square)
+      );
     case 'outpost-free':
-      return -4 * ((fact.comers[0]?.moves ?? 3) - 1) + (fact.hold === 'permanent' ? 2 : 0) - edgeCost(fact.square);
+      return (
+        -4 * ((fact.comers[0]?.moves ?? 3) - 1) +
+        (fact.hold === 'permanent' ? 2 : 0) -
+        (fact.comers[0]?.kind === 'knight' ? 0 : 6) -
+        (isInOwnHalf(fact.square, fact.side) ? 14 : 0) -
+        edgeCost(fact.square)
+      );
     case 'weak-for-good':
     case 'weak-while-fixed':
       return (
         (fact.occupant ? 14 : 8 - 3 * ((fact.comers[0]?.moves ?? 4) - 1)) +
         (fact.commandedByEnemy ? 3 : 0) -
+        (isOutsideCamp(fact.square, fact.side) ? 8 : 0) -
         edgeCost(fact.square)
       );
+    case 'weak-complex':
+      return fact.enemyBishop ? 4 : -10;
+    case 'bad-bishop':
+      // One move mends it.
+      return fact.outside?.moves === 1 ? -16 : 0;
     case 'backward-pawn':
       return (fact.halfOpen ? 6 : 0) + (fact.stopHeldBy ? 3 : 0);
     case 'isolated-pawn':
@@ -114,11 +140,11 @@ function adjustment(fact: Fact): number {
       return 6 - 2 * fact.moves + (fact.blocker ? -2 : 0);
     case 'lever-ready':
     case 'lever-coming':
-      return (fact.supported ? 6 : 0) - (fact.blocker ? 10 : 0) - fact.moves;
+      return (fact.supported ? 6 : -8) - (fact.blocker ? 10 : 0) - fact.moves;
     case 'file-owned':
       return fact.entries.length > 0 ? 6 : 0;
     case 'half-open-target':
-      return 4 * fact.heavy.length;
+      return 4 * fact.heavy.length - (fact.heavy.length === 0 ? 6 : 0) - (fact.why === 'unguarded' ? 4 : 0);
     case 'rook-to-file':
       return (fact.status === 'open' ? 8 : 0) - 4 * (fact.moves - 1);
     case 'on-seventh':
@@ -128,7 +154,7 @@ function adjustment(fact: Fact): number {
     case 'no-luft':
       return fact.noFlight ? 14 : 0;
     case 'open-line-beside-king':
-      return 6 * fact.heavy.length;
+      return (fact.status === 'open' ? 4 : -4) + 6 * fact.heavy.length;
     case 'king-zone':
       return 4 * (fact.attackers.length - fact.guards);
     case 'reach':

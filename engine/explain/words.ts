@@ -27,6 +27,12 @@ export function counted(count: number, noun: string, plural = `${noun}s`): strin
   return `${inWords(count)} ${count === 1 ? noun : plural}`;
 }
 
+/** A share of the pawns with its verb: 'five of eight pawns stand', 'one of three pawns stands', 'all seven pawns stand'. */
+export function pawnsStand(count: number, total: number): string {
+  if (count === total && count > 1) return `all ${inWords(total)} pawns stand`;
+  return `${inWords(count)} of ${counted(total, 'pawn')} ${count === 1 ? 'stands' : 'stand'}`;
+}
+
 /** A text at the beginning of a sentence; a square's name stays as it is. */
 export function capital(text: string): string {
   if (/^[a-h][1-8]/.test(text)) return text;
@@ -104,14 +110,23 @@ export function filesNamed(files: readonly string[]): string {
   return `files ${listed(files)}`;
 }
 
+/** Files at the beginning of a sentence: 'The c-file', 'The c- and e-files', 'Files c, e and g'. */
+export function theFiles(files: readonly string[]): string {
+  return files.length > 2 ? capital(filesNamed(files)) : `The ${filesNamed(files)}`;
+}
+
 /** A man that can come, as a fact holds it. */
 export interface Comer extends ManAt {
   readonly moves: number;
 }
 
+/** Of so many men of several kinds each is named; more are counted. */
+const NAMED_MOST = 3;
+
 /**
  * Who gets there, in a sentence of its own without full stop: 'The white knight on c4 gets there in one move', 'Both
- * black knights get there in two moves'. Only the soonest are named; men that stand there already are left out.
+ * black knights get there in two moves'. Only the soonest are named, where they are few; men that stand there already
+ * are left out.
  */
 export function comersSentence(comers: readonly Comer[], side: Side, knights: number): string | null {
   const coming = comers.filter(({ moves }) => moves > 0);
@@ -126,5 +141,6 @@ export function comersSentence(comers: readonly Comer[], side: Side, knights: nu
   }
   const kinds = new Set(soonest.map(({ kind }) => kind));
   if (kinds.size === 1) return `The ${side} ${first.kind}s on ${listed(squares)} get there ${within}`;
-  return `${capital(inWords(soonest.length))} ${side} men get there ${within}: ${theMen(soonest)}`;
+  const men = `${capital(inWords(soonest.length))} ${side} men get there ${within}`;
+  return soonest.length > NAMED_MOST ? men : `${men}: ${theMen(soonest)}`;
 }

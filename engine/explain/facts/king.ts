@@ -46,7 +46,10 @@ export interface OpenLineBeside extends FactBase {
   readonly id: 'open-line-beside-king';
   readonly side: Side;
   readonly king: SquareName;
+  /** Its file and those beside it that have no enemy pawn, all of one status: open, or half-open for the enemy. */
   readonly files: readonly FileName[];
+  readonly status: 'open' | 'half-open';
+  /** Enemy rooks and queens on them. */
   readonly heavy: readonly ManAt[];
 }
 

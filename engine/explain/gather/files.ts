@@ -136,11 +136,23 @@ function doubled(values: ReadingValues, { file, heavy }: FileValue, side: Side, 
   facts.push({ id: 'heavy-doubled', side, file: fileName(file), heavy: men, squares: on, men: on });
 }
 
-/** The rook that gets soonest to a file on which its side has no heavy man yet: one a side. */
+/** Whether the side's rooks have something to do on the file: a way in, or a pawn to bite on. */
+function isOfUse({ status, halfOpenFor, entries, targets }: FileValue, side: Side): boolean {
+  if (status === 'half-open' && halfOpenFor !== side) return false;
+  return status !== 'closed' && (entries[side].length > 0 || targets.length > 0);
+}
+
+/**
+ * The rook that gets soonest to a file of use on which its side has no heavy man yet: one a side. A rook that has such
+ * a file already stays out of it.
+ */
 function takers(values: ReadingValues, side: Side, facts: FilesFact[]): void {
-  const found = values.files.flatMap(({ file, status, heavy, takers: rooks }) => {
+  const found = values.files.flatMap((value) => {
+    const { file, status, heavy, takers: rooks } = value;
     const taker = rooks[side];
-    return taker && status !== 'closed' && heavy[side].length === 0 ? [{ file, status, taker }] : [];
+    if (!taker || status === 'closed' || heavy[side].length > 0 || !isOfUse(value, side)) return [];
+    const now = values.files[fileOf(taker.rook)];
+    return now && isOfUse(now, side) ? [] : [{ file, status, taker }];
   });
   found.sort(
     (a, b) => a.taker.moves - b.taker.moves || (a.status === b.status ? a.file - b.file : a.status === 'open' ? -1 : 1),
@@ -173,7 +185,8 @@ function seventh(values: ReadingValues, side: Side, facts: FilesFact[]): void {
     facts.push({ id: 'on-seventh', side, men, heavy, pawns, squares: [...men, ...pawns] });
     return;
   }
-  const [first] = comers;
+  // A queen's raid is another matter: the seventh rank is the rooks'.
+  const first = comers.find(({ from }) => kindOn(values.map, from) === 'rook');
   if (!first || first.moves > 2) return;
   const man = manAt(values, first.from);
   const to = squareName(first.to);

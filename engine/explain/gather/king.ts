@@ -2,11 +2,11 @@
 import { attackersOf } from '../../attacks';
 import { fileName, fileOf, relativeRank, squareName } from '../../board';
 import type { KingValue } from '../../men';
-import { opponent, SIDES } from '../../types';
+import { opponent, SIDES, type Square } from '../../types';
 import type { KingFact } from '../facts/king';
 import type { ReadingValues } from '../values';
 import { inView } from '../words';
-import { manAt, namesInView } from './names';
+import { countOf, manAt, namesInView } from './names';
 
 /** Everything worth saying about the kings. */
 export function kingFacts(values: ReadingValues): KingFact[] {
@@ -27,26 +27,15 @@ function oneKing(values: ReadingValues, king: KingValue): KingFact[] {
     facts.push({ ...base, id: 'in-check', checkers, squares: [at, ...checkers.map(({ square }) => square)] });
   }
   luft(values, king, base, facts);
-  const heavy = values.files
-    .filter(({ file }) => king.openBeside.includes(file))
-    .flatMap((file) => file.heavy[enemy].map((square) => manAt(values, square)));
-  const hasHeavy = values.men.some((man) => man.side === enemy && (man.kind === 'rook' || man.kind === 'queen'));
-  // A king's cover matters while the enemy has a rook or a queen.
-  if (hasHeavy) shelter(king, base, facts);
-  if (king.openBeside.length > 0 && hasHeavy) {
-    const files = king.openBeside.map(fileName);
-    facts.push({
-      ...base,
-      id: 'open-line-beside-king',
-      files,
-      heavy,
-      squares: [at, ...heavy.map(({ square }) => square)],
-    });
+  // A king's cover, the lines beside it and the men that aim at it matter while the enemy has a queen or two rooks.
+  const isExposed = countOf(values, enemy, 'queen') > 0 || countOf(values, enemy, 'rook') > 1;
+  if (isExposed) {
+    openLines(values, king, base, facts, shelter(king, base, facts));
   }
   const attackers = inView(king.reachedBy.map(squareName), enemy).map((name) =>
     manAt(values, king.reachedBy.find((square) => squareName(square) === name) ?? king.square),
   );
-  if (attackers.length >= 3) {
+  if (isExposed && attackers.length >= 3) {
     const from = attackers.map(({ square }) => square);
     facts.push({ ...base, id: 'king-zone', attackers, guards: king.guardedBy.length, men: [at, ...from] });
   }
@@ -59,23 +48,60 @@ type KingBase = Pick<KingFact, 'squares' | 'men'> & {
   readonly king: ReturnType<typeof squareName>;
 };
 
-/** Shelter is spoken of where the king has castled or gone to a wing: on its first two ranks, files a to c or f to h. */
-function shelter({ square, side, shelter: files }: KingValue, base: KingBase, facts: KingFact[]): void {
+/**
+ * Shelter is spoken of where the king has castled or gone to a wing: on its first two ranks, files a to c or f to h.
+ * Answers the files that the sentence calls bare.
+ */
+function shelter({ square, side, shelter: files }: KingValue, base: KingBase, facts: KingFact[]): number[] {
   const onWing = fileOf(square) <= 2 || fileOf(square) >= 5;
-  if (!onWing || relativeRank(square, side) > 2) return;
+  if (!onWing || relativeRank(square, side) > 2) return [];
   const pawns = files.flatMap(({ pawn }) => (pawn === null ? [] : [pawn]));
   const names = namesInView(pawns, side);
   if (pawns.length === files.length && files.every(({ advanced }) => advanced === 0)) {
     facts.push({ ...base, id: 'shelter-whole', pawns: names, squares: [base.king, ...names] });
-    return;
+    return [];
   }
   const gone = namesInView(
     files.flatMap(({ pawn, advanced }) => (pawn !== null && advanced >= 2 ? [pawn] : [])),
     side,
   );
-  const gaps = files.filter(({ pawn }) => pawn === null).map(({ file }) => fileName(file));
+  const gaps = files.filter(({ pawn }) => pawn === null).map(({ file }) => file);
   if (gaps.length + gone.length > 0) {
-    facts.push({ ...base, id: 'shelter-broken', bare: gaps, advanced: gone, squares: [base.king, ...gone] });
+    const bare = gaps.map(fileName);
+    facts.push({ ...base, id: 'shelter-broken', bare, advanced: gone, squares: [base.king, ...gone] });
+  }
+  return gaps;
+}
+
+/**
+ * Lines are spoken of while the king keeps to its first three ranks: open files together, half-open ones together. Files
+ * that nobody uses and that a sentence calls bare already are left out.
+ */
+function openLines(
+  values: ReadingValues,
+  king: KingValue,
+  base: KingBase,
+  facts: KingFact[],
+  bare: readonly number[],
+): void {
+  if (relativeRank(king.square, king.side) > 3) return;
+  const enemy = opponent(king.side);
+  for (const status of ['open', 'half-open'] as const) {
+    const lines = values.files.filter((each) => king.openBeside.includes(each.file) && each.status === status);
+    const heavy = lines.flatMap((each) => each.heavy[enemy].map((square) => manAt(values, square)));
+    if (heavy.length === 0 && lines.every(({ file }) => bare.includes(file))) continue;
+    // The squares of the files level with the king, so that it shows which are meant.
+    const beside = lines
+      .map(({ file }) => squareName((king.square - fileOf(king.square) + file) as Square))
+      .filter((name) => name !== base.king);
+    facts.push({
+      ...base,
+      id: 'open-line-beside-king',
+      files: lines.map(({ file }) => fileName(file)),
+      status,
+      heavy,
+      squares: [base.king, ...beside, ...heavy.map(({ square }) => square)],
+    });
   }
 }
 

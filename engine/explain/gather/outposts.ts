@@ -1,15 +1,19 @@
 /** Facts about outposts that hold in a position. */
-import { relativeRank, squareName } from '../../board';
+import { fileOf, relativeRank, squareName } from '../../board';
 import type { OutpostValue } from '../../squares';
 import { opponent, type Side, type Square } from '../../types';
 import type { OutpostsFact } from '../facts/outposts';
 import type { ReadingValues } from '../values';
 import { comers, countOf, isHeldOffItsFile, manAt, pawnOnItsWay } from './names';
 
+/** Enemy pawns below which every square is an outpost, and none says anything. */
+const ENEMY_PAWNS_LEAST = 2;
+
 /** Everything worth saying about outposts. */
 export function outpostsFacts(values: ReadingValues): OutpostsFact[] {
   const facts: OutpostsFact[] = [];
   for (const post of values.outposts) {
+    if (values.pawns[opponent(post.side)].pawns.length < ENEMY_PAWNS_LEAST) continue;
     const fact = outpostFact(values, post);
     if (fact) facts.push(fact);
   }
@@ -26,12 +30,15 @@ function outpostFact(values: ReadingValues, post: OutpostValue): OutpostsFact | 
   if (isHeld(side, support, support?.pawn) || isHeld(opponent(side), challenge, challenge?.from)) return null;
   if (post.rank === 'outpost' && support && hold !== 'open') {
     const base = { side, hold, support: pawnOnItsWay(values, side, support.pawn, support.moves, square) };
+    // A rook on the seventh has its own sentence.
+    if (man?.kind === 'rook' && relativeRank(square, side) === 7) return null;
     if (settled) return { ...base, id: 'outpost-taken', man, tradable, squares: [name], men: [name] };
     const coming = comers(values, users, side).filter(
       ({ kind }) => kind === 'knight' || kind === 'bishop' || kind === 'rook',
     );
     const [first] = coming;
     if (man !== null || !first || values.map.board[square] !== 0) return null;
+    if (coming.every(({ kind }) => kind === 'rook') && !isOpenFor(values, side, square)) return null;
     const men = coming.filter(({ moves }) => moves === first.moves).map((comer) => comer.square);
     return {
       ...base,
@@ -54,4 +61,9 @@ function outpostFact(values: ReadingValues, post: OutpostValue): OutpostsFact | 
     squares: [name, squareName(challenge.from)],
     men: [name],
   };
+}
+
+/** Whether no own pawn stands on the file: an outpost for rooks is one on their file (Nimzowitsch, My System, from memory). */
+function isOpenFor({ pawns }: ReadingValues, side: Side, square: Square): boolean {
+  return !pawns[side].pawns.some((pawn) => fileOf(pawn) === fileOf(square));
 }

@@ -26,6 +26,11 @@ export function blockerOf(values: ReadingValues, lever: Lever): Square | null {
   return null;
 }
 
+/** A lever further off is one where a pawn supports it, or within two moves where it strikes at the files c to f. */
+function isWorthWaitingFor({ moves, supported, against }: Lever): boolean {
+  return supported || (moves === 2 && fileOf(against) >= 2 && fileOf(against) <= 5);
+}
+
 /** Levers still to be played: of each pawn the soonest, central and supported ones first, three a side at most. */
 function levers(values: ReadingValues, side: Side, facts: StructureFact[]): void {
   const { pawns } = values;
@@ -46,6 +51,7 @@ function levers(values: ReadingValues, side: Side, facts: StructureFact[]): void
     if (isHeldOffItsFile(values, side, lever.from)) continue;
     const blocker = blockerOf(values, lever);
     if (blocker !== null && lever.moves > 1) continue;
+    if (lever.moves > 1 && !isWorthWaitingFor(lever)) continue;
     const [pawn, on, against] = [squareName(lever.from), squareName(lever.on), squareName(lever.against)];
     coming.push({
       id: lever.moves === 1 ? 'lever-ready' : 'lever-coming',

@@ -9,10 +9,15 @@ import { comers, countOf, manAt, namesInView } from './names';
 
 const CENTRE = [27, 28, 35, 36] as Square[];
 
+/** Own pawns below which every square is weak, and none says anything. */
+const OWN_PAWNS_LEAST = 3;
+
 /** Everything worth saying about squares. */
 export function squaresFacts(values: ReadingValues): SquaresFact[] {
   const facts: SquaresFact[] = [];
-  for (const weak of values.weakSquares) if (weak.matters) facts.push(weakSquare(values, weak));
+  for (const weak of values.weakSquares) {
+    if (weak.matters && hasPawnsToGuard(values, weak.side)) facts.push(weakSquare(values, weak));
+  }
   complexes(values, facts);
   for (const side of SIDES) {
     centre(values, side, facts);
@@ -20,6 +25,10 @@ export function squaresFacts(values: ReadingValues): SquaresFact[] {
   }
   disputed(values, facts);
   return facts;
+}
+
+function hasPawnsToGuard({ pawns }: ReadingValues, side: Side): boolean {
+  return pawns[side].pawns.length >= OWN_PAWNS_LEAST;
 }
 
 function weakSquare(values: ReadingValues, weak: WeakSquareValue): SquaresFact {
@@ -50,7 +59,7 @@ function complexes(values: ReadingValues, facts: SquaresFact[]): void {
         (weak) => weak.square === square && weak.side === side && weak.matters && weak.hold === 'permanent',
       ),
     );
-    if (ownBishop || mattering.length < 3) continue;
+    if (ownBishop || mattering.length < 3 || !hasPawnsToGuard(values, side)) continue;
     const weak = namesInView(mattering, side);
     facts.push({ id: 'weak-complex', side, colour, weak, enemyBishop, squares: weak, men: [] });
   }

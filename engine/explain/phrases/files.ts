@@ -50,13 +50,21 @@ export const FILES_PHRASES: Phrases<FilesFact> = {
     head: `${name(side)} has ${heavy.length > 2 ? `${inWords(heavy.length)} heavy men` : 'doubled'} on the ${file}-file`,
     body: `${theMen(heavy)} stand behind one another`,
   }),
-  'on-seventh': ({ side, heavy, pawns }) => ({
-    head: `${capital(theMen(heavy))} ${heavy.length === 1 ? 'stands' : 'stand'} on ${possessive(side)} seventh rank`,
-    body:
+  'on-seventh': ({ side, heavy, pawns }) => {
+    const where = `on ${possessive(side)} seventh rank`;
+    const prey =
       pawns.length > 0
         ? `${counted(pawns.length, 'enemy pawn')} ${pawns.length === 1 ? 'stands' : 'stand'} there too, on ${listed(pawns)}`
-        : undefined,
-  }),
+        : undefined;
+    // Men of two kinds are too long for a head.
+    return heavy.every(({ kind }) => kind === heavy[0]?.kind)
+      ? { head: `${capital(theMen(heavy))} ${heavy.length === 1 ? 'stands' : 'stand'} ${where}`, body: prey }
+      : {
+          head: `${capital(inWords(heavy.length))} heavy men stand ${where}`,
+          body: theMen(heavy),
+          more: [prey && capital(prey)],
+        };
+  },
   'to-seventh': ({ side, man, to, moves }) => ({
     head: `${capital(theMan(man))} can come to ${possessive(side)} seventh rank`,
     body: `${to} is ${counted(moves, 'safe move')} away`,
@@ -67,6 +75,6 @@ export const FILES_PHRASES: Phrases<FilesFact> = {
   }),
   'diagonal-shut': ({ side, man, stopper, stopperSide }) => ({
     head: `${capital(theMan(man))} looks at a wall`,
-    body: `its way forward ends at the ${stopperSide === side ? 'own' : stopperSide} pawn on ${stopper}, which stands head to head with another`,
+    body: `its way forward ends at ${stopperSide === side ? 'its own' : `the ${stopperSide}`} pawn on ${stopper}, which stands head to head with another`,
   }),
 };

@@ -1,7 +1,18 @@
 /** Sentences about kings. */
 import type { KingFact } from '../facts/king';
 import type { Phrases } from '../phrase';
-import { capital, counted, enemyName, enemyOf, filesNamed, inWords, listed, possessive, theMen } from '../words';
+import {
+  capital,
+  counted,
+  enemyName,
+  enemyOf,
+  filesNamed,
+  inWords,
+  listed,
+  possessive,
+  theFiles,
+  theMen,
+} from '../words';
 
 export const KING_PHRASES: Phrases<KingFact> = {
   'in-check': ({ king, checkers, side }) => ({
@@ -13,7 +24,7 @@ export const KING_PHRASES: Phrases<KingFact> = {
     body: `the pawns on ${listed(pawns)} have not moved`,
   }),
   'shelter-broken': ({ side, king, bare, advanced }) => ({
-    head: `${possessive(side)} king on ${king} has gaps in its pawn cover`,
+    head: `${possessive(side)} king on ${king} has ${bare.length > 0 ? 'gaps in its' : 'a loosened'} pawn cover`,
     body: [
       bare.length > 0 ? `no ${side} pawn stands before it on the ${filesNamed(bare)}` : null,
       advanced.length > 0 ? `${listed(advanced)} ${advanced.length === 1 ? 'has' : 'have'} gone ahead` : null,
@@ -43,15 +54,12 @@ export const KING_PHRASES: Phrases<KingFact> = {
     head: `The king on ${king} has no square to step to`,
     body: 'every square around it is taken or attacked',
   }),
-  'open-line-beside-king': ({ side, king, files, heavy }) => ({
-    head: `No ${enemyOf(side)} pawn closes the ${filesNamed(files)} beside the king on ${king}`,
-    body:
-      heavy.length > 0
-        ? `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there already`
-        : `${enemyName(side)} has a rook or queen left to use ${files.length === 1 ? 'it' : 'them'}`,
+  'open-line-beside-king': ({ side, king, files, status, heavy }) => ({
+    head: `${theFiles(files)} by the king on ${king} ${files.length === 1 ? 'is' : 'are'} ${status === 'open' ? 'open' : `half-open for ${enemyName(side)}`}`,
+    body: heavy.length > 0 ? `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} there already` : undefined,
   }),
   'king-zone': ({ side, king, attackers, guards }) => ({
-    head: `${capital(inWords(attackers.length))} ${enemyOf(side)} men bear on the king on ${king} and the squares round it`,
+    head: `${capital(inWords(attackers.length))} ${enemyOf(side)} men aim at the king on ${king} or squares beside it`,
     body: `${theMen(attackers)}, against ${guards === 0 ? 'no guard' : counted(guards, 'guard')} besides the king`,
   }),
   'weak-back-rank': ({ side, king }) => ({

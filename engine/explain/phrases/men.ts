@@ -1,7 +1,7 @@
 /** Sentences about men. */
 import type { BadBishop, MenFact, PlacedMan } from '../facts/men';
 import type { Phrase, Phrases } from '../phrase';
-import { capital, counted, enemyName, inWords, listed, name, possessive, theMan, theMen } from '../words';
+import { capital, counted, enemyName, inWords, listed, name, pawnsStand, possessive, theMan, theMen } from '../words';
 
 function toCentre(moves: number | null): string {
   return moves === null ? 'more than three moves from the centre' : `${counted(moves, 'move')} from the centre`;
@@ -24,6 +24,7 @@ function placed({ id, side, man, safeMoves, most, enemyHalf, toCentre: centre }:
 }
 
 function remedy({ side, colour, tradeable, lever, outside }: BadBishop): string | null {
+  if (outside?.moves === 1) return `It gets outside the chain, to ${outside.square}, in one move`;
   if (lever) {
     const pawn = `the pawn on ${lever.against} that helps to shut it in`;
     if (lever.moves === 0) return `The pawn on ${lever.pawn} attacks ${pawn}`;
@@ -37,13 +38,16 @@ export const MEN_PHRASES: Phrases<MenFact> = {
   'best-placed': placed,
   'worst-placed': placed,
   'bad-bishop': (fact) => ({
-    head: `The bishop on ${fact.square} is ${possessive(fact.side)} problem piece`,
-    body: `${inWords(fact.onColour)} of ${counted(fact.pawns, 'pawn')} ${fact.onColour === 1 ? 'stands' : 'stand'} on its colour, ${listed(fact.fixed)} fixed among them`,
+    head:
+      fact.outside?.moves === 1
+        ? `The bishop on ${fact.square} is shut in by its pawns for now`
+        : `The bishop on ${fact.square} is ${possessive(fact.side)} problem piece`,
+    body: `${pawnsStand(fact.onColour, fact.pawns)} on its colour, ${listed(fact.fixed)} fixed among them`,
     more: [remedy(fact)],
   }),
   'bad-but-active': ({ square, onColour, pawns, safeMoves }) => ({
-    head: `The bishop on ${square} is bad by its pawns but stands outside them`,
-    body: `${inWords(onColour)} of ${counted(pawns, 'pawn')} ${onColour === 1 ? 'stands' : 'stand'} on its colour, yet it has ${counted(safeMoves, 'safe move')}`,
+    head: `The bishop on ${square} is bad by its pawns but looks past them`,
+    body: `${pawnsStand(onColour, pawns)} on its colour, yet it has ${counted(safeMoves, 'safe move')}`,
   }),
   'knight-on-rim': ({ square, sees }) => ({
     head: `The knight on ${square} stands on the rim`,

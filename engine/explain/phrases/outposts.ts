@@ -2,7 +2,7 @@
 import type { PawnMoves } from '../facts/base';
 import type { OutpostsFact } from '../facts/outposts';
 import type { Phrases } from '../phrase';
-import { capital, comersSentence, counted, enemyName, enemyOf, name, theMan } from '../words';
+import { capital, comersSentence, counted, enemyOf, name, theMan } from '../words';
 
 /** What must happen before the pawn can move. */
 function once({ blocker }: PawnMoves): string {
@@ -25,7 +25,7 @@ export const OUTPOSTS_PHRASES: Phrases<OutpostsFact> = {
   'outpost-taken': ({ side, man, hold, support, tradable }) => ({
     head: `${capital(theMan(man))} stands on an outpost`,
     body: `${unchallenged(hold, side)}, and ${supported(support)}`,
-    more: [tradable ? null : `${enemyName(side)} has no minor piece that can trade itself for it within two moves`],
+    more: [tradable ? null : `No ${enemyOf(side)} minor piece can trade itself for it within two moves`],
   }),
   'outpost-free': ({ side, square, hold, support, comers, ownKnights }) => ({
     head: `${square} is an outpost for ${name(side)}`,

@@ -2,11 +2,11 @@
 import type { Side } from '../../types';
 import type { SquaresFact, StoppedPawn, WeakSquareFact } from '../facts/squares';
 import type { Phrase, Phrases } from '../phrase';
-import { capital, comersSentence, counted, enemyName, enemyOf, inWords, listed, name, theMan } from '../words';
+import { capital, comersSentence, counted, enemyName, enemyOf, inWords, listed, name } from '../words';
 
 /** Who uses a weak square, in a sentence. */
 function usage({ side, occupant, comers, commandedByEnemy, enemyKnights }: WeakSquareFact): string | null {
-  if (occupant) return `${capital(theMan(occupant))} stands there`;
+  if (occupant) return `A ${enemyOf(side)} ${occupant.kind} stands there`;
   return (
     comersSentence(comers, enemyOf(side), enemyKnights) ?? (commandedByEnemy ? `${enemyName(side)} commands it` : null)
   );

@@ -21,7 +21,7 @@ function passed({ pawn, side, moves, blocker, guards }: PassedPawn): Phrase {
     head: `The pawn on ${pawn} is passed`,
     body: blocker
       ? `no ${enemyOf(side)} pawn can stop it, but ${theMan(blocker)} stands in its way`
-      : `no ${enemyOf(side)} pawn can stop it, ${last}`,
+      : `no ${enemyOf(side)} pawn can stop it, and it is ${last}`,
   };
 }
 
@@ -33,6 +33,9 @@ function lever({ pawn, on, against, moves, blocker, supported, side }: LeverFact
       head: `The lever ${pawn}-${on} waits`,
       body: `${theMan(blocker)} stands in its way; ${strike.replace('it strikes', 'it would strike')}`,
     };
+  }
+  if (moves === 1 && !supported) {
+    return { head: `The lever ${pawn}-${on} lacks a supporting pawn`, body: `it would strike at ${against}` };
   }
   return moves === 1
     ? { head: `The lever ${pawn}-${on} is ready`, body: strike }
@@ -124,6 +127,9 @@ export const STRUCTURE_PHRASES: Phrases<StructureFact> = {
     head: `${name(fewer)} has ${counted(fewest, 'pawn island')}, ${enemyName(fewer)} ${inWords(most)}`,
   }),
   'pawns-on-colour': ({ side, colour, count, total }) => ({
-    head: `${capital(inWords(count))} of ${possessive(side)} ${inWords(total)} pawns stand on ${colour} squares`,
+    head:
+      count === total
+        ? `All ${inWords(total)} of ${possessive(side)} pawns stand on ${colour} squares`
+        : `${capital(inWords(count))} of ${possessive(side)} ${inWords(total)} pawns stand on ${colour} squares`,
   }),
 };

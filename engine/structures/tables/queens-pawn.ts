@@ -8,7 +8,7 @@ export const QUEENS_PAWN: readonly StructureModel[] = [
     leader: 'white',
     white: { core: 'b2|b3|b4 d4 e2|e3|e4', bare: 'c', usual: 'a f g h' },
     black: { core: 'c6 d5', bare: 'e', usual: 'a b f g h' },
-    lead: 'the c-file is half-open for {side} and bites on {c6}, the e-file for {enemy}; the book plan is {b4}-{b5}',
+    lead: 'the c-file is half-open for {side}, the e-file for {enemy}; the book plan is {b4}-{b5}, against {c6}',
     source: 'Flores Rios, Chess Structures; Soltis, Pawn Structure Chess; from memory',
   },
   {

@@ -3,7 +3,7 @@ import type { MenFact } from '@/engine/explain/facts/men';
 import type { Checkers, FactOf, Told } from './claim';
 import { headToHead, inTheWay, isFixedByPawns, pawnMoves, strikesPawn } from './pawns';
 import { colourOf, fileOf, other, rankFor, type Scene, type Side, squareOf, step } from './scene';
-import { enemyNamed, inOrder, list, many, named, names, num, sentences, verb } from './words';
+import { enemyNamed, inOrder, list, many, named, names, num, sentences, share, verb } from './words';
 
 type BishopFact = Extract<MenFact, { id: 'bad-bishop' | 'bad-but-active' | 'bishop-pair' | 'bishop-against-knight' }>;
 
@@ -42,15 +42,16 @@ function bad(scene: Scene, fact: FactOf<'bad-bishop'>): Told {
   const pawns = scene.pawns(side).length;
   const tradeable = scene.men(enemy, 'bishop').some((each) => colourOf(each) === colour);
   const helps = lever ? `the pawn on ${lever.against} that helps to shut it in` : '';
-  const remedy = lever
-    ? lever.moves === 0
-      ? `The pawn on ${lever.pawn} attacks ${helps}`
-      : `The lever ${lever.pawn}-${lever.on}, ${many(lever.moves, 'move')} away, strikes at ${helps}`
-    : outside
-      ? `It gets outside the chain, to ${outside.square}, in ${many(outside.moves, 'move')}`
-      : tradeable
-        ? `It can be offered for ${enemyNamed(side)}’s ${colour}-squared bishop`
-        : null;
+  const remedy =
+    lever && outside?.moves !== 1
+      ? lever.moves === 0
+        ? `The pawn on ${lever.pawn} attacks ${helps}`
+        : `The lever ${lever.pawn}-${lever.on}, ${many(lever.moves, 'move')} away, strikes at ${helps}`
+      : outside
+        ? `It gets outside the chain, to ${outside.square}, in ${many(outside.moves, 'move')}`
+        : tradeable
+          ? `It can be offered for ${enemyNamed(side)}’s ${colour}-squared bishop`
+          : null;
   return {
     facts: {
       square,
@@ -63,7 +64,7 @@ function bad(scene: Scene, fact: FactOf<'bad-bishop'>): Told {
       outside: outside && { ...outside, moves: scene.reach(at).get(squareOf(outside.square)) ?? -1 },
     },
     text: sentences(
-      `The bishop on ${square} is ${named(side)}’s problem piece: ${num(count)} of ${many(pawns, 'pawn')} ${verb(count, 'stand')} on its colour, ${list(names(fixed, side))} fixed among them`,
+      `The bishop on ${square} is ${outside?.moves === 1 ? 'shut in by its pawns for now' : `${named(side)}’s problem piece`}: ${share(count, pawns)} on its colour, ${list(names(fixed, side))} fixed among them`,
       remedy,
     ),
     claims: {
@@ -106,7 +107,7 @@ export const BISHOPS: Checkers<BishopFact> = {
     const safeMoves = scene.safeMoves(at).length;
     return {
       facts: { square, onColour: count, pawns, safeMoves },
-      text: `The bishop on ${square} is bad by its pawns but stands outside them: ${num(count)} of ${many(pawns, 'pawn')} ${verb(count, 'stand')} on its colour, yet it has ${many(safeMoves, 'safe move')}.`,
+      text: `The bishop on ${square} is bad by its pawns but looks past them: ${share(count, pawns)} on its colour, yet it has ${many(safeMoves, 'safe move')}.`,
       claims: {
         'own bishop': scene.sideOn(at) === side && scene.kindOn(at) === 'bishop',
         'bad by its pawns': isBad(scene, side, at),

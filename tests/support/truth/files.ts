@@ -123,11 +123,17 @@ function onSeventh(scene: Scene, { side }: FactOf<'on-seventh'>): Told {
     scene.pawns(other(side)).filter((at) => rankFor(side, at) === 7),
     side,
   );
-  const head = `${start(theAll(heavy))} ${verb(heavy.length, 'stand')} on ${named(side)}’s seventh rank`;
+  const rank = `on ${named(side)}’s seventh rank`;
+  const isMixed = new Set(heavy.map(({ kind }) => kind)).size > 1;
   const there = `${many(pawns.length, 'enemy pawn')} ${verb(pawns.length, 'stand')} there too, on ${list(pawns)}`;
   return {
     facts: { heavy, pawns },
-    text: pawns.length > 0 ? `${head}: ${there}.` : `${head}.`,
+    text: isMixed
+      ? sentences(
+          `${start(num(heavy.length))} heavy men stand ${rank}: ${theAll(heavy)}`,
+          pawns.length > 0 ? start(there) : null,
+        )
+      : `${start(theAll(heavy))} ${verb(heavy.length, 'stand')} ${rank}${pawns.length > 0 ? `: ${there}` : ''}.`,
     claims: { somebody: heavy.length > 0 },
   };
 }
@@ -245,7 +251,7 @@ export const FILES: Checkers<FilesFact> = {
     const rays = forwardRays(scene, side, from);
     return {
       facts: { man: bishop, stopper, stopperSide: whose },
-      text: `${start(the(bishop))} looks at a wall: its way forward ends at the ${whose === side ? 'own' : whose} pawn on ${stopper}, which stands head to head with another.`,
+      text: `${start(the(bishop))} looks at a wall: its way forward ends at ${whose === side ? 'its own' : `the ${whose}`} pawn on ${stopper}, which stands head to head with another.`,
       claims: {
         'an own bishop': scene.sideOn(from) === side && bishop.kind === 'bishop',
         'a diagonal ends there': rays.some((squares) => squares.at(-1) === stop),

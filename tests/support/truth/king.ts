@@ -70,7 +70,7 @@ function broken(scene: Scene, { side, king }: FactOf<'shelter-broken'>): Told {
   ];
   return {
     facts: { king, bare, advanced },
-    text: `${named(side)}’s king on ${king} has gaps in its pawn cover: ${parts.filter((part) => part !== '').join(', and ')}.`,
+    text: `${named(side)}’s king on ${king} has ${bare.length > 0 ? 'gaps in its' : 'a loosened'} pawn cover: ${parts.filter((part) => part !== '').join(', and ')}.`,
     claims: { 'own king': scene.king(side) === at, 'a gap': bare.length + advanced.length > 0 },
   };
 }
@@ -116,23 +116,27 @@ export const KING: Checkers<KingFact> = {
     text: `The king on ${king} has no square to step to: every square around it is taken or attacked.`,
     claims: { 'own king': scene.king(side) === squareOf(king), 'no flight': flights(scene, side).length === 0 },
   }),
-  'open-line-beside-king': (scene, { side, king }) => {
+  'open-line-beside-king': (scene, { side, king, status }) => {
     const at = squareOf(king);
     const enemy = other(side);
-    const open = filesBeside(at).filter((file) => pawnsOnFile(scene, enemy, file).length === 0);
+    const open = filesBeside(at).filter(
+      (file) =>
+        pawnsOnFile(scene, enemy, file).length === 0 &&
+        (pawnsOnFile(scene, side, file).length === 0) === (status === 'open'),
+    );
+    const on = files(open.map(fileLetter));
     const heavy = open.flatMap((file) =>
       heavyMen(scene, enemy)
         .filter((from) => fileOf(from) === file)
         .sort((a, b) => rankFor(enemy, a) - rankFor(enemy, b))
         .map((from) => man(scene, from)),
     );
-    const use =
-      heavy.length > 0
-        ? `${theAll(heavy)} ${verb(heavy.length, 'stand')} there already`
-        : `${enemyNamed(side)} has a rook or queen left to use ${open.length === 1 ? 'it' : 'them'}`;
+    const head = `${open.length > 2 ? start(on) : `The ${on}`} by the king on ${king} ${open.length === 1 ? 'is' : 'are'} ${
+      status === 'open' ? 'open' : `half-open for ${enemyNamed(side)}`
+    }`;
     return {
-      facts: { king, files: open.map(fileLetter), heavy },
-      text: `No ${enemy} pawn closes the ${files(open.map(fileLetter))} beside the king on ${king}: ${use}.`,
+      facts: { king, files: open.map(fileLetter), status: status === 'open' ? 'open' : 'half-open', heavy },
+      text: heavy.length > 0 ? `${head}: ${theAll(heavy)} ${verb(heavy.length, 'stand')} there already.` : `${head}.`,
       claims: {
         'own king': scene.king(side) === at,
         'a file': open.length > 0,
@@ -151,7 +155,7 @@ export const KING: Checkers<KingFact> = {
     const guards = bearing(side).length;
     return {
       facts: { king, attackers, guards },
-      text: `${start(num(attackers.length))} ${other(side)} men bear on the king on ${king} and the squares round it: ${theAll(attackers)}, against ${
+      text: `${start(num(attackers.length))} ${other(side)} men aim at the king on ${king} or squares beside it: ${theAll(attackers)}, against ${
         guards === 0 ? 'no guard' : many(guards, 'guard')
       } besides the king.`,
       claims: { 'own king': scene.king(side) === at, 'three or more': attackers.length >= 3 },

@@ -5,7 +5,7 @@ import type { Checkers, Told } from './claim';
 import { holdAgainst, inTheWay, type OnTheWay, pawnAttackers, soonestPawns } from './pawns';
 import { colourOf, fileOf, nameOf, other, rankFor, type Scene, type Side, squareOf } from './scene';
 import { comersTo, comingText } from './squares';
-import { enemyNamed, man, type ManAt, manOrNull, many, named, sentences, start, the } from './words';
+import { man, type ManAt, manOrNull, many, named, sentences, start, the } from './words';
 
 interface Way {
   readonly pawn: string;
@@ -79,7 +79,7 @@ export const OUTPOSTS: Checkers<OutpostsFact> = {
       facts: { hold, support, man: occupant, tradable },
       text: sentences(
         `${start(the(occupant))} stands on an outpost: ${body}`,
-        tradable ? null : `${enemyNamed(side)} has no minor piece that can trade itself for it within two moves`,
+        tradable ? null : `No ${other(side)} minor piece can trade itself for it within two moves`,
       ),
       claims: { ...claims, 'an own man': scene.sideOn(at) === side, 'no pawn': occupant.kind !== 'pawn' },
     };

@@ -16,7 +16,9 @@ function lever(scene: Scene, fact: FactOf<'lever-ready'>): Told {
   const text = blocker
     ? `The lever ${fact.pawn}-${fact.on} waits: ${the(blocker)} stands in its way; it would strike at ${fact.against}${support}.`
     : moves === 1
-      ? `The lever ${fact.pawn}-${fact.on} is ready: it strikes at ${fact.against}${support}.`
+      ? supported
+        ? `The lever ${fact.pawn}-${fact.on} is ready: it strikes at ${fact.against}${support}.`
+        : `The lever ${fact.pawn}-${fact.on} lacks a supporting pawn: it would strike at ${fact.against}.`
       : `${named(side)} has the lever ${fact.on} against ${fact.against} in ${many(moves, 'move')}: the pawn comes from ${fact.pawn}${support}.`;
   return {
     facts: { pawn: fact.pawn, on: fact.on, against: fact.against, moves, blocker, supported },

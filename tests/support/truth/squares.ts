@@ -3,21 +3,7 @@ import type { SquaresFact } from '@/engine/explain/facts/squares';
 import type { Checkers, FactOf, Told } from './claim';
 import { comingPawns, holdAgainst } from './pawns';
 import { colourOf, fileOf, nameOf, other, rankFor, type Scene, type Side, squareOf } from './scene';
-import {
-  enemyNamed,
-  inOrder,
-  list,
-  man,
-  type ManAt,
-  many,
-  named,
-  names,
-  num,
-  sentences,
-  start,
-  the,
-  theAll,
-} from './words';
+import { enemyNamed, inOrder, list, man, type ManAt, many, named, names, num, sentences, start, theAll } from './words';
 
 export interface Comer extends ManAt {
   readonly moves: number;
@@ -48,7 +34,8 @@ export function comingText(scene: Scene, side: Side, comers: readonly Comer[]): 
   if (soonest.length === 2 && alike && first.kind === 'knight' && scene.men(side, 'knight').length === 2)
     return `Both ${side} knights get there ${within}`;
   if (alike) return `The ${side} ${first.kind}s on ${list(on)} get there ${within}`;
-  return `${start(num(soonest.length))} ${side} men get there ${within}: ${theAll(soonest)}`;
+  const men = `${start(num(soonest.length))} ${side} men get there ${within}`;
+  return soonest.length > 3 ? men : `${men}: ${theAll(soonest)}`;
 }
 
 function weak(scene: Scene, { id, side, square }: FactOf<'weak-for-good'>): Told {
@@ -64,7 +51,7 @@ function weak(scene: Scene, { id, side, square }: FactOf<'weak-for-good'>): Told
   );
   const stopped = hold === 'fixed' ? front.sort((a, b) => fileOf(a.pawn) - fileOf(b.pawn)) : [];
   const usage = occupant
-    ? `${start(the(occupant))} stands there`
+    ? `A ${enemy} ${occupant.kind} stands there`
     : (comingText(scene, enemy, comers) ?? (commandedByEnemy ? `${named(enemy)} commands it` : null));
   const stops = stopped.map(({ stop, by }) =>
     by === 'ram' ? `by the pawn on ${nameOf(stop)}` : `before ${nameOf(stop)}, which a ${enemy} pawn holds`,

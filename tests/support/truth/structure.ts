@@ -80,7 +80,7 @@ function passed(scene: Scene, { side, pawn }: FactOf<'passed-pawn'>): Told {
           blocker ? `${start(the(blocker))} stands in its way` : `It is ${last}`,
         )
       : sentences(
-          `The pawn on ${pawn} is passed: ${noStop}${blocker ? `, but ${the(blocker)} stands in its way` : `, ${last}`}`,
+          `The pawn on ${pawn} is passed: ${noStop}${blocker ? `, but ${the(blocker)} stands in its way` : `, and it is ${last}`}`,
         );
   return {
     facts: { pawn, moves, blocker, guards },
@@ -257,7 +257,10 @@ export const STRUCTURE: Checkers<StructureFact> = {
     const count = all.filter((pawn) => colourOf(pawn) === colour).length;
     return {
       facts: { colour, count, total: all.length },
-      text: `${start(num(count))} of ${named(side)}’s ${num(all.length)} pawns stand on ${colour} squares.`,
+      text:
+        count === all.length
+          ? `All ${num(count)} of ${named(side)}’s pawns stand on ${colour} squares.`
+          : `${start(num(count))} of ${named(side)}’s ${num(all.length)} pawns stand on ${colour} squares.`,
       claims: { 'three quarters': count * 4 >= all.length * 3 },
     };
   },

@@ -58,3 +58,9 @@ export function inOrder(squares: readonly number[], side: Side): number[] {
 }
 
 export const names = (squares: readonly number[], side: Side): string[] => inOrder(squares, side).map(nameOf);
+
+/** 'five of eight pawns stand', 'all seven pawns stand'. */
+export const share = (count: number, total: number): string =>
+  count === total && count > 1
+    ? `all ${num(total)} pawns stand`
+    : `${num(count)} of ${many(total, 'pawn')} ${verb(count, 'stand')}`;

@@ -110,12 +110,12 @@ describe('the lead', () => {
     expect(say(diagram(`${CARLSBAD} w`))).toEqual([
       'white',
       false,
-      'the c-file is half-open for White and bites on c6, the e-file for Black; the book plan is b4-b5',
+      'the c-file is half-open for White, the e-file for Black; the book plan is b4-b5, against c6',
     ]);
     expect(say(turned(diagram(`${CARLSBAD} w`)))).toEqual([
       'black',
       true,
-      'the c-file is half-open for Black and bites on c3, the e-file for White; the book plan is b5-b4',
+      'the c-file is half-open for Black, the e-file for White; the book plan is b5-b4, against c3',
     ]);
   });
 
