@@ -49,7 +49,9 @@ describe('a computing thread', () => {
   });
 
   it('fails its jobs when it dies, and another takes its place', async () => {
-    const lost = thread.run({ kind: 'reading', fen: EXAMPLE_FEN, mode: 'strict' });
+    // Long enough that it cannot be answered before the thread is ended.
+    const fens = Array.from({ length: 1000 }, () => EXAMPLE_FEN);
+    const lost = thread.run({ kind: 'lines', fens, firstLine: 1, mode: 'strict' });
     const outcome = expect(lost).rejects.toThrow('ended');
     await thread.stop();
     await outcome;
