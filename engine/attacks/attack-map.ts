@@ -5,15 +5,23 @@
  * cheapest. One 32-bit mask holds a side, which is why the door admits no more than 32 men of one.
  * Attackers are those of the Laws of Chess (FIDE, article 3.1): a pinned man still attacks.
  */
-import { EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, OPPOSITE, type Position, RAY_ROW, RAYS, STRIDES } from '../board';
-
-/** Places of the kinds in a man's code (`code & 7`). */
-export const PAWN = 1;
-export const KNIGHT = 2;
-export const BISHOP = 3;
-export const ROOK = 4;
-export const QUEEN = 5;
-export const KING = 6;
+import {
+  BISHOP,
+  EDGES,
+  KING,
+  KING_STEPS,
+  KNIGHT,
+  KNIGHT_LEAPS,
+  LEAP_ROW,
+  OPPOSITE,
+  PAWN,
+  type Position,
+  QUEEN,
+  RAY_ROW,
+  RAYS,
+  ROOK,
+  STRIDES,
+} from '../board';
 
 /** Sides as numbers: 0 White, 1 Black. */
 export type SideIndex = 0 | 1;

@@ -1,6 +1,6 @@
 /** Batteries: the men that stand behind an attacker on its line. */
-import { EDGES, STRIDES } from '../board';
-import { type AttackMap, BISHOP, firstMen, KING, PAWN, ROOK, slidesAlong } from './attack-map';
+import { BISHOP, EDGES, KING, PAWN, ROOK, STRIDES } from '../board';
+import { type AttackMap, firstMen, slidesAlong } from './attack-map';
 
 /**
  * Marks who stands behind: sliders that would attack a square once the friendly sliders, or the one pawn, in

@@ -7,6 +7,14 @@ import { KINDS, type Kind, type Man, type Side, type Square } from '../types';
  */
 export type ManCode = number;
 
+/** Places of the kinds in a man's code (`code & 7`), in the order of KINDS. */
+export const PAWN = 1;
+export const KNIGHT = 2;
+export const BISHOP = 3;
+export const ROOK = 4;
+export const QUEEN = 5;
+export const KING = 6;
+
 export interface CastlingRights {
   readonly whiteKing: boolean;
   readonly whiteQueen: boolean;

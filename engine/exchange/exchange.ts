@@ -9,8 +9,8 @@
  * result does not hang on the order of squares. Left out: promotion by capturing, captures in passing, and
  * checks given elsewhere.
  */
-import { type AttackMap, firstMen, KING, slidesAlong, type SideIndex } from '../attacks';
-import { DIRECTION_TO } from '../board';
+import { type AttackMap, firstMen, slidesAlong, type SideIndex } from '../attacks';
+import { DIRECTION_TO, KING } from '../board';
 
 /** Worth by the kind's place in a man's code; the king's is never asked for. */
 const WORTH_BY_PLACE: Readonly<Int8Array> = Int8Array.of(0, 1, 3, 3, 5, 9, 0, 0);

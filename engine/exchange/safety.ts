@@ -2,8 +2,8 @@
  * Safe or not, asked many times of one position. Most answers follow from the attackers alone, most others
  * do not hang on where the man comes from and are kept; the rest are played out by `isSafeOn`.
  */
-import { type AttackMap, firstMen, KING, pinnedMask, type SideIndex, slidesAlong } from '../attacks';
-import { DIRECTION_TO, OPPOSITE } from '../board';
+import { type AttackMap, firstMen, pinnedMask, type SideIndex, slidesAlong } from '../attacks';
+import { DIRECTION_TO, KING, OPPOSITE } from '../board';
 import { isSafeOn, worthOf } from './exchange';
 
 /** An attack map with the answers found so far. */

@@ -1,6 +1,6 @@
 /** Diagonals: how far each bishop and queen sees along them, and what stops it. */
-import { type AttackMap, BISHOP, QUEEN } from '../attacks';
-import { RAY_ROW, RAYS, SQUARES } from '../board';
+import { type AttackMap } from '../attacks';
+import { BISHOP, QUEEN, RAY_ROW, RAYS, SQUARES } from '../board';
 import type { PawnValues } from '../pawns';
 import type { Side, Square } from '../types';
 

@@ -1,6 +1,6 @@
 /** Files: open or not, who controls them, where they lead in and what they aim at. */
-import { type AttackMap, KING, PAWN, QUEEN, ROOK, type SideIndex } from '../attacks';
-import { fileOf, manCode, relativeRank, viewOrder } from '../board';
+import { type AttackMap, type SideIndex } from '../attacks';
+import { fileOf, KING, manCode, PAWN, QUEEN, relativeRank, ROOK, viewOrder } from '../board';
 import { isSafeHere, type Safety } from '../exchange';
 import type { PawnReading, PawnValues } from '../pawns';
 import type { Reach } from '../reach';

@@ -1,6 +1,6 @@
 /** The seventh rank: which heavy men stand on it and which can come. */
-import { type AttackMap, QUEEN, ROOK } from '../attacks';
-import { relativeRank, viewOrder } from '../board';
+import { type AttackMap } from '../attacks';
+import { QUEEN, relativeRank, ROOK, viewOrder } from '../board';
 import type { Reach } from '../reach';
 import type { Side, Square } from '../types';
 

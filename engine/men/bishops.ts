@@ -4,8 +4,8 @@
  * stands on its colour, and so do half or more of its side's pawns. Activity is another matter: a bad bishop
  * outside its chain can be active.
  */
-import { BISHOP, firstMen } from '../attacks';
-import { colourOf, fileOf, rankOf, relativeRank, SQUARES, viewOrder } from '../board';
+import { firstMen } from '../attacks';
+import { BISHOP, colourOf, fileOf, rankOf, relativeRank, SQUARES, viewOrder } from '../board';
 import type { Lever, PawnReading, PawnValues } from '../pawns';
 import { hasBishop } from '../squares';
 import { opponent, type Side, type Square } from '../types';

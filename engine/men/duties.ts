@@ -1,6 +1,6 @@
 /** Duties: what falls if a man leaves its square. */
-import { type AttackMap, firstMen, KING, type SideIndex, slidesAlong } from '../attacks';
-import { DIRECTION_TO, OPPOSITE } from '../board';
+import { type AttackMap, firstMen, type SideIndex, slidesAlong } from '../attacks';
+import { DIRECTION_TO, KING, OPPOSITE } from '../board';
 import { lossOn } from '../exchange';
 import type { SquareTable } from '../squares';
 import type { Square } from '../types';

@@ -1,7 +1,7 @@
 /** Mobility heat map: a man asked on every square. */
 import { KINDS, type Man, type Side, type Square } from '../types';
-import { BISHOP, KNIGHT, PAWN, type SideIndex } from '../attacks';
-import { manCode, manOf, SQUARES } from '../board';
+import { type SideIndex } from '../attacks';
+import { BISHOP, KNIGHT, manCode, manOf, PAWN, SQUARES } from '../board';
 import { isSafeOn, type Safety } from '../exchange';
 import { fillReach } from '../reach';
 import { fillMoves, newWords, squaresOfWords } from './moves';

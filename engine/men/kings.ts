@@ -1,6 +1,18 @@
 /** A king: its shelter, the men that reach and guard its zone, its flights and its luft. */
-import { type AttackMap, attackersOf, isAttacked, isPinned, KING, menOfMask, QUEEN, ROOK } from '../attacks';
-import { ahead, fileOf, KING_STEPS, LEAP_ROW, manCode, rankOf, relativeRank, squareAt } from '../board';
+import { type AttackMap, attackersOf, isAttacked, isPinned, menOfMask } from '../attacks';
+import {
+  ahead,
+  fileOf,
+  KING,
+  KING_STEPS,
+  LEAP_ROW,
+  manCode,
+  QUEEN,
+  rankOf,
+  relativeRank,
+  ROOK,
+  squareAt,
+} from '../board';
 import { isSafeMove, type Safety } from '../exchange';
 import { opponent, type Side, type Square } from '../types';
 

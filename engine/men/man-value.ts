@@ -1,6 +1,6 @@
 /** One man and what it can do from where it stands. */
-import { type AttackMap, isPinned, KING, kindOn, PAWN, type SideIndex, sideOn } from '../attacks';
-import { bitCount, fileOf, type Position } from '../board';
+import { type AttackMap, isPinned, kindOn, type SideIndex, sideOn } from '../attacks';
+import { bitCount, fileOf, KING, PAWN, type Position } from '../board';
 import { isSafeMove, lossOn, type Safety, worthOf } from '../exchange';
 import { type PawnMap, pawnReach } from '../pawns';
 import type { Reach } from '../reach';

@@ -1,13 +1,16 @@
 /** What a man attacks and where it can move to, pseudo-legally with pins kept. */
-import { type AttackMap, isPinned, KING, KNIGHT, PAWN } from '../attacks';
+import { type AttackMap, isPinned } from '../attacks';
 import {
   ahead,
   bitCount,
   DIRECTION_TO,
   EDGES,
+  KING,
   KING_STEPS,
+  KNIGHT,
   KNIGHT_LEAPS,
   LEAP_ROW,
+  PAWN,
   PAWN_STRIKES,
   type Position,
   relativeRank,

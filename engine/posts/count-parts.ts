@@ -2,8 +2,8 @@
  * Counts the parts of a post on one board: the position with the man where it would stand. Hot: run for every
  * placement of every man; the plain twin is in the tests.
  */
-import { type AttackMap, BISHOP, KING, KNIGHT, PAWN, QUEEN, ROOK } from '../attacks';
-import { bitCount, EDGES, kingDistance, STRIDES } from '../board';
+import { type AttackMap } from '../attacks';
+import { BISHOP, bitCount, EDGES, KING, kingDistance, KNIGHT, PAWN, QUEEN, ROOK, STRIDES } from '../board';
 import { exchangeOn } from '../exchange';
 import type { Square } from '../types';
 import { type Ground, NEVER } from './ground';

@@ -4,8 +4,8 @@
  *
  * Asked for knights, bishops, rooks and queens; kings and pawns have questions of their own.
  */
-import { BISHOP, KING, KNIGHT, PAWN, pinnedMask, ROOK, type SideIndex } from '../attacks';
-import { DIRECTION_TO, EDGES, KNIGHT_LEAPS, LEAP_ROW, STRIDES } from '../board';
+import { pinnedMask, type SideIndex } from '../attacks';
+import { BISHOP, DIRECTION_TO, EDGES, KING, KNIGHT, KNIGHT_LEAPS, LEAP_ROW, PAWN, ROOK, STRIDES } from '../board';
 import { isSafeMove, type Safety } from '../exchange';
 import type { Side, Square } from '../types';
 

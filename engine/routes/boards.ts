@@ -1,6 +1,6 @@
 /** 'What if' boards of routes: a man put elsewhere, the enemy standing still. */
-import { type AttackMap, attackMap, BISHOP, KNIGHT, newAttackMap, QUEEN, ROOK } from '../attacks';
-import { between, DIRECTION_TO, KNIGHT_LEAPS, LEAP_ROW } from '../board';
+import { type AttackMap, attackMap, newAttackMap } from '../attacks';
+import { between, BISHOP, DIRECTION_TO, KNIGHT, KNIGHT_LEAPS, LEAP_ROW, QUEEN, ROOK } from '../board';
 import type { Square } from '../types';
 
 /** The board with the man on `from` put on `to`; what stood there is gone. */

@@ -1,5 +1,6 @@
 /** What is said beside a route: each step's safety, the enemy's soonest challenge, the duties left behind. */
-import { attackMap, attackersOf, BISHOP, isAttacked, KING, kindOn, PAWN, type SideIndex } from '../attacks';
+import { BISHOP, KING, PAWN } from '../board';
+import { attackMap, attackersOf, isAttacked, kindOn, type SideIndex } from '../attacks';
 import { exchangeOn, lossOn, safetyOf, worthOf } from '../exchange';
 import { dutiesOf } from '../men';
 import { type PawnMap, pawnReach } from '../pawns';

@@ -4,8 +4,8 @@
  * Tried are moves of own men that stand in the man's way, and pawn moves that make safe a square on which it was
  * not (by guarding it, or by shutting or leaving a line). The move itself must lose nothing by exchange.
  */
-import { attackMap, KING, kindOn, PAWN } from '../attacks';
-import { type Position, withMen, manOn } from '../board';
+import { attackMap, kindOn } from '../attacks';
+import { KING, manOn, PAWN, type Position, withMen } from '../board';
 import { isSafeMove, safetyOf } from '../exchange';
 import type { Square } from '../types';
 import { isKingAttacked, moved } from './boards';

@@ -5,8 +5,8 @@
  * since an enemy in check cannot stand still. Nothing is captured. A side in check has only such first moves as
  * answer it, and no second ones.
  */
-import { BISHOP, KNIGHT, pinnedMask, ROOK, type SideIndex } from '../attacks';
-import { DIRECTION_TO, EDGES, KNIGHT_LEAPS, LEAP_ROW, STRIDES } from '../board';
+import { pinnedMask, type SideIndex } from '../attacks';
+import { BISHOP, DIRECTION_TO, EDGES, KNIGHT, KNIGHT_LEAPS, LEAP_ROW, ROOK, STRIDES } from '../board';
 import { isSafeMove, type Safety } from '../exchange';
 import type { Square } from '../types';
 import { bears, isKingAttacked, mapOf, moved } from './boards';

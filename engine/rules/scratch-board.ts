@@ -2,14 +2,22 @@
  * The board on which moves are made and taken back: one mailbox, changed in place. Moves are packed in a number,
  * from | to << 6 | promotion place << 12 | special << 16, so that generating them allocates nothing.
  */
-import { EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, PAWN_STRIKES, type Position, STRIDES, STRIKE_ROW } from '../board';
-
-export const PAWN = 1;
-export const KNIGHT = 2;
-export const BISHOP = 3;
-export const ROOK = 4;
-export const QUEEN = 5;
-export const KING = 6;
+import {
+  BISHOP,
+  EDGES,
+  KING,
+  KING_STEPS,
+  KNIGHT,
+  KNIGHT_LEAPS,
+  LEAP_ROW,
+  PAWN,
+  PAWN_STRIKES,
+  type Position,
+  QUEEN,
+  ROOK,
+  STRIDES,
+  STRIKE_ROW,
+} from '../board';
 
 /** Special moves: places in the packed number. */
 export const DOUBLE = 1;

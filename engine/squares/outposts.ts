@@ -7,8 +7,7 @@
  * the side stands on it or can come within three moves. Squares on which a pawn stands are no homes and are left out. On the 7th rank no pawn can ever challenge: a square there is listed, as `deep`,
  * where a pawn supports it now or in one move; the others are entry squares and belong to the files.
  */
-import { KNIGHT } from '../attacks';
-import { colourOf, KNIGHT_LEAPS, LEAP_ROW, relativeRank } from '../board';
+import { colourOf, KNIGHT, KNIGHT_LEAPS, LEAP_ROW, relativeRank } from '../board';
 import { type PawnMap, pawnHold, pawnReach } from '../pawns';
 import { type Reach, type User, usersOf } from '../reach';
 import { bySide, type Colour, opponent, type Side, SIDES, type Square } from '../types';

@@ -4,8 +4,20 @@
  * One board for the whole module, filled by `setUp`, so that a search allocates nothing; nothing on it outlives
  * the call that filled it. Captures in passing are played; castling is not, for it neither captures nor parries a check.
  */
-import { BISHOP, KING, KNIGHT, PAWN, ROOK } from '../attacks';
-import { EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, PAWN_STRIKES, STRIDES, STRIKE_ROW } from '../board';
+import {
+  BISHOP,
+  EDGES,
+  KING,
+  KING_STEPS,
+  KNIGHT,
+  KNIGHT_LEAPS,
+  LEAP_ROW,
+  PAWN,
+  PAWN_STRIKES,
+  ROOK,
+  STRIDES,
+  STRIKE_ROW,
+} from '../board';
 
 /** A move: from | to << 6 | place of the new kind << 12 (0 without promotion) | 1 << 15 for a capture in passing. */
 export type PlayedMove = number;

@@ -1,6 +1,19 @@
 /** Moves on the small search's board: captures and promotions, or all, pseudo-legal, into a stack that the caller owns. */
-import { BISHOP, KING, KNIGHT, PAWN, QUEEN, ROOK } from '../attacks';
-import { EDGES, KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, PAWN_STRIKES, STRIDES, STRIKE_ROW } from '../board';
+import {
+  BISHOP,
+  EDGES,
+  KING,
+  KING_STEPS,
+  KNIGHT,
+  KNIGHT_LEAPS,
+  LEAP_ROW,
+  PAWN,
+  PAWN_STRIKES,
+  QUEEN,
+  ROOK,
+  STRIDES,
+  STRIKE_ROW,
+} from '../board';
 import { counts, IN_PASSING, lists, men, passing } from './desk';
 
 /** Moves found; entries from a search's own offset on. */

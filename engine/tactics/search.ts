@@ -7,8 +7,7 @@
  * passing is not asked for more than that. Within these bounds the answer is exact; when the nodes run out it
  * says so. Figures are pawns by the trade's common table.
  */
-import { KNIGHT } from '../attacks';
-import { DIRECTION_TO } from '../board';
+import { DIRECTION_TO, KNIGHT } from '../board';
 import { worthOf } from '../exchange';
 import { IN_PASSING, isInCheck, isStruck, kings, lastTaken, men, play, type PlayedMove, setUp, takeBack } from './desk';
 import { listMoves, stack } from './moves';

@@ -1,5 +1,6 @@
 /** The JSON of routes: a promise within v1, like that of readings. */
 import { z } from 'zod';
+import { STEP_CODES } from '../../routes';
 import { kindSchema, sideSchema, squareSchema, squaresSchema } from './basics';
 
 export const guardSchema = z
@@ -62,17 +63,6 @@ export const routesAnswerSchema = z
     choices: z.array(routeChoiceSchema).describe('Best first; one a man and post.'),
   })
   .meta({ id: 'RoutesAnswer', description: 'Where a side’s men belong and how they get there.' });
-
-export const STEP_CODES = [
-  'fine',
-  'not-a-move',
-  'own-man',
-  'captures',
-  'exposes-king',
-  'gives-check',
-  'unsafe',
-  'loses',
-] as const;
 
 export const checkedStepSchema = z
   .object({
