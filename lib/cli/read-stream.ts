@@ -1,7 +1,8 @@
 /** `read -`: FENs from standard input, one a line, to one JSON object a line, in the same order. */
 import type { Readable } from 'node:stream';
 import { computeReading } from '@/lib/services/readings/engine';
-import { FEN_LENGTH_MAX, type Mode } from '@/openapi/schemas/ids';
+import { FEN_LENGTH_MAX } from '@/engine/board';
+import type { Mode } from '@/openapi/schemas/ids';
 import type { BatchLine } from '@/openapi/schemas/readings';
 import { jsonLine } from './json';
 import { EXIT, type ExitCode, type Terminal, written } from './terminal';

@@ -1,8 +1,6 @@
 /** Small values that several calls take: a FEN, a mode, the parts of a reading. */
 import { z } from 'zod';
-
-/** The longest FEN taken, in characters: the longest that is of any use has fewer than 100. */
-export const FEN_LENGTH_MAX = 256;
+import { FEN_LENGTH_MAX } from '../../engine/board';
 
 export const fenSchema = z
   .string()
