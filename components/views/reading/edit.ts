@@ -1,5 +1,5 @@
 /** Editing a position: men moved, put and taken off, each edit giving a position that the engine has admitted. */
-import { formatFen, manOn, type Position, parseFen, withMen } from '@/engine/board';
+import { formatFen, manOn, type Position, parseFen, soundRights, withMen } from '@/engine/board';
 import { type Man, opponent, type Square } from '@/engine/types';
 
 /**
@@ -30,28 +30,11 @@ export function withSideChanged(position: Position): Position | undefined {
   return admitted({ ...position, sideToMove: opponent(position.sideToMove), enPassant: null });
 }
 
-/** The position as the FEN door admits it: strict if it can be, else as a diagram. */
+/** The position as the FEN door admits it, rights that cannot be left out: strict if it can be, else as a diagram. */
 export function admitted(position: Position): Position | undefined {
-  const attempts = [position, withoutImpossibleCastling(position)];
-  for (const attempt of attempts) {
-    const strict = parseFen(formatFen(attempt), 'strict');
-    if (strict.ok) return strict.value.position;
-  }
-  const diagram = parseFen(formatFen(withoutImpossibleCastling(position)), 'diagram');
+  const text = formatFen({ ...position, castling: soundRights(position.board, position.castling) });
+  const strict = parseFen(text, 'strict');
+  if (strict.ok) return strict.value.position;
+  const diagram = parseFen(text, 'diagram');
   return diagram.ok ? diagram.value.position : undefined;
-}
-
-/** Castling rights kept only where king and rook stand on their first squares. */
-function withoutImpossibleCastling(position: Position): Position {
-  const stands = (square: number, code: number) => position.board[square] === code;
-  const { whiteKing, whiteQueen, blackKing, blackQueen } = position.castling;
-  return {
-    ...position,
-    castling: {
-      whiteKing: whiteKing && stands(4, 6) && stands(7, 4),
-      whiteQueen: whiteQueen && stands(4, 6) && stands(0, 4),
-      blackKing: blackKing && stands(60, 14) && stands(63, 12),
-      blackQueen: blackQueen && stands(60, 14) && stands(56, 12),
-    },
-  };
 }

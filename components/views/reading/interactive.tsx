@@ -1,7 +1,7 @@
 'use client';
 
 /** The live reading: every act changes the position, and plate, statements and address follow. */
-import { useCallback, useDeferredValue, useEffect, useMemo, useReducer, useRef, useState } from 'react';
+import { useCallback, useDeferredValue, useMemo, useReducer, useState } from 'react';
 import { InteractiveBoard } from '@/components/plate/interactive-board';
 import { plateOf } from '@/components/plate/layout';
 import { squareName } from '@/engine/board';
@@ -17,8 +17,10 @@ import { PlateCaption } from './plate-caption';
 import { PlateFigure } from './plate-figure';
 import { squareLabels } from './square-label';
 import { Statements } from './statements';
-import { type Act, acted, addressOf, shownPosition, stateOf } from './state';
-import { looksLikeGame, openPosition, textOf } from './open-position';
+import { acted, addressOf, shownPosition, stateOf } from './state';
+import { openPosition } from './open-position';
+import { readTyped } from './read-typed';
+import { useAddress, useWidth } from './use-page';
 import { FIRST_POSITION } from './examples';
 
 /** One set of tables serves every reading of this page. */
@@ -30,25 +32,12 @@ function firstPosition() {
   return position;
 }
 
-/** Reads a FEN at once; a game goes through the library of notations, which is fetched only then. */
-async function readTyped(text: string, act: (act: Act) => void): Promise<void> {
-  if (!looksLikeGame(text)) {
-    act({ type: 'read', text });
-    return;
-  }
-  const { replayPgn } = await import('@/engine/rules/notation');
-  const game = replayPgn(text);
-  if (!game.ok) act({ type: 'refused', text, faults: [game.fault] });
-  else act({ type: 'read', text: textOf(game.value.positions[game.value.positions.length - 1] ?? game.value.start) });
-}
-
 /** The page's live part. `address` is what the server was asked for; it renders the same without scripts. */
 export function InteractiveReading({ address }: { readonly address: Address }) {
   const [state, act] = useReducer(acted, address, (from) => stateOf(from, firstPosition()));
   const [pointed, setPointed] = useState<string | null>(null);
   const [square, setSquare] = useState<SquareName | null>(null);
-  const [width, setWidth] = useState<number | null>(null);
-  const frame = useRef<HTMLDivElement>(null);
+  const { frame, width } = useWidth();
 
   const position = shownPosition(state);
   const reading = useMemo(() => readPosition(position, [], desk), [position]);
@@ -88,16 +77,6 @@ export function InteractiveReading({ address }: { readonly address: Address }) {
     [reading, state.layer, state.drag],
   );
 
-  useEffect(() => {
-    const element = frame.current;
-    if (!element) return;
-    const measure = () => setWidth(Math.round(element.clientWidth));
-    measure();
-    const observer = new ResizeObserver(measure);
-    observer.observe(element);
-    return () => observer.disconnect();
-  }, []);
-
   const noteKeys = plate?.notes.map(({ statement }) => statement.key).join(' ') ?? '';
   const numbers = useMemo(() => new Map(noteKeys.split(' ').map((key, index) => [key, index + 1])), [noteKeys]);
   const choose = useCallback((key: string) => act({ type: 'statement', key }), []);
@@ -106,10 +85,7 @@ export function InteractiveReading({ address }: { readonly address: Address }) {
     (key: string) => `${href.replace(/&statement=.*$/, '')}&statement=${encodeURIComponent(key)}`,
     [href],
   );
-  useEffect(() => {
-    const timer = setTimeout(() => window.history.replaceState(window.history.state, '', href), 250);
-    return () => clearTimeout(timer);
-  }, [href]);
+  useAddress(href);
 
   if (!plate) return null;
   return (
