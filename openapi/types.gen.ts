@@ -44,6 +44,46 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/api/v1/routes": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Find posts and routes
+         * @description Ranks the posts of one man, or of all men of a side, with the counts that rank them, the safe ways there, what must be prepared first, who can dispute the post, and what a small exact search says. An aid to judgement: the weights are in the answer.
+         */
+        readonly post: operations["createRoutes"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/routes/check": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Check a route
+         * @description A verdict for each step of a route that a person gives, with its reason, the enemy standing still.
+         */
+        readonly post: operations["createRouteCheck"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/api/v1/plates.svg": {
         readonly parameters: {
             readonly query?: never;
@@ -187,6 +227,22 @@ export interface components {
         readonly Bound: {
             readonly name: string;
             readonly max: number;
+        };
+        /** @description The verdict of one step of a given route. */
+        readonly CheckedStep: {
+            readonly to: components["schemas"]["Square"];
+            /**
+             * @description fine; not-a-move; own-man or captures: the square is taken; exposes-king; gives-check before the last step; unsafe: lost by exchange; loses: the guard sees something lost.
+             * @enum {string}
+             */
+            readonly code: "fine" | "not-a-move" | "own-man" | "captures" | "exposes-king" | "gives-check" | "unsafe" | "loses";
+            /** @description Pawns lost by exchange on the square. */
+            readonly loses: number;
+            /** @description Null where the step is no move. */
+            readonly step: components["schemas"]["RouteStep"] | null;
+            readonly guard: components["schemas"]["RouteGuard"] | null;
+            /** @description The verdict in a sentence. */
+            readonly reason: string;
         };
         /**
          * @description A colour of squares.
@@ -581,6 +637,126 @@ export interface components {
             /** @description Only these parts, beside the position itself. Left out: the whole reading. */
             readonly include?: readonly components["schemas"]["ReadingPart"][];
         };
+        /** @description A route that a person gave, step by step. */
+        readonly RouteCheck: {
+            readonly engine: string;
+            readonly fen: string;
+            readonly side: components["schemas"]["Side"];
+            readonly man: components["schemas"]["Square"];
+            readonly kind: components["schemas"]["Kind"];
+            /** @description Steps in order; none after one that is no move. */
+            readonly steps: readonly components["schemas"]["CheckedStep"][];
+            /** @description Place of the first step that is not fine, from 0. */
+            readonly firstFault: number | null;
+            /** @description All steps are fine. */
+            readonly holds: boolean;
+        };
+        /** @description A route to be checked step by step. */
+        readonly RouteCheckRequest: {
+            readonly fen: components["schemas"]["Fen"];
+            /** @description Squares, the man's own first, e.g. f3, d2, f1; or its moves in SAN, e.g. Nd2, Nf1. */
+            readonly route: readonly string[];
+        };
+        /** @description A man, a post, and the way there. */
+        readonly RouteChoice: {
+            readonly man: components["schemas"]["Square"];
+            readonly kind: components["schemas"]["Kind"];
+            readonly post: components["schemas"]["Square"];
+            /** @description Own moves of the man: as many as stops. */
+            readonly moves: number;
+            /** @description The shown route, from the first stop to the post. */
+            readonly stops: readonly components["schemas"]["Square"][];
+            /** @description How many safe routes of this length there are. */
+            readonly shortest: number;
+            readonly steps: readonly components["schemas"]["RouteStep"][];
+            /** @description The counts that rank it, with the man where it stands and on the post. */
+            readonly parts: {
+                readonly [key: string]: {
+                    readonly now: number;
+                    readonly there: number;
+                };
+            };
+            /** @description Weighted sum of the differences, with the weights of the documented table. */
+            readonly gain: number;
+            /** @description Soonest the enemy can dispute the post; 0 moves: he does. */
+            readonly challenge: {
+                readonly by: components["schemas"]["Square"];
+                readonly kind: components["schemas"]["Kind"];
+                readonly moves: number;
+            } | null;
+            /** @description Duties left behind. */
+            readonly drops: readonly {
+                readonly square: components["schemas"]["Square"];
+                readonly loses: number;
+            }[];
+            /** @description Own moves, in SAN, that make the route possible or shorter; total moves with them. */
+            readonly preparations: readonly {
+                readonly move: string;
+                readonly moves: number;
+            }[];
+            /** @description The preparation that must be played first; null where none must. */
+            readonly needs: string | null;
+            readonly guard: components["schemas"]["RouteGuard"];
+            /** @description The same in sentences. */
+            readonly text: string;
+        };
+        /** @description A safeguard, no opinion: a small exact search over captures, checks and promotions. */
+        readonly RouteGuard: {
+            /**
+             * @description Whether something is lost by force, the enemy to move; "unknown": the search gave up.
+             * @enum {string}
+             */
+            readonly verdict: "holds" | "loses" | "unknown";
+            /** @description The moves that show the loss, in SAN, the enemy first. */
+            readonly line: readonly string[];
+            /** @description Pawns lost; 200 stands for mate; 0 where it holds. */
+            readonly loses: number;
+        };
+        /** @description One stop of a route. */
+        readonly RouteStep: {
+            readonly to: components["schemas"]["Square"];
+            /** @description The enemy gains nothing by capturing the man there. */
+            readonly safe: boolean;
+            /** @description Enemy men that attack it there, cheapest first. */
+            readonly attackedBy: readonly components["schemas"]["Square"][];
+            /** @description Own men that guard it there, cheapest first. */
+            readonly guardedBy: readonly components["schemas"]["Square"][];
+            /** @description The enemy pawn that can hit it there soonest, and in how many pawn moves. */
+            readonly pawnHit: {
+                readonly from: components["schemas"]["Square"];
+                readonly moves: number;
+            } | null;
+        };
+        /** @description Where a side’s men belong and how they get there. */
+        readonly RoutesAnswer: {
+            readonly engine: string;
+            readonly fen: string;
+            readonly side: components["schemas"]["Side"];
+            /** @description What one more of each part counts: the documented table by which the choices are ranked. */
+            readonly weights: {
+                readonly [key: string]: number;
+            };
+            /** @description Best first; one a man and post. */
+            readonly choices: readonly components["schemas"]["RouteChoice"][];
+        };
+        /** @description A position, and whose men are to be placed. */
+        readonly RoutesRequest: {
+            readonly fen: components["schemas"]["Fen"];
+            /** @description Square of the one knight, bishop, rook or queen to be placed. Left out: all men of the side. */
+            readonly man?: components["schemas"]["Square"];
+            /** @description Whose men. Left out: the side of the man, else the side to move. */
+            readonly side?: components["schemas"]["Side"];
+            /**
+             * @description The longest route, in moves of the man.
+             * @default 4
+             */
+            readonly movesMax?: number;
+            /**
+             * @description The most choices answered.
+             * @default 12
+             */
+            readonly choicesMax?: number;
+        };
         /**
          * @description A side.
          * @enum {string}
@@ -918,6 +1094,187 @@ export interface operations {
                 };
             };
             /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createRoutes: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 4096 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11",
+                 *       "man": "f3",
+                 *       "choicesMax": 3
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["RoutesRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Find posts and routes */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["RoutesAnswer"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createRouteCheck: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 4096 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11",
+                 *       "route": [
+                 *         "f3",
+                 *         "d2",
+                 *         "b3"
+                 *       ]
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["RouteCheckRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Check a route */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["RouteCheck"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
             readonly 422: {
                 headers: {
                     /** @description The id of this request. */

@@ -1,4 +1,5 @@
 /** Routes as JSON. */
+import { type RouteFacts, routeText, stepReason } from '../explain';
 import { formatFen, type Position, squareName } from '../board';
 import {
   type CheckedRoute,
@@ -9,11 +10,14 @@ import {
   type RouteValue,
   type StepValue,
 } from '../routes';
+import { PARTS } from '../posts';
 import type { GuardValue } from '../tactics';
 import type { Side, Square } from '../types';
 import { names } from './encode-squares';
 import type { RouteCheck, RouteChoice, RouteGuard, RouteStep, RoutesAnswer } from './schema/routes';
 import { ENGINE_VERSION } from './version';
+
+const WEIGHTS: Readonly<Record<string, number>> = Object.fromEntries(PARTS.map(({ name, weight }) => [name, weight]));
 
 /** The answer of `routes` as JSON. */
 export function encodeRoutes(position: Position, { side, choices }: RoutesValue): RoutesAnswer {
@@ -21,13 +25,14 @@ export function encodeRoutes(position: Position, { side, choices }: RoutesValue)
     engine: ENGINE_VERSION,
     fen: formatFen(position),
     side,
+    weights: WEIGHTS,
     choices: choices.map((choice) => encodeChoice(position, side, choice)),
   };
 }
 
 function encodeChoice(position: Position, side: Side, choice: RouteValue): RouteChoice {
   const move = ({ from, to }: PreparationValue) => nameOfStep(position, side, from, to);
-  return {
+  const facts: RouteFacts = {
     man: squareName(choice.man),
     kind: choice.kind,
     post: squareName(choice.post),
@@ -43,6 +48,7 @@ function encodeChoice(position: Position, side: Side, choice: RouteValue): Route
     needs: choice.needs && move(choice.needs),
     guard: encodeGuard(position, choice.man, choice.guardStop, choice.guard),
   };
+  return { ...facts, text: routeText(facts, side) };
 }
 
 function encodeStep({ to, safe, attackedBy, guardedBy, pawnHit }: StepValue): RouteStep {
@@ -67,13 +73,16 @@ export function encodeCheck(position: Position, { man, kind, side, steps, firstF
     side,
     man: squareName(man),
     kind,
-    steps: steps.map(({ to, code, loses, step, guard }) => ({
-      to: squareName(to),
-      code,
-      loses,
-      step: step && encodeStep(step),
-      guard: guard && encodeGuard(position, man, to, guard),
-    })),
+    steps: steps.map(({ to, code, loses, step, guard }, place) => {
+      const facts = {
+        to: squareName(to),
+        code,
+        loses,
+        step: step && encodeStep(step),
+        guard: guard && encodeGuard(position, man, to, guard),
+      };
+      return { ...facts, reason: stepReason(facts, squareName(steps[place - 1]?.to ?? man), kind, side) };
+    }),
     firstFault,
     holds: firstFault === null,
   };

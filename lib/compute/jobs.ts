@@ -5,6 +5,7 @@ import { replyText } from '@/lib/api/reply';
 import { computeReading } from '@/lib/services/readings/engine';
 import { partsOf } from '@/lib/services/readings/parts';
 import { contracts } from '@/openapi/contracts';
+import { type CallJob, type CallOutcome, doCall } from './calls';
 import type { Mode, ReadingPart } from '@/openapi/schemas/ids';
 
 interface Choices {
@@ -25,7 +26,7 @@ export interface LinesJob extends Choices {
   readonly firstLine: number;
 }
 
-export type Job = ReadingJob | LinesJob;
+export type Job = ReadingJob | LinesJob | CallJob;
 
 /** The JSON in UTF-8, and what its ETag depends on; or the faults of the FEN. */
 export type ReadingOutcome =
@@ -38,12 +39,23 @@ export interface LinesOutcome {
   readonly mistakes: readonly { readonly line: number; readonly reason: string }[];
 }
 
-export type Outcome<J extends Job> = J extends ReadingJob ? ReadingOutcome : LinesOutcome;
+export type Outcome<J extends Job> = J extends ReadingJob
+  ? ReadingOutcome
+  : J extends LinesJob
+    ? LinesOutcome
+    : CallOutcome;
 
 /** Does a job, on whatever thread this is called. */
 export function doJob<J extends Job>(job: J): Outcome<J>;
-export function doJob(job: Job): ReadingOutcome | LinesOutcome {
-  return job.kind === 'reading' ? doReading(job) : doLines(job);
+export function doJob(job: Job): ReadingOutcome | LinesOutcome | CallOutcome {
+  switch (job.kind) {
+    case 'reading':
+      return doReading(job);
+    case 'lines':
+      return doLines(job);
+    case 'call':
+      return doCall(job);
+  }
 }
 
 const encoder = new TextEncoder();

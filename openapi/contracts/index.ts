@@ -5,11 +5,14 @@ import { getDocument, getIndex, getProblem } from './document';
 import { getHealth } from './health';
 import { getPlatePng, getPlateSvg } from './plates';
 import { createReading, getReading } from './readings';
+import { createRouteCheck, createRoutes } from './routes';
 
 export const contracts = {
   createReading,
   getReading,
   createReadings,
+  createRoutes,
+  createRouteCheck,
   getPlateSvg,
   getPlatePng,
   getIndex,

@@ -52,6 +52,7 @@ export const routeChoiceSchema = z
       .describe('Own moves, in SAN, that make the route possible or shorter; total moves with them.'),
     needs: z.string().nullable().describe('The preparation that must be played first; null where none must.'),
     guard: guardSchema,
+    text: z.string().describe('The same in sentences.'),
   })
   .meta({ id: 'RouteChoice', description: 'A man, a post, and the way there.' });
 
@@ -60,6 +61,9 @@ export const routesAnswerSchema = z
     engine: z.string(),
     fen: z.string(),
     side: sideSchema,
+    weights: z
+      .record(z.string(), z.number())
+      .describe('What one more of each part counts: the documented table by which the choices are ranked.'),
     choices: z.array(routeChoiceSchema).describe('Best first; one a man and post.'),
   })
   .meta({ id: 'RoutesAnswer', description: 'Where a side’s men belong and how they get there.' });
@@ -75,6 +79,7 @@ export const checkedStepSchema = z
     loses: z.number().describe('Pawns lost by exchange on the square.'),
     step: routeStepSchema.nullable().describe('Null where the step is no move.'),
     guard: guardSchema.nullable(),
+    reason: z.string().describe('The verdict in a sentence.'),
   })
   .meta({ id: 'CheckedStep', description: 'The verdict of one step of a given route.' });
 
@@ -95,4 +100,5 @@ export type RouteGuard = z.infer<typeof guardSchema>;
 export type RouteStep = z.infer<typeof routeStepSchema>;
 export type RouteChoice = z.infer<typeof routeChoiceSchema>;
 export type RoutesAnswer = z.infer<typeof routesAnswerSchema>;
+export type CheckedStep = z.infer<typeof checkedStepSchema>;
 export type RouteCheck = z.infer<typeof routeCheckSchema>;
