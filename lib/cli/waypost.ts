@@ -2,13 +2,17 @@
 import { fileURLToPath } from 'node:url';
 import { env } from '@/lib/env';
 import { READ_HELP, runRead } from './read';
+import { ROUTES_HELP, runRoutes } from './routes';
 import { EXIT, type ExitCode, ownTerminal, type Terminal, written } from './terminal';
 import { UsageError } from './usage-error';
 
 const HELP = `waypost: where the pieces belong
 
 Commands
-  read "<FEN>"      read a position; "read --help" says more
+  read "<FEN>"      read a position
+  routes "<FEN>"    where men belong and how they get there; a route checked
+
+"<command> --help" says more.
 
 `;
 
@@ -19,10 +23,12 @@ export async function runWaypost(args: readonly string[], terminal: Terminal): P
     switch (command) {
       case 'read':
         return await runRead(rest, terminal);
+      case 'routes':
+        return await runRoutes(rest, terminal);
       case '--help':
       case '-h':
       case 'help':
-        await written(terminal.output, HELP + READ_HELP);
+        await written(terminal.output, [HELP, READ_HELP, ROUTES_HELP].join('\n'));
         return EXIT.good;
       case undefined:
         throw new UsageError('A command is missing.');
