@@ -35,7 +35,7 @@ const config = {
   reactStrictMode: true,
   // `npm run check` has a step for types, over the tests too; a build need not repeat it.
   typescript: { ignoreBuildErrors: true },
-  serverExternalPackages: ['@resvg/resvg-js', 'pino'],
+  serverExternalPackages: ['@electric-sql/pglite', '@resvg/resvg-js', 'pg', 'pino'],
   headers: async () => [
     { source: '/((?!api/).*)', headers: PAGE_HEADERS },
     { source: '/api/:path*', headers: API_HEADERS },

@@ -1,4 +1,6 @@
 /** The only reader of process.env. */
+import { homedir } from 'node:os';
+import { join, resolve } from 'node:path';
 
 export const env = {
   /** Whether this is the built service and not development or a test. */
@@ -7,4 +9,10 @@ export const env = {
   logLevel: process.env.LOG_LEVEL ?? (process.env.NODE_ENV === 'test' ? 'silent' : 'info'),
   /** Set and not empty: no colour in the terminal (no-color.org). */
   noColor: process.env.NO_COLOR,
+  /** A PostgreSQL server, `postgresql://…`; unset: the database is embedded in the data folder. */
+  databaseUrl: process.env.DATABASE_URL || undefined,
+  /** The folder of what is kept, outside the repository: WAYPOST_DATA, or `.waypost` in the home folder. */
+  dataFolder: resolve(/*turbopackIgnore: true*/ process.env.WAYPOST_DATA || join(homedir(), '.waypost')),
+  /** Whether Next is building: pages are drawn then, and no database may be opened. */
+  isBuilding: process.env.NEXT_PHASE === 'phase-production-build',
 } as const;
