@@ -325,6 +325,7 @@ CREATE INDEX "mail_at" ON "mail" USING btree ("at" DESC NULLS LAST);--> statemen
 CREATE INDEX "readings_engine" ON "readings" USING btree ("engine_version");--> statement-breakpoint
 CREATE INDEX "results_study" ON "results" USING btree ("study_id","kind","created_at","id") WHERE "results"."deleted_at" is null;--> statement-breakpoint
 CREATE UNIQUE INDEX "changes_version" ON "changes" USING btree ("entity_id","version");--> statement-breakpoint
+CREATE INDEX "changes_workspace" ON "changes" USING btree ("workspace_id","at" DESC NULLS LAST);--> statement-breakpoint
 CREATE INDEX "changes_study" ON "changes" USING btree ("study_id","at" DESC NULLS LAST,"id");--> statement-breakpoint
 CREATE INDEX "positions_study" ON "positions" USING btree ("study_id","order","id") WHERE "positions"."deleted_at" is null;--> statement-breakpoint
 CREATE INDEX "positions_key" ON "positions" USING btree ("position_key");--> statement-breakpoint

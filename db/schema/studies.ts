@@ -126,6 +126,8 @@ export const changes = pgTable(
   (table) => [
     // One change makes one version: two editors who both believed to have made version 5 cannot both be kept.
     uniqueIndex('changes_version').on(table.entityId, table.version),
+    // Deleting a workspace asks for its changes; what was last done in a workspace.
+    index('changes_workspace').on(table.workspaceId, table.at.desc()),
     // A study's history, the newest first, by cursor.
     index('changes_study').on(table.studyId, table.at.desc(), table.id),
     check('changes_entity', sql`${table.entity} in ('study', 'position', 'result', 'game')`),

@@ -1,7 +1,6 @@
 /** Finding a Chromium for the browser tests, or getting one from the system's packages. */
-import { accessSync, constants } from 'node:fs';
 import { delimiter, join } from 'node:path';
-import { run } from './run.mjs';
+import { installPackage, isProgram } from './system.mjs';
 
 const NAMES = ['chromium', 'chromium-browser', 'google-chrome', 'google-chrome-stable'];
 
@@ -23,33 +22,8 @@ export function findChromium({ CHROMIUM, PATH = '' }) {
 
 /** The path of a Chromium, installed if need be; undefined, and said why, when there is no way. */
 export async function ensureChromium() {
-  const found = findChromium(process.env) ?? ((await installChromium()) ? findChromium(process.env) : undefined);
+  const found =
+    findChromium(process.env) ?? ((await installPackage('chromium')) ? findChromium(process.env) : undefined);
   if (found === undefined) console.error(MISSING);
   return found;
-}
-
-/** Debian's package, as root or by a sudo that asks nothing. */
-async function installChromium() {
-  const [command, ...first] = process.getuid?.() === 0 ? ['apt-get'] : ['sudo', '-n', 'apt-get'];
-  if (command === undefined || !['apt-get', command].every(isOnPath)) return false;
-  const environment = { DEBIAN_FRONTEND: 'noninteractive' };
-  return (
-    (await run(command, [...first, 'update'], environment)) &&
-    (await run(command, [...first, 'install', '-y', '--no-install-recommends', 'chromium'], environment))
-  );
-}
-
-/** @param {string} name */
-function isOnPath(name) {
-  return (process.env.PATH ?? '').split(delimiter).some((folder) => isProgram(join(folder, name)));
-}
-
-/** @param {string} path */
-function isProgram(path) {
-  try {
-    accessSync(path, constants.X_OK);
-    return true;
-  } catch {
-    return false;
-  }
 }
