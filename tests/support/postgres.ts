@@ -1,6 +1,6 @@
 /** A PostgreSQL server of the system's packages, in a folder of its own, reached by a Unix socket: no port, no password, no trace. */
-import { type ChildProcess, execFileSync, spawn } from 'node:child_process';
-import { chmodSync, chownSync, mkdirSync, mkdtempSync, rmSync } from 'node:fs';
+import { type ChildProcess, execFileSync, spawn, type SpawnOptions } from 'node:child_process';
+import { chmodSync, chownSync, mkdirSync, mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { Client } from 'pg';
@@ -12,7 +12,7 @@ const START_TIMEOUT_MS = 20_000;
 export interface Postgres {
   /** A new, empty database of this server, as a URL. */
   readonly newDatabase: () => Promise<string>;
-  /** Ends all of its processes at once, as a power cut would, and starts the server again on the same folder. */
+  /** Kills the server without a chance to tidy up, and starts it again on the same folder. */
   readonly crash: () => Promise<void>;
   readonly stop: () => Promise<void>;
 }
@@ -48,7 +48,8 @@ export async function startPostgres(): Promise<Postgres> {
     },
     crash: async () => {
       const ended = exitOf(server);
-      process.kill(-(server.pid ?? 0), 'SIGKILL');
+      process.kill(Number(readFileSync(join(data, 'postmaster.pid'), 'utf8').split('\n')[0]), 'SIGKILL');
+      server.stdin?.end();
       await ended;
       server = await start();
     },
@@ -75,36 +76,50 @@ function serverOwner(): Owner {
 }
 
 /** The server ends when its standard input does, so it never outlives the tests, however those end. */
-const WHILE_INPUT_LASTS = '"$0" "$@" </dev/null & server=$!; cat >/dev/null; kill -INT "$server"; wait "$server"';
+const WHILE_INPUT_LASTS = `
+  "$0" "$@" </dev/null &
+  server=$!
+  exec 3<&0
+  (cat <&3 >/dev/null; kill -INT "$server" 2>/dev/null) &
+  wait "$server"`;
 
-async function startServer(
-  program: string,
-  { data, folder, owner }: { data: string; folder: string; owner: Owner },
-): Promise<ChildProcess> {
+interface Start {
+  readonly data: string;
+  readonly folder: string;
+  readonly owner: Owner;
+}
+
+/** Starts it and waits until it answers. After a crash the first tries may find processes of the old one on their way out. */
+async function startServer(program: string, start: Start): Promise<ChildProcess> {
+  const deadline = Date.now() + START_TIMEOUT_MS;
+  for (;;) {
+    let said = '';
+    const server = spawnServer(program, start, (words) => {
+      said = `${said}${words}`.slice(-2_000);
+    });
+    while (server.exitCode === null && Date.now() < deadline) {
+      if (await answers(start.folder)) return server;
+      await new Promise((resolve) => setTimeout(resolve, 50));
+    }
+    server.stdin?.end();
+    if (Date.now() >= deadline) throw new Error(`PostgreSQL did not start:\n${said}`);
+  }
+}
+
+function spawnServer(program: string, { data, folder, owner }: Start, said: (words: string) => void): ChildProcess {
   const settings = ['listen_addresses=', `unix_socket_directories=${folder}`, 'fsync=on', 'max_connections=60'];
   const args = ['-D', data, ...settings.flatMap((setting) => ['-c', setting])];
-  const server = spawn('/bin/sh', ['-c', WHILE_INPUT_LASTS, program, ...args], {
-    ...owner,
-    cwd: folder,
-    // A group of its own, so that a crash takes all of the server's processes and nothing else.
-    detached: true,
-    stdio: ['pipe', 'ignore', 'pipe'],
-  });
-  let said = '';
-  server.stderr?.on('data', (part) => {
-    said = `${said}${part}`.slice(-2_000);
-  });
-  const deadline = Date.now() + START_TIMEOUT_MS;
-  while (
-    !(await run(folder, 'select 1').then(
-      () => true,
-      () => false,
-    ))
-  ) {
-    if (server.exitCode !== null || Date.now() > deadline) throw new Error(`PostgreSQL did not start:\n${said}`);
-    await new Promise((resolve) => setTimeout(resolve, 50));
-  }
+  const options = { ...owner, cwd: folder, stdio: ['pipe', 'ignore', 'pipe'] } satisfies SpawnOptions;
+  const server = spawn('/bin/sh', ['-c', WHILE_INPUT_LASTS, program, ...args], options);
+  server.stderr?.on('data', (part) => said(String(part)));
   return server;
+}
+
+function answers(folder: string): Promise<boolean> {
+  return run(folder, 'select 1').then(
+    () => true,
+    () => false,
+  );
 }
 
 function exitOf(server: ChildProcess): Promise<void> {
