@@ -15,6 +15,7 @@ export function contentPolicy(nonce: string, { development }: { readonly develop
     "img-src 'self' data: blob:",
     "font-src 'self' data:",
     "connect-src 'self'",
+    "worker-src 'self'",
     "object-src 'none'",
     "base-uri 'none'",
     "form-action 'self'",

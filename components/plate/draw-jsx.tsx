@@ -1,7 +1,7 @@
 /** Draws a plate's marks as JSX, in the page's own variables, so that the theme can change without drawing anew. */
 import { createElement, memo, type ReactElement, type ReactNode } from 'react';
 import { type Element, elementOf, type Palette, patternElement } from './element';
-import type { LegendItem, Mark, Plate } from './types';
+import type { Drawing, LegendItem, Mark } from './types';
 
 /** The page's palette: CSS variables of `app/globals.css`. */
 export const PAGE_PALETTE: Palette = {
@@ -55,7 +55,7 @@ function jsxOfMarks(marks: readonly Mark[]): ReactNode[] {
 }
 
 /** The patterns and marks of a plate, for an `svg` element of the page. */
-export function PlateMarks({ plate }: { readonly plate: Plate }): ReactElement {
+export function PlateMarks({ plate }: { readonly plate: Pick<Drawing, 'patterns' | 'marks'> }): ReactElement {
   return (
     <>
       <defs>{plate.patterns.map((pattern) => jsxOf(patternElement(pattern, PAGE_PALETTE), pattern.id))}</defs>

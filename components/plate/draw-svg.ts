@@ -1,7 +1,7 @@
 /** Draws a plate as the text of an SVG file, in the colours of a theme. */
 import { type Element, elementOf, FONT, type Palette, patternElement } from './element';
 import { THEME, type ThemeName } from './tokens';
-import type { Plate } from './types';
+import type { Drawing } from './types';
 
 /** The palette of a theme: colours written out. */
 export function themePalette(name: ThemeName): Palette {
@@ -14,12 +14,12 @@ export function themePalette(name: ThemeName): Palette {
 }
 
 /** The whole file. Every text is escaped; nothing in it runs or fetches. */
-export function drawSvg(plate: Plate, theme: ThemeName): string {
+export function drawSvg(plate: Drawing, theme: ThemeName): string {
   return write(svgElement(plate, themePalette(theme)));
 }
 
 /** The plate as one element tree, title for screen readers included. */
-export function svgElement(plate: Plate, palette: Palette): Element {
+export function svgElement(plate: Drawing, palette: Palette): Element {
   const { width, height } = plate;
   return {
     tag: 'svg',

@@ -15,6 +15,8 @@ export interface BoardProps extends HandActs {
   /** Names of squares for readers; null while a man is under way. */
   readonly labels: ReadonlyMap<SquareName, string> | null;
   readonly picked: Square | null;
+  /** What the keys do, for readers; those of editing unless said. */
+  readonly label?: string;
   readonly onPut: (square: Square, man: Man | null) => void;
 }
 
@@ -24,6 +26,8 @@ const STEPS: Readonly<Record<string, readonly [number, number]>> = {
   ArrowLeft: [-1, 0],
   ArrowRight: [1, 0],
 };
+
+const EDITING = 'Board. Arrow keys move, Enter picks up and puts down, Delete takes off, letters put men.';
 
 const CELLS = [0, 1, 2, 3, 4, 5, 6, 7] as const;
 
@@ -69,7 +73,7 @@ export function InteractiveBoard(props: BoardProps) {
     <div
       ref={grid}
       role="grid"
-      aria-label="Board. Arrow keys move, Enter picks up and puts down, Delete takes off, letters put men."
+      aria-label={props.label ?? EDITING}
       className="absolute grid cursor-grab touch-none grid-rows-8 select-none active:cursor-grabbing"
       style={style}
       {...pointer}

@@ -27,6 +27,7 @@ export function plateOf(request: PlateRequest): Plate {
   const { reading, layer, print = false, flipped = false, chosen = null, man = null, heat = null } = request;
   const width = Math.max(120, request.width);
   const id = request.id ?? 'p';
+  const extra = request.extra ?? null;
   const wanted = request.notes ?? (width >= MARGIN_FROM ? 'margin' : 'numbers');
   const inMargin = wanted === 'margin' && width >= MARGIN_FROM;
   const size = Math.min(
@@ -42,9 +43,9 @@ export function plateOf(request: PlateRequest): Plate {
   const where = `${id} ${n(board.x)} ${n(board.y)} ${n(size)} ${flipped}${print}`;
   const marks: Mark[] = [
     { type: 'group', key: 'ground', stamp: where, marks: ground(board, id) },
-    { type: 'group', key: 'under', marks: under(request, board, id) },
+    { type: 'group', key: 'under', marks: [...under(request, board, id), ...(extra?.under?.(board) ?? [])] },
     { type: 'group', key: 'men', marks: men(reading, board, where, layer === 'mobility' ? man : null) },
-    { type: 'group', key: 'over', marks: over(request, board, where, heat) },
+    { type: 'group', key: 'over', marks: [...over(request, board, where, heat), ...(extra?.over?.(board) ?? [])] },
     { type: 'group', key: 'frame', stamp: where, marks: frame(board) },
   ];
   if (layer === 'command' || layer === 'files')
@@ -64,7 +65,7 @@ export function plateOf(request: PlateRequest): Plate {
   }
   marks.push({ type: 'group', key: 'lit', marks: litMarks(request.lit ?? [], board) });
 
-  const legend = legendOf(reading, layer, board, id, print);
+  const legend = [...legendOf(reading, layer, board, id, print), ...(extra?.legend ?? [])];
   const title = request.caption?.title ?? captionTitle(reading, layer, man);
   const text = request.caption ? (request.caption.text ?? '') : captionText(reading, layer);
   let height = bottom + 1;
@@ -85,7 +86,7 @@ export function plateOf(request: PlateRequest): Plate {
     marks,
     title,
     text,
-    alt: altText(reading, layer, man),
+    alt: extra ? `${altText(reading, layer, man)} ${extra.alt}` : altText(reading, layer, man),
     notes,
     legend,
   };

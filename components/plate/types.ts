@@ -121,6 +121,16 @@ export interface PlateRequest {
   readonly caption?: { readonly title: string; readonly text?: string } | null;
   /** Prefix of pattern ids, for several plates on one page. */
   readonly id?: string;
+  /** What a view draws on the board besides the layer, in marks of its own. */
+  readonly extra?: PlateExtra | null;
+}
+
+/** Marks of a view on a plate: under the men, over them, their legend, and their words for the alt text. */
+export interface PlateExtra {
+  readonly under?: (board: BoardPlace) => readonly Mark[];
+  readonly over?: (board: BoardPlace) => readonly Mark[];
+  readonly legend?: readonly LegendItem[];
+  readonly alt: string;
 }
 
 /** Where the board stands in the figure: its corner, the side of a square, and who is at the foot. */
@@ -155,3 +165,6 @@ export interface Plate {
   readonly notes: readonly PlacedNote[];
   readonly legend: readonly LegendItem[];
 }
+
+/** What both drawers need of a figure: a plate is one, a chart is another. */
+export type Drawing = Pick<Plate, 'width' | 'height' | 'patterns' | 'marks' | 'title' | 'alt'>;

@@ -1,4 +1,4 @@
 export * from './explain';
 export type { Fact, FactId } from './fact';
 export type { ReadingValues } from './values';
-export { type RouteFacts, routeText, stepReason } from './route-words';
+export { routeFaultText, type RouteFacts, routeText, stepReason } from './route-words';

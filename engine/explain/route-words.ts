@@ -1,5 +1,6 @@
 /** Routes in words: what a choice says as a whole, and why a step of a given route is fine or fails. */
 import { PARTS } from '../posts';
+import type { RouteFault } from '../routes';
 import { MATE } from '../tactics';
 import type { CheckedStep, RouteChoice } from '../reading/schema/routes';
 import type { Kind, Side, SquareName } from '../types';
@@ -129,4 +130,23 @@ function fineReason(to: SquareName, step: CheckedStep['step'], side: Side): stri
   const guards = step?.guardedBy.length ?? 0;
   if (attackers === 0) return `${capital(to)} is safe: no ${enemyOf(side)} man attacks it.`;
   return `${capital(to)} is safe by exchange: ${counted(attackers, 'attacker')}, ${counted(guards, 'guard')}.`;
+}
+
+/** Why a given route could not be read at all, in a sentence. */
+export function routeFaultText({ code, place }: RouteFault, route: readonly string[]): string {
+  const given = route[place] ?? '';
+  switch (code) {
+    case 'empty':
+      return 'A route has at least one move: the square of the man and one stop, or one move in SAN.';
+    case 'not-a-square':
+      return `"${given}" is no square; squares are named a1 to h8.`;
+    case 'no-piece':
+      return `A route is walked by a knight, bishop, rook or queen; on "${given}" stands none.`;
+    case 'no-such-move':
+      return `"${given}" is no move of such a man here.`;
+    case 'ambiguous':
+      return `"${given}" can mean two men; name the file or rank it comes from.`;
+    case 'too-long':
+      return 'A route has at most twelve moves.';
+  }
 }

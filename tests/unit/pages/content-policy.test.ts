@@ -15,7 +15,7 @@ describe('contentPolicy', () => {
     expect(scripts).not.toContain("'unsafe-eval'");
   });
 
-  it.each(['default-src', 'img-src', 'font-src', 'connect-src', 'style-src', 'form-action'])(
+  it.each(['default-src', 'img-src', 'font-src', 'connect-src', 'worker-src', 'style-src', 'form-action'])(
     'fetches nothing from another site by %s',
     (name) => {
       const sources = directive(contentPolicy('abc', { development: false }), name);
