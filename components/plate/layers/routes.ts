@@ -133,12 +133,13 @@ export function trailLegend(trails: readonly Trail[]): LegendItem[] {
   });
   if (main) {
     items.push({ label: 'way, each stop safe', marks: [line(paintOf(main, true), 2.6, true)] });
-    items.push({ label: 'post', marks: stop(12, 8, 7, main.stops.length, stopLook(main)) });
+    if (main.stops[main.stops.length - 1]?.fine)
+      items.push({ label: 'post', marks: stop(12, 8, 7, main.stops.length, stopLook(main)) });
   }
   if (trails.some(({ stops }) => stops.some(({ fine }) => !fine)))
     items.push({ label: 'step that fails', marks: [line('pick', 2.6, false)] });
   if (trails.some(({ rank }) => rank === 'other'))
-    items.push({ label: 'another way of the same length', marks: [line('hair', 1.8, true)] });
+    items.push({ label: 'another way', marks: [line('hair', 1.8, true)] });
   return items;
 }
 

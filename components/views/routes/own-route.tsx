@@ -64,7 +64,8 @@ export function OwnRoute({ typed, man, check, fault, hidden, act, onBack }: OwnR
         <p id="route-how" className="needs-scripts mt-2 text-[14px] leading-5 text-soft">
           {man === null
             ? 'Tap a man on the board, then the squares where it is to stop, in turn.'
-            : 'Tap squares on the board in turn. The enemy stands still.'}
+            : 'Tap squares on the board in turn. The enemy stands still.'}{' '}
+          By keys: arrows and Enter on the board, Delete takes a stop back, Escape clears.
         </p>
       ) : (
         <Verdicts check={check} />

@@ -37,7 +37,7 @@ export function rankingDrawing({ ranking, width, side, named, chosen, id, title 
         type: 'text',
         x,
         y: 14,
-        text: signed(value, 1),
+        text: signed(value, Number.isInteger(value) ? 0 : 1),
         size: 12,
         weight: 400,
         fill: 'soft',
@@ -88,7 +88,7 @@ function rowMarks({ choice, segments, y, sum }: RankingRow, index: number, look:
   ];
   if (textWidth(way, 13, 400) <= room)
     marks.push({ ...text, size: 13, x: start + textWidth(name, 14, 700) + 10, text: way, fill: 'soft' });
-  marks.push(...segments.flatMap((segment) => segmentMarks(segment, y + BAR.top, paint, id)));
+  marks.push(...segments.flatMap((segment) => segmentMarks(segment, { y: y + BAR.top, paint, id, sum })));
   const foot = y + BAR.top;
   marks.push({ type: 'path', d: `M${n(sum)} ${foot - 3}v${BAR.height + 6}`, stroke: 'ink', width: 2.4, fill: 'none' });
   if (chosen)
@@ -103,18 +103,28 @@ function fillOf(family: Family, paint: Paint, id: string): Pick<Look, 'fill' | '
   return { fill: { pattern: `${id}${family}` } };
 }
 
-function segmentMarks({ family, x0, x1, now, there }: Segment, y: number, paint: Paint, id: string): Mark[] {
+interface SegmentLook {
+  readonly y: number;
+  readonly paint: Paint;
+  readonly id: string;
+  /** Where the row's sum is marked, px: figures keep clear of it. */
+  readonly sum: number;
+}
+
+function segmentMarks({ family, x0, x1, now, there }: Segment, { y, paint, id, sum }: SegmentLook): Mark[] {
   const d = box(x0, y, x1 - x0, BAR.height);
   const text = signed(there - now, 0);
   const marks: Mark[] = [
     { type: 'path', d, fill: 'paper' },
     { type: 'path', d, stroke: paint, width: 1, ...fillOf(family, paint, id) },
   ];
-  if (x1 - x0 < textWidth(text, 11, 700) + 8) return marks;
+  const wide = textWidth(text, 11, 700) + 8;
+  const [from, to] = clearOf(x0, x1, sum);
+  if (to - from < wide) return marks;
   const isSolid = family === 'tactics';
   marks.push({
     type: 'text',
-    x: (x0 + x1) / 2,
+    x: (from + to) / 2,
     y: y + 12.6,
     text,
     size: 11,
@@ -126,13 +136,24 @@ function segmentMarks({ family, x0, x1, now, there }: Segment, y: number, paint:
   return marks;
 }
 
+/** The wider part of a box on one side of the sum's mark; the whole box where the mark is not in it. */
+function clearOf(x0: number, x1: number, sum: number): [number, number] {
+  if (sum <= x0 || sum >= x1) return [x0, x1];
+  return sum - x0 > x1 - sum ? [x0, sum] : [sum, x1];
+}
+
+/** A family as a figure of the legend. */
+export function familyMarks(family: Family, paint: Paint, id: string): Mark[] {
+  return [{ type: 'path', d: box(0.5, 1.5, 23, 13), stroke: paint, width: 1, ...fillOf(family, paint, id) }];
+}
+
 /** The families that occur, and what the line across a bar is. */
 export function rankingLegend({ rows }: Ranking, side: Side, id: string): LegendItem[] {
   const paint = side === 'white' ? 'ochre' : 'indigo';
   const present = new Set(rows.flatMap(({ segments }) => segments.map(({ family }) => family)));
   const items = FAMILIES.filter((family) => present.has(family)).map((family) => ({
     label: FAMILY_NAMES[family],
-    marks: [{ type: 'path', d: box(0.5, 1.5, 23, 13), stroke: paint, width: 1, ...fillOf(family, paint, id) } as const],
+    marks: familyMarks(family, paint, id),
   }));
   const sum: LegendItem = {
     label: 'sum',

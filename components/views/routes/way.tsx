@@ -1,9 +1,13 @@
 /** The chosen way in words and figures: what it gives, its stops, who disputes the post, what comes first, the safeguard. */
+import type { ReactNode } from 'react';
 import type { RouteChoice, RouteStep } from '@/engine/reading/schema/routes';
 import type { Side } from '@/engine/types';
+import type { RankedChoice } from './ask';
+import { PartsList } from './parts-list';
+import { Race } from './race';
 import { movesText, SIDE_NAMES } from './words';
 
-export function Way({ choice, side }: { readonly choice: RouteChoice; readonly side: Side }) {
+export function Way({ choice, side }: { readonly choice: RankedChoice; readonly side: Side }) {
   const { man, kind, post, text, steps, shortest } = choice;
   return (
     <section aria-label="The way" className="double-rule-top mt-8 pt-6">
@@ -12,10 +16,14 @@ export function Way({ choice, side }: { readonly choice: RouteChoice; readonly s
         <div>
           <p className="max-w-170 py-3">{text}</p>
           <Stops steps={steps} />
+          <PartsList choice={choice} side={side} />
         </div>
         <dl className="mt-3 lg:mt-0">
           <Fact term="Ways of this length">{waysText(shortest)}</Fact>
-          <Fact term="The enemy’s soonest challenge">{challengeText(choice, side)}</Fact>
+          <Fact term="The enemy’s soonest challenge">
+            {challengeText(choice, side)}
+            <Race side={side} moves={choice.moves} challenge={choice.challenge?.moves ?? null} />
+          </Fact>
           <Fact term="Must come first, or shortens it">{preparationText(choice)}</Fact>
           <Fact term="Left behind">
             {choice.drops.length === 0
@@ -29,7 +37,7 @@ export function Way({ choice, side }: { readonly choice: RouteChoice; readonly s
   );
 }
 
-function Fact({ term, children }: { readonly term: string; readonly children: string }) {
+function Fact({ term, children }: { readonly term: string; readonly children: ReactNode }) {
   return (
     <div className="border-b border-rule py-2.5">
       <dt className="text-[13px] leading-5 font-medium text-soft">{term}</dt>

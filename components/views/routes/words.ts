@@ -29,7 +29,7 @@ export function wayText({ moves, stops, needs }: Pick<RouteChoice, 'moves' | 'st
 /** What helps a man most, in its row of the list. */
 export function manText({ best }: Pick<ManRow, 'best'>): string {
   if (!best) return 'no safe way anywhere';
-  if (best.merit <= 0) return 'stands best where it is';
+  if (best.merit <= 0) return 'gains nothing by moving';
   return `${best.post} in ${movesText(best.moves)}`;
 }
 
