@@ -37,3 +37,8 @@ export async function raiseTokenVersion(db: Db, id: string): Promise<void> {
     .set({ tokenVersion: sql`${users.tokenVersion} + 1` })
     .where(eq(users.id, id));
 }
+
+/** Whether anybody ever had an account here. */
+export async function isPeopled(db: Db): Promise<boolean> {
+  return (await db.select({ id: users.id }).from(users).limit(1)).length > 0;
+}

@@ -1,4 +1,4 @@
-/** The terminal command: `npm run waypost -- read "<FEN>"`. It needs no server and no database. */
+/** The terminal command: `npm run waypost -- read "<FEN>"`. What computes needs no server and no database. */
 import { fileURLToPath } from 'node:url';
 import { env } from '@/lib/env';
 import { READ_HELP, runRead } from './read';
@@ -11,6 +11,10 @@ const HELP = `waypost: where the pieces belong
 Commands
   read "<FEN>"      read a position
   routes "<FEN>"    where men belong and how they get there; a route checked
+  migrate           make the database, or bring it up to date
+  seed              the demo workspace, once
+  dump FILE         everything that is kept into one file
+  restore FILE      such a file into an empty database
 
 "<command> --help" says more.
 
@@ -25,6 +29,15 @@ export async function runWaypost(args: readonly string[], terminal: Terminal): P
         return await runRead(rest, terminal);
       case 'routes':
         return await runRoutes(rest, terminal);
+      // Loaded only when asked for: the others start faster without a database.
+      case 'migrate':
+        return await (await import('./migrate')).runMigrate(rest, terminal);
+      case 'seed':
+        return await (await import('./seed')).runSeed(rest, terminal);
+      case 'dump':
+        return await (await import('./dump')).runDump(rest, terminal);
+      case 'restore':
+        return await (await import('./dump')).runRestore(rest, terminal);
       case '--help':
       case '-h':
       case 'help':
