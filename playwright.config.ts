@@ -1,5 +1,8 @@
 /** The real browser: the built application on a free port, in the Chromium that the system has. */
+import { mkdtempSync } from 'node:fs';
 import { createServer } from 'node:net';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { defineConfig } from '@playwright/test';
 
 /** A port that nobody listens on. */
@@ -14,6 +17,8 @@ async function freePort(): Promise<number> {
 
 // Workers read this file again: they find the port that the first reading chose.
 process.env.E2E_PORT ??= String(await freePort());
+// A database of their own, with the demo workspace; how to sign in to it stands in the folder's demo-sign-in.txt.
+process.env.E2E_DATA ??= mkdtempSync(join(tmpdir(), 'waypost-e2e-'));
 const baseURL = `http://127.0.0.1:${process.env.E2E_PORT}`;
 
 export default defineConfig({
@@ -43,9 +48,15 @@ export default defineConfig({
   },
   projects: [{ name: 'chromium', use: { viewport: { width: 1440, height: 900 } } }],
   webServer: {
-    command: `node node_modules/next/dist/bin/next start -H 127.0.0.1 -p ${process.env.E2E_PORT}`,
+    command: `node --import tsx lib/cli/waypost.ts seed && exec node node_modules/next/dist/bin/next start -H 127.0.0.1 -p ${process.env.E2E_PORT}`,
     url: `${baseURL}/api/health`,
-    env: { NEXT_TELEMETRY_DISABLED: '1', LOG_LEVEL: 'warn' },
+    env: {
+      NEXT_TELEMETRY_DISABLED: '1',
+      NEXT_MANUAL_SIG_HANDLE: 'true',
+      LOG_LEVEL: 'warn',
+      WAYPOST_DATA: process.env.E2E_DATA,
+      DATABASE_URL: '',
+    },
     timeout: 60_000,
   },
 });

@@ -4,6 +4,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { ensureChromium } from './house/chromium.mjs';
 import { install, requireNode } from './house/install.mjs';
+import { ensurePostgres } from './house/postgres.mjs';
 import { runProgram } from './house/run.mjs';
 import { add, NOTHING, playwrightCount, readReport, vitestCount } from './house/tally.mjs';
 
@@ -46,6 +47,11 @@ async function check() {
     chromium = await ensureChromium();
     if (chromium !== undefined) console.log(chromium);
     return chromium !== undefined;
+  });
+  await step('postgresql', async () => {
+    const programs = await ensurePostgres();
+    if (programs !== undefined) console.log(programs);
+    return programs !== undefined;
   });
   await step('format', () => runProgram('biome', ['format', '--max-diagnostics=8']));
   await step('lint', () => runProgram('eslint', ['--max-warnings', '0']));

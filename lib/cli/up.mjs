@@ -1,5 +1,5 @@
 /** `npm run up`: from a fresh clone to a page that one can open. Needs Node and npm only. */
-import { spawn } from 'node:child_process';
+import { execFile, spawn } from 'node:child_process';
 import { createServer } from 'node:net';
 import { needsBuild } from './house/build-age.mjs';
 import { install, requireNode } from './house/install.mjs';
@@ -47,12 +47,29 @@ function serve(port) {
   const server = spawn(process.execPath, [PROGRAM.next, 'start', '-p', String(port)], {
     cwd: ROOT,
     stdio: ['ignore', 'inherit', 'inherit'],
-    env: { ...ENVIRONMENT, NODE_ENV: 'production' },
+    // Our own handler of signals closes the database (lib/start.ts).
+    env: { ...ENVIRONMENT, NODE_ENV: 'production', NEXT_MANUAL_SIG_HANDLE: 'true' },
   });
   for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) {
     process.on(signal, () => server.kill(signal));
   }
   server.once('exit', (code) => process.exit(code ?? 0));
+}
+
+/**
+ * Makes the database and the demo workspace, in a process of its own: the first time takes memory that the server need
+ * not keep. Ends with the reason when there is one.
+ *
+ * @returns {Promise<string>} how to sign in to the demo workspace; empty when there is none
+ */
+function prepare() {
+  const args = ['--import', 'tsx', 'lib/cli/waypost.ts', 'seed'];
+  return new Promise((resolve) => {
+    execFile(process.execPath, args, { cwd: ROOT, env: ENVIRONMENT }, (error, output, errors) => {
+      if (error) stop(errors.trim() || error.message);
+      resolve(output.trim());
+    });
+  });
 }
 
 /**
@@ -78,6 +95,7 @@ if (!(await install())) stop('The packages could not be installed; what npm said
 if (needsBuild(ROOT) && !(await runProgram('next', ['build'], { NODE_ENV: 'production' }))) {
   stop('The build failed; the reason stands above.');
 }
+const signIn = await prepare();
 serve(port);
 await untilLive(url);
 console.log(`
@@ -86,5 +104,7 @@ Waypost is ready. Open ${url}
   a reading as JSON    ${url}/api/v1/readings?fen=8/8/8/3k4/8/3K4/3P4/8%20w%20-%20-%200%201
   the API document     ${url}/api/v1/openapi.json
 
-No sign-in is needed. End with Ctrl+C.
+${signIn === '' ? 'No sign-in is needed to read positions.' : `To see the demo workspace, sign in at ${url}/sign-in as\n\n${signIn.replace(/^/gm, '  ')}`}
+
+End with Ctrl+C.
 `);

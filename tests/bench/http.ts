@@ -6,7 +6,10 @@
  * so that every reading is computed.
  */
 import { type ChildProcess, spawn } from 'node:child_process';
+import { mkdtempSync, rmSync } from 'node:fs';
 import { createServer } from 'node:net';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import autocannon from 'autocannon';
 import type { Figure } from './figure';
 
@@ -30,12 +33,19 @@ const START_TIMEOUT_MS = 30_000;
 export async function startBuiltServer(): Promise<BuiltServer> {
   const port = await freePort();
   const url = `http://127.0.0.1:${port}`;
+  const data = mkdtempSync(join(tmpdir(), 'waypost-bench-'));
   const child = spawn(
     process.execPath,
     ['node_modules/next/dist/bin/next', 'start', '-H', '127.0.0.1', '-p', String(port)],
     {
       stdio: ['ignore', 'ignore', 'inherit'],
-      env: { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
+      env: {
+        ...process.env,
+        NODE_ENV: 'production',
+        NEXT_TELEMETRY_DISABLED: '1',
+        WAYPOST_DATA: data,
+        DATABASE_URL: '',
+      },
     },
   );
   const deadline = Date.now() + START_TIMEOUT_MS;
@@ -44,7 +54,11 @@ export async function startBuiltServer(): Promise<BuiltServer> {
       throw new Error('The built server does not start; run `npm run build` first.');
     await new Promise((resolve) => setTimeout(resolve, 100));
   }
-  return { url, stop: () => stopped(child) };
+  const stop = async () => {
+    await stopped(child);
+    rmSync(data, { recursive: true, force: true });
+  };
+  return { url, stop };
 }
 
 /** All figures of this file. Throws when any request is refused: a wrong answer has no speed. */

@@ -6,9 +6,11 @@ import { join } from 'node:path';
 export const SOURCES = [
   'app',
   'components',
+  'db',
   'engine',
   'lib',
   'openapi',
+  'instrumentation.ts',
   'proxy.ts',
   'next.config.mjs',
   'postcss.config.mjs',

@@ -18,7 +18,7 @@ Install one (on Debian: apt-get install postgresql), or say where initdb and pos
  * @returns {string | undefined}
  */
 export function findPostgres({ POSTGRES_BIN, PATH = '' }) {
-  const folders = [...(POSTGRES_BIN ? [POSTGRES_BIN] : []), ...debianFolders(), ...PATH.split(delimiter)];
+  const folders = POSTGRES_BIN ? [POSTGRES_BIN] : [...debianFolders(), ...PATH.split(delimiter)];
   return folders.find((folder) => ['initdb', 'postgres'].every((name) => isProgram(join(folder, name))));
 }
 
