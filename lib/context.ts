@@ -1,12 +1,8 @@
 /** The whole outside world of a service: who asks, what time it is, the database, where to compute, and whether anyone still waits. */
 import type { Db } from '@/db/client';
+import type { Actor } from '@/lib/actor';
 import { type Computing, computing } from '@/lib/compute/computing';
 import { openDb } from '@/lib/database';
-
-/** Who asks. Nobody signs in for the calls there are now. */
-export interface Actor {
-  readonly kind: 'anonymous';
-}
 
 export interface Context {
   readonly actor: Actor;
@@ -32,9 +28,4 @@ export function contextOf(actor: Actor, requestId: string, signal: AbortSignal):
     compute: computing,
     signal,
   };
-}
-
-/** The context of a request by somebody who has not signed in. */
-export function anonymousContext(requestId: string, signal: AbortSignal): Context {
-  return contextOf({ kind: 'anonymous' }, requestId, signal);
 }

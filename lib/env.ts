@@ -13,6 +13,10 @@ export const env = {
   databaseUrl: process.env.DATABASE_URL || undefined,
   /** The folder of what is kept, outside the repository: WAYPOST_DATA, or `.waypost` in the home folder. */
   dataFolder: resolve(/*turbopackIgnore: true*/ process.env.WAYPOST_DATA || join(homedir(), '.waypost')),
+  /** What sessions are sealed with; unset: made once and kept in the data folder. */
+  secret: process.env.WAYPOST_SECRET || undefined,
+  /** How many proxies of our own stand before the server: the address of a caller is taken from what they say. */
+  proxies: Number(process.env.WAYPOST_PROXIES ?? 0),
   /** Whether Next is building: pages are drawn then, and no database may be opened. */
   isBuilding: process.env.NEXT_PHASE === 'phase-production-build',
 } as const;

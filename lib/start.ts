@@ -1,7 +1,12 @@
 /** The server's beginning and its graceful end. */
 import { subscribe } from 'node:diagnostics_channel';
 import type { Server } from 'node:http';
-import { closeDatabase, openedDatabase } from '@/lib/database';
+import { markAddresses } from '@/lib/address';
+import { computing } from '@/lib/compute/computing';
+import { closeDatabase, openDb, openedDatabase } from '@/lib/database';
+import { env } from '@/lib/env';
+import { JOB_KINDS } from '@/lib/jobs/kinds';
+import { startWorker } from '@/lib/jobs/worker';
 import { log } from '@/lib/log';
 
 /** How long requests under way may take to finish once the server is asked to end. */
@@ -12,7 +17,7 @@ const process_ = globalThis as typeof globalThis & { [STEPS]?: (() => Promise<vo
 const steps = (process_[STEPS] ??= []);
 
 /** Something to be ended before the database closes, such as a worker of jobs. Steps run in the order they came. */
-export function beforeStop(step: () => Promise<void>): void {
+function beforeStop(step: () => Promise<void>): void {
   steps.push(step);
 }
 
@@ -25,6 +30,9 @@ export async function startServer(): Promise<void> {
     console.error(error instanceof Error ? error.message : error);
     process.exit(1);
   }
+  markAddresses(env.proxies);
+  const worker = startWorker({ world: { db: openDb(), compute: computing, now: () => new Date() }, kinds: JOB_KINDS });
+  beforeStop(worker.stop);
   const servers = serversSeen();
   let stopping = false;
   for (const signal of ['SIGTERM', 'SIGINT', 'SIGHUP'] as const) {

@@ -40,11 +40,21 @@ export function apiDocument(): ApiDocument {
     servers: [{ url: '/' }],
     tags: [
       { name: 'Readings', description: 'Positions to readings.' },
+      { name: 'Routes', description: 'Where men belong and how they get there.' },
       { name: 'Plates', description: 'Positions to figures.' },
+      { name: 'Studies', description: 'What a workspace keeps.' },
+      { name: 'Jobs', description: 'Long work.' },
+      { name: 'Keys', description: 'Keys of a workspace and what they use.' },
       { name: 'About', description: 'What the API says of itself.' },
     ],
     paths,
-    components: { schemas: components.sorted() },
+    components: {
+      schemas: components.sorted(),
+      securitySchemes: {
+        key: { type: 'http', scheme: 'bearer', description: 'A key of a workspace, made by its owners.' },
+        session: { type: 'apiKey', in: 'cookie', name: SESSION_COOKIE, description: 'A person, by the browser.' },
+      },
+    },
   };
 }
 
@@ -89,17 +99,55 @@ function operation(call: Contract, components: Components): JsonObject {
   const parameters = [
     ...fields(call.params, 'path', call.example.params, components),
     ...fields(call.query, 'query', call.example.query, components),
+    ...(call.stores ? [IDEMPOTENCY_KEY] : []),
+    ...(call.guarded ? [IF_MATCH] : []),
   ];
   return {
     operationId: call.id,
     summary: call.summary,
     description: call.description,
     tags: [call.tag],
+    ...securityOf(call),
     ...(parameters.length > 0 && { parameters }),
     ...(call.body && { requestBody: requestBody(call.body, call.example.body, components) }),
     responses: { ...success(call, components), ...refusals(call, components) },
   };
 }
+
+/** The cookie that a signed-in browser sends. */
+const SESSION_COOKIE = 'next-auth.session-token';
+
+/** Who may call, in the document's words. A computing call takes a key, but needs none. */
+function securityOf({ scope }: Contract): JsonObject {
+  switch (scope) {
+    case 'open':
+      return {};
+    case 'compute':
+      return { security: [{}, { key: [] }] };
+    case 'workspace':
+    case 'person':
+      return { security: [{ session: [] }] };
+    default:
+      return { security: [{ key: [] }, { session: [] }], 'x-scope': scope };
+  }
+}
+
+const IDEMPOTENCY_KEY: Json = {
+  name: 'Idempotency-Key',
+  in: 'header',
+  required: false,
+  description:
+    'A text of your own; the same request sent again with it stores nothing twice and answers the same for a day.',
+  schema: { type: 'string', minLength: 1, maxLength: 128 },
+};
+
+const IF_MATCH: Json = {
+  name: 'If-Match',
+  in: 'header',
+  required: true,
+  description: 'The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed.',
+  schema: { type: 'string' },
+};
 
 function fields(
   schema: z.ZodType | undefined,
@@ -142,16 +190,34 @@ function requestBody(body: NonNullable<Contract['body']>, example: unknown, comp
 const REQUEST_ID: Json = { description: 'The id of this request.', schema: { type: 'string' } };
 
 function success(call: Contract, components: Components): JsonObject {
-  const { reply } = call;
-  const schema = reply.form === 'json' || reply.form === 'lines' ? components.of(reply.schema) : { type: 'string' };
+  const { reply, status = 200 } = call;
+  if (reply.form === 'none')
+    return { [status]: { description: call.summary, headers: { 'X-Request-Id': REQUEST_ID } } };
+  const schema = 'schema' in reply ? components.of(reply.schema) : { type: 'string' };
   const headers: JsonObject = { 'X-Request-Id': REQUEST_ID };
   if (call.cached) headers.ETag = { description: 'Changes only when the answer does.', schema: { type: 'string' } };
-  const about = reply.form === 'lines' ? 'One JSON value a line; the schema is that of a line.' : call.summary;
+  if (call.guarded || call.stores) headers.ETag = { description: 'Names this version.', schema: { type: 'string' } };
+  if (call.listed) headers.Link = { description: 'rel="next": the next page (RFC 8288).', schema: { type: 'string' } };
+  if (call.scope !== 'open') Object.assign(headers, LIMIT_HEADERS);
+  const about = ABOUT[reply.form] ?? call.summary;
   const unchanged: JsonObject = call.cached
     ? { 304: { description: 'The copy named by If-None-Match is still good.', headers } }
     : {};
-  return { 200: { description: about, headers, content: { [reply.media]: { schema } } }, ...unchanged };
+  return { [status]: { description: about, headers, content: { [reply.media]: { schema } } }, ...unchanged };
 }
+
+const ABOUT: Readonly<Partial<Record<Contract['reply']['form'], string>>> = {
+  lines: 'One JSON value a line; the schema is that of a line.',
+  events: 'Server-sent events; the schema is that of the data of an event.',
+};
+
+const LIMIT_HEADERS: JsonObject = {
+  RateLimit: { description: 'What is left of the allowance, and for how many seconds.', schema: { type: 'string' } },
+  'RateLimit-Policy': {
+    description: 'The allowance: so many requests in so many seconds.',
+    schema: { type: 'string' },
+  },
+};
 
 /** One response a status; the codes it may carry are its examples. */
 function refusals(call: Contract, components: Components): JsonObject {

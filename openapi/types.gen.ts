@@ -124,6 +124,438 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/api/v1/studies": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List studies
+         * @description The studies that the caller may read, the last changed first.
+         */
+        readonly get: operations["listStudies"];
+        readonly put?: never;
+        /**
+         * Make a study
+         * @description Makes an empty study in the workspace.
+         */
+        readonly post: operations["createStudy"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a study
+         * @description A study with its version, which the ETag names. Its positions are a list of their own.
+         */
+        readonly get: operations["getStudy"];
+        readonly put?: never;
+        readonly post?: never;
+        /**
+         * Put a study into the trash
+         * @description Puts a study into the trash with all that is in it; it can be restored for thirty days.
+         */
+        readonly delete: operations["deleteStudy"];
+        readonly options?: never;
+        readonly head?: never;
+        /**
+         * Change a study
+         * @description Changes title or summary.
+         */
+        readonly patch: operations["changeStudy"];
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/restore": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Take a study out of the trash
+         * @description The study is as it was. One that is not in the trash stays as it is.
+         */
+        readonly post: operations["restoreStudy"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/history": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read the history of a study
+         * @description Every change with who, when, before and after, the newest first.
+         */
+        readonly get: operations["listChanges"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/shares": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * See with whom a study is shared
+         * @description The students who may read it; owners, coaches and writers of the workspace may always.
+         */
+        readonly get: operations["getShares"];
+        /**
+         * Share a study
+         * @description Shares a study with these students and with no others.
+         */
+        readonly put: operations["putShares"];
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/positions": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the positions of a study
+         * @description All positions of a study in their order.
+         */
+        readonly get: operations["listPositions"];
+        readonly put?: never;
+        /**
+         * Keep a position in a study
+         * @description Keeps a position with its title, note, marks and chosen layer. Diagrams without kings are taken too.
+         */
+        readonly post: operations["createPosition"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/positions/{positionId}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a position of a study
+         * @description A position with its version, which the ETag names.
+         */
+        readonly get: operations["getPosition"];
+        readonly put?: never;
+        readonly post?: never;
+        /**
+         * Put a position into the trash
+         * @description It can be restored for thirty days.
+         */
+        readonly delete: operations["deletePosition"];
+        readonly options?: never;
+        readonly head?: never;
+        /**
+         * Change a position of a study
+         * @description Changes the fields that are given: board, words, marks, layer, place.
+         */
+        readonly patch: operations["changePosition"];
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/positions/{positionId}/restore": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Restore a position
+         * @description Takes a position out of the trash, or back to what it was at a version of its history.
+         */
+        readonly post: operations["restorePosition"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/routes": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the routes of a study
+         * @description All routes kept in a study, the oldest first.
+         */
+        readonly get: operations["listStudyRoutes"];
+        readonly put?: never;
+        /**
+         * Compute a route and keep it
+         * @description Computes the request now, and keeps it with its result and the version of the engine.
+         */
+        readonly post: operations["createStudyRoute"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/routes/{resultId}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a route of a study
+         * @description What was asked, what came out, and which engine said so.
+         */
+        readonly get: operations["getStudyRoute"];
+        readonly put?: never;
+        readonly post?: never;
+        /**
+         * Put a route into the trash
+         * @description It can be restored for thirty days.
+         */
+        readonly delete: operations["deleteStudyRoute"];
+        readonly options?: never;
+        readonly head?: never;
+        /**
+         * Change the words of a route
+         * @description Changes title or note; request and result stay.
+         */
+        readonly patch: operations["changeStudyRoute"];
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/routes/{resultId}/restore": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Take a route out of the trash
+         * @description It is as it was.
+         */
+        readonly post: operations["restoreStudyRoute"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/jobs": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List jobs
+         * @description The jobs of the workspace, the newest first.
+         */
+        readonly get: operations["listJobs"];
+        readonly put?: never;
+        /**
+         * Begin long work
+         * @description Up to ten thousand positions to be read, a list of FENs or a PGN to be imported into a study, or a study to be computed anew by the present engine. It goes on when the caller goes away, and after a crash.
+         */
+        readonly post: operations["createJob"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/jobs/{id}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * See how far a job is
+         * @description Counts of items done and refused.
+         */
+        readonly get: operations["getJob"];
+        readonly put?: never;
+        readonly post?: never;
+        /**
+         * Cancel a job
+         * @description Ends a job; what is done stays done. One that has ended stays as it is.
+         */
+        readonly delete: operations["cancelJob"];
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/jobs/{id}/events": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Watch a job
+         * @description Server-sent events: the job at once, at each change, and when it has ended; then the stream ends.
+         */
+        readonly get: operations["watchJob"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/jobs/{id}/items": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read what became of the items
+         * @description Each item in the order of the request: what was made of it, or why it was refused.
+         */
+        readonly get: operations["listJobItems"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/jobs/{id}/retry": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Try a job again
+         * @description Puts a job that failed, was cancelled, or has refused items back into the queue. Done items stay done.
+         */
+        readonly post: operations["retryJob"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/keys": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the keys
+         * @description All keys of the workspace, the newest first, those that are ended or expired too.
+         */
+        readonly get: operations["listKeys"];
+        readonly put?: never;
+        /**
+         * Make a key
+         * @description Makes a key with some scopes and an end. Its secret is in this answer and nowhere else.
+         */
+        readonly post: operations["createKey"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/keys/{id}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        readonly post?: never;
+        /**
+         * End a key
+         * @description Ends a key at once and for good. A key that is ended already stays so.
+         */
+        readonly delete: operations["revokeKey"];
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/usage": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * See what the keys have used
+         * @description Counts of calls by key, day and call.
+         */
+        readonly get: operations["getUsage"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/api/v1": {
         readonly parameters: {
             readonly query?: never;
@@ -228,6 +660,32 @@ export interface components {
             readonly name: string;
             readonly max: number;
         };
+        /** @description What was changed in a study, by whom and when. */
+        readonly Change: {
+            readonly id: components["schemas"]["Id"];
+            /** @enum {string} */
+            readonly entity: "study" | "position" | "result" | "game";
+            readonly entityId: components["schemas"]["Id"];
+            /** @description One more with each change; the ETag names it. */
+            readonly version: number;
+            /** @enum {string} */
+            readonly kind: "create" | "update" | "delete" | "restore";
+            readonly at: components["schemas"]["Moment"];
+            /** @description The name of the person or key; null: gone. */
+            readonly by: string | null;
+            readonly before: {
+                readonly [key: string]: unknown;
+            } | null;
+            readonly after: {
+                readonly [key: string]: unknown;
+            } | null;
+        };
+        /** @description A page of a list. */
+        readonly ChangePage: {
+            readonly items: readonly components["schemas"]["Change"][];
+            /** @description The cursor of the next page; null at the end. */
+            readonly next: string | null;
+        };
         /** @description The verdict of one step of a given route. */
         readonly CheckedStep: {
             readonly to: components["schemas"]["Square"];
@@ -312,6 +770,102 @@ export interface components {
             readonly uptimeSeconds: number;
         };
         /**
+         * Format: uuid
+         * @description An id of something stored.
+         */
+        readonly Id: string;
+        /** @description How far long work is. */
+        readonly Job: {
+            readonly id: components["schemas"]["Id"];
+            readonly kind: string;
+            /** @enum {string} */
+            readonly state: "queued" | "running" | "done" | "failed" | "cancelled";
+            /** @description Items in all: positions or games. */
+            readonly total: number;
+            readonly done: number;
+            /** @description Items that were refused; each says why. */
+            readonly failed: number;
+            readonly error: string | null;
+            readonly createdAt: components["schemas"]["Moment"];
+            readonly startedAt: components["schemas"]["Moment"] | null;
+            readonly endedAt: components["schemas"]["Moment"] | null;
+        };
+        /** @description One item of long work. */
+        readonly JobItem: {
+            /** @description From 1, in the order of the request. */
+            readonly number: number;
+            /** @enum {string} */
+            readonly state: "queued" | "done" | "failed";
+            /** @description What was made, or {"error": …} saying why it was refused. */
+            readonly output: unknown;
+        };
+        /** @description Items of a job, in order. */
+        readonly JobItems: {
+            readonly items: readonly components["schemas"]["JobItem"][];
+            /** @description "after" of the next page; null at the end. */
+            readonly next: number | null;
+        };
+        /** @description A page of a list. */
+        readonly JobPage: {
+            readonly items: readonly components["schemas"]["Job"][];
+            /** @description The cursor of the next page; null at the end. */
+            readonly next: string | null;
+        };
+        /** @description Long work to be done. */
+        readonly JobRequest: {
+            /** @constant */
+            readonly kind: "readings";
+            /** @description Positions to be read; each reading is kept, so that asking for it later answers at once. */
+            readonly fens: readonly string[];
+        } | {
+            /** @constant */
+            readonly kind: "import";
+            readonly study: components["schemas"]["Id"];
+            /**
+             * @description fens: one a line, a title may follow a tab. pgn: games.
+             * @enum {string}
+             */
+            readonly format: "fens" | "pgn";
+            readonly text: string;
+        } | {
+            /** @constant */
+            readonly kind: "recompute";
+            /** @description Readings and results of this study that an older engine made are made anew. */
+            readonly study: components["schemas"]["Id"];
+        };
+        /** @description A key, without the secret: that is shown once, when it is made. */
+        readonly Key: {
+            readonly id: components["schemas"]["Id"];
+            readonly name: string;
+            /** @description The beginning of the key, by which it can be recognised. */
+            readonly prefix: string;
+            readonly scopes: readonly components["schemas"]["KeyScope"][];
+            readonly createdAt: components["schemas"]["Moment"];
+            readonly expiresAt: components["schemas"]["Moment"] | null;
+            readonly revokedAt: components["schemas"]["Moment"] | null;
+            readonly usedAt: components["schemas"]["Moment"] | null;
+        };
+        /** @description All keys. */
+        readonly KeyList: {
+            readonly items: readonly components["schemas"]["Key"][];
+        };
+        /** @description A key to be made. */
+        readonly KeyRequest: {
+            /** @description By which its owners know what it is for. */
+            readonly name: string;
+            readonly scopes: readonly components["schemas"]["KeyScope"][];
+            /**
+             * @description For how many days it is good.
+             * @default 90
+             */
+            readonly days?: number;
+        };
+        /**
+         * @description What a key may do.
+         * @enum {string}
+         */
+        readonly KeyScope: "compute" | "studies:read" | "studies:write" | "publish";
+        /**
          * @description A kind of man.
          * @enum {string}
          */
@@ -385,11 +939,29 @@ export interface components {
             /** @description Named traits: bad-bishop, bad-but-active, rim, outpost, overloaded and others. */
             readonly notes: readonly string[];
         };
+        /** @description Something a person marks on a plate. */
+        readonly Mark: {
+            readonly square: components["schemas"]["Square"];
+            /** @description Given: a trail from the square to this one; else a ring on the square. */
+            readonly to?: components["schemas"]["Square"];
+            readonly text?: string;
+        };
         /**
          * @description strict: legal positions only. diagram: also what teachers draw, the faults answered as warnings.
          * @enum {string}
          */
         readonly Mode: "strict" | "diagram";
+        /**
+         * Format: date-time
+         * @description A moment in UTC (RFC 3339).
+         */
+        readonly Moment: string;
+        /** @description A key that was just made. */
+        readonly NewKey: {
+            readonly key: components["schemas"]["Key"];
+            /** @description The key itself. It is shown this once and never stored. */
+            readonly secret: string;
+        };
         /** @description An outpost or advanced post. */
         readonly Outpost: {
             readonly square: components["schemas"]["Square"];
@@ -440,6 +1012,46 @@ export interface components {
             /** @description Wings (a to c, d to e, f to h) where this side has more pawns. */
             readonly majorities: readonly ("queenside" | "centre" | "kingside")[];
         };
+        /** @description The fields that change; the others stay. */
+        readonly PositionChange: {
+            readonly fen?: components["schemas"]["Fen"];
+            readonly title?: string;
+            /** @description Markdown. */
+            readonly note?: string;
+            readonly marks?: readonly components["schemas"]["Mark"][];
+            /** @description The layer its plate shows; null: the reader’s choice. */
+            readonly layer?: ("none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes") | null;
+            readonly man?: components["schemas"]["Square"] | null;
+            readonly after?: components["schemas"]["Id"] | null;
+        };
+        readonly PositionList: {
+            readonly items: readonly components["schemas"]["StudyPosition"][];
+        };
+        /** @description A position to be kept in a study. */
+        readonly PositionRequest: {
+            readonly fen: components["schemas"]["Fen"];
+            /** @default  */
+            readonly title?: string;
+            /**
+             * @description Markdown.
+             * @default
+             */
+            readonly note?: string;
+            /** @default [] */
+            readonly marks?: readonly components["schemas"]["Mark"][];
+            /**
+             * @description The layer its plate shows; null: the reader’s choice.
+             * @default null
+             */
+            readonly layer?: ("none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes") | null;
+            /**
+             * @description The man whose layer is shown.
+             * @default null
+             */
+            readonly man?: components["schemas"]["Square"] | null;
+            /** @description The position it is put behind; null: at the beginning; left out: at the end. */
+            readonly after?: components["schemas"]["Id"] | null;
+        };
         /** @description Problem details (RFC 9457). */
         readonly Problem: {
             /** @description Stable address of the kind of problem. */
@@ -465,7 +1077,7 @@ export interface components {
          * @description A stable code of a problem.
          * @enum {string}
          */
-        readonly ProblemCode: "not-json" | "not-found" | "method-not-allowed" | "body-too-large" | "unsupported-media-type" | "invalid-request" | "fen-refused" | "internal";
+        readonly ProblemCode: "not-json" | "not-signed-in" | "not-allowed" | "not-found" | "method-not-allowed" | "conflict" | "idempotency-busy" | "version-lost" | "body-too-large" | "unsupported-media-type" | "invalid-request" | "fen-refused" | "pgn-refused" | "idempotency-mismatch" | "version-needed" | "too-many-requests" | "internal";
         /** @description One place of a request that was refused. */
         readonly ProblemFault: {
             /**
@@ -637,6 +1249,21 @@ export interface components {
             /** @description Only these parts, beside the position itself. Left out: the whole reading. */
             readonly include?: readonly components["schemas"]["ReadingPart"][];
         };
+        /** @description What to restore. */
+        readonly RestoreRequest: {
+            /** @description The version to go back to; left out: out of the trash as it was. */
+            readonly version?: number;
+        };
+        /** @description The words that change; request and result stay. */
+        readonly ResultChange: {
+            /** @default  */
+            readonly title?: string;
+            /**
+             * @description Markdown.
+             * @default
+             */
+            readonly note?: string;
+        };
         /** @description A route that a person gave, step by step. */
         readonly RouteCheck: {
             readonly engine: string;
@@ -757,6 +1384,11 @@ export interface components {
              */
             readonly choicesMax?: number;
         };
+        /** @description With whom a study is shared. */
+        readonly Shares: {
+            /** @description Ids of the students who may read the study. */
+            readonly students: readonly components["schemas"]["Id"][];
+        };
         /**
          * @description A side.
          * @enum {string}
@@ -823,6 +1455,89 @@ export interface components {
                 readonly [key: string]: unknown;
             };
         };
+        /** @description A folder of positions, games and results on one subject. */
+        readonly Study: {
+            readonly id: components["schemas"]["Id"];
+            readonly title: string;
+            readonly summary: string;
+            /** @description How many positions it has. */
+            readonly positions: number;
+            /** @description One more with each change; the ETag names it. */
+            readonly version: number;
+            readonly createdAt: components["schemas"]["Moment"];
+            readonly updatedAt: components["schemas"]["Moment"];
+            /** @description Set: in the trash. */
+            readonly deletedAt: components["schemas"]["Moment"] | null;
+        };
+        /** @description The fields that change; the others stay. */
+        readonly StudyChange: {
+            readonly title?: string;
+            readonly summary?: string;
+        };
+        /** @description A page of a list. */
+        readonly StudyPage: {
+            readonly items: readonly components["schemas"]["Study"][];
+            /** @description The cursor of the next page; null at the end. */
+            readonly next: string | null;
+        };
+        /** @description A position in a study. */
+        readonly StudyPosition: {
+            readonly id: components["schemas"]["Id"];
+            readonly fen: string;
+            readonly title: string;
+            readonly note: string;
+            readonly marks: readonly components["schemas"]["Mark"][];
+            /** @description The layer its plate shows; null: the reader’s choice. */
+            readonly layer: ("none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes") | null;
+            readonly man: components["schemas"]["Square"] | null;
+            /** @description One more with each change; the ETag names it. */
+            readonly version: number;
+            readonly createdAt: components["schemas"]["Moment"];
+            readonly updatedAt: components["schemas"]["Moment"];
+        };
+        /** @description A study to be made. */
+        readonly StudyRequest: {
+            readonly title: string;
+            /** @default  */
+            readonly summary?: string;
+        };
+        /** @description A comparison, route or exchange test kept in a study. */
+        readonly StudyResult: {
+            readonly id: components["schemas"]["Id"];
+            /** @enum {string} */
+            readonly kind: "route";
+            readonly title: string;
+            readonly note: string;
+            /** @description As it was sent. */
+            readonly request: unknown;
+            /** @description As it was answered. */
+            readonly result: unknown;
+            /** @description The version that computed it. */
+            readonly engine: string;
+            /** @description Whether that is the present version. */
+            readonly current: boolean;
+            /** @description One more with each change; the ETag names it. */
+            readonly version: number;
+            readonly computedAt: components["schemas"]["Moment"];
+            readonly createdAt: components["schemas"]["Moment"];
+            readonly updatedAt: components["schemas"]["Moment"];
+        };
+        /** @description All results of a kind. */
+        readonly StudyResults: {
+            readonly items: readonly components["schemas"]["StudyResult"][];
+        };
+        /** @description Something to be computed and kept. */
+        readonly StudyRouteRequest: {
+            /** @default  */
+            readonly title?: string;
+            /**
+             * @description Markdown.
+             * @default
+             */
+            readonly note?: string;
+            /** @description The request of the computing call; its answer is kept. */
+            readonly request: components["schemas"]["RoutesRequest"];
+        };
         /** @description Counts of one side over the whole board. */
         readonly Totals: {
             readonly controlled: number;
@@ -831,6 +1546,19 @@ export interface components {
             readonly centre: number;
             readonly extendedCentre: number;
             readonly safeMoves: number;
+        };
+        /** @description How often each key made each call, day by day (UTC). */
+        readonly Usage: {
+            /** Format: date */
+            readonly since: string;
+            readonly items: readonly {
+                readonly key: components["schemas"]["Id"];
+                readonly name: string;
+                /** Format: date */
+                readonly day: string;
+                readonly call: string;
+                readonly count: number;
+            }[];
         };
         /** @description A square that its side’s pawns cannot guard. */
         readonly WeakSquare: {
@@ -891,6 +1619,10 @@ export interface operations {
                     readonly "X-Request-Id"?: string;
                     /** @description Changes only when the answer does. */
                     readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
@@ -904,12 +1636,49 @@ export interface operations {
                     readonly "X-Request-Id"?: string;
                     /** @description Changes only when the answer does. */
                     readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content?: never;
             };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
             readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -960,6 +1729,10 @@ export interface operations {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
@@ -968,6 +1741,28 @@ export interface operations {
             };
             /** @description not-json: The body is not JSON. */
             readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -1001,6 +1796,17 @@ export interface operations {
             };
             /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
             readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -1054,6 +1860,10 @@ export interface operations {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
@@ -1062,6 +1872,28 @@ export interface operations {
             };
             /** @description not-json: The body is not JSON. */
             readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -1095,6 +1927,17 @@ export interface operations {
             };
             /** @description invalid-request: The request does not have the promised shape. */
             readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -1143,6 +1986,10 @@ export interface operations {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
@@ -1151,6 +1998,28 @@ export interface operations {
             };
             /** @description not-json: The body is not JSON. */
             readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -1184,6 +2053,17 @@ export interface operations {
             };
             /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
             readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -1235,6 +2115,10 @@ export interface operations {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
@@ -1243,6 +2127,28 @@ export interface operations {
             };
             /** @description not-json: The body is not JSON. */
             readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -1276,6 +2182,17 @@ export interface operations {
             };
             /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
             readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -1337,6 +2254,10 @@ export interface operations {
                     readonly "X-Request-Id"?: string;
                     /** @description Changes only when the answer does. */
                     readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
@@ -1350,12 +2271,49 @@ export interface operations {
                     readonly "X-Request-Id"?: string;
                     /** @description Changes only when the answer does. */
                     readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content?: never;
             };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
             readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;
@@ -1420,6 +2378,10 @@ export interface operations {
                     readonly "X-Request-Id"?: string;
                     /** @description Changes only when the answer does. */
                     readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content: {
@@ -1433,12 +2395,3849 @@ export interface operations {
                     readonly "X-Request-Id"?: string;
                     /** @description Changes only when the answer does. */
                     readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
                     readonly [name: string]: unknown;
                 };
                 content?: never;
             };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
             readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listStudies: {
+        readonly parameters: {
+            readonly query?: {
+                /**
+                 * @description Most items of the page.
+                 * @example 10
+                 */
+                readonly limit?: number;
+                /** @description The "next" of the page before. */
+                readonly cursor?: string;
+                /** @description true: those in the trash, from where they can be restored. */
+                readonly trash?: "true" | "false";
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description List studies */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description rel="next": the next page (RFC 8288). */
+                    readonly Link?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyPage"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createStudy: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description A text of your own; the same request sent again with it stores nothing twice and answers the same for a day. */
+                readonly "Idempotency-Key"?: string;
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 16384 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "title": "Knights against bad bishops",
+                 *       "summary": "Four positions, one idea."
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["StudyRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Make a study */
+            readonly 201: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Study"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description idempotency-busy: The first request with this Idempotency-Key is still at work. */
+            readonly 409: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. idempotency-mismatch: This Idempotency-Key was used with another request. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getStudy: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Read a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Study"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly deleteStudy: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Put a study into the trash */
+            readonly 204: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly changeStudy: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 16384 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "summary": "Four positions, one idea: the bishop goes first."
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["StudyChange"];
+            };
+        };
+        readonly responses: {
+            /** @description Change a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Study"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly restoreStudy: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Take a study out of the trash */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Study"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listChanges: {
+        readonly parameters: {
+            readonly query?: {
+                /**
+                 * @description Most items of the page.
+                 * @example 10
+                 */
+                readonly limit?: number;
+                /** @description The "next" of the page before. */
+                readonly cursor?: string;
+            };
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Read the history of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description rel="next": the next page (RFC 8288). */
+                    readonly Link?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ChangePage"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getShares: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description See with whom a study is shared */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Shares"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly putShares: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 32768 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "students": []
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["Shares"];
+            };
+        };
+        readonly responses: {
+            /** @description Share a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Shares"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listPositions: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description List the positions of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["PositionList"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createPosition: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description A text of your own; the same request sent again with it stores nothing twice and answers the same for a day. */
+                readonly "Idempotency-Key"?: string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 131072 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11",
+                 *       "title": "Before the minority attack",
+                 *       "note": "Where does the a1 rook belong?"
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["PositionRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Keep a position in a study */
+            readonly 201: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyPosition"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description idempotency-busy: The first request with this Idempotency-Key is still at work. conflict: What is there already does not go with the request. */
+            readonly 409: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. idempotency-mismatch: This Idempotency-Key was used with another request. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getPosition: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000b1
+                 */
+                readonly positionId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Read a position of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyPosition"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly deletePosition: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000b1
+                 */
+                readonly positionId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Put a position into the trash */
+            readonly 204: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly changePosition: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000b1
+                 */
+                readonly positionId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 131072 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "note": "It belongs on b1, behind the lever b4-b5."
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["PositionChange"];
+            };
+        };
+        readonly responses: {
+            /** @description Change a position of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyPosition"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly restorePosition: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000b1
+                 */
+                readonly positionId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 1024 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /** @example {} */
+                readonly "application/json": components["schemas"]["RestoreRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Restore a position */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyPosition"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listStudyRoutes: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description List the routes of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResults"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createStudyRoute: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description A text of your own; the same request sent again with it stores nothing twice and answers the same for a day. */
+                readonly "Idempotency-Key"?: string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 131072 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "title": "First try",
+                 *       "request": {
+                 *         "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11",
+                 *         "man": "f3",
+                 *         "choicesMax": 2
+                 *       }
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["StudyRouteRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Compute a route and keep it */
+            readonly 201: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description idempotency-busy: The first request with this Idempotency-Key is still at work. */
+            readonly 409: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. idempotency-mismatch: This Idempotency-Key was used with another request. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getStudyRoute: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d1
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Read a route of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly deleteStudyRoute: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d1
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Put a route into the trash */
+            readonly 204: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly changeStudyRoute: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d1
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 131072 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "note": "Black is slower by one move."
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["ResultChange"];
+            };
+        };
+        readonly responses: {
+            /** @description Change the words of a route */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly restoreStudyRoute: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d1
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Take a route out of the trash */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listJobs: {
+        readonly parameters: {
+            readonly query?: {
+                /**
+                 * @description Most items of the page.
+                 * @example 10
+                 */
+                readonly limit?: number;
+                /** @description The "next" of the page before. */
+                readonly cursor?: string;
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description List jobs */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description rel="next": the next page (RFC 8288). */
+                    readonly Link?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["JobPage"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createJob: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description A text of your own; the same request sent again with it stores nothing twice and answers the same for a day. */
+                readonly "Idempotency-Key"?: string;
+            };
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 16000000 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "kind": "readings",
+                 *       "fens": [
+                 *         "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11",
+                 *         "8/5ppp/4k3/3p4/3P1K2/4P3/5PPP/8 w - - 0 1"
+                 *       ]
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["JobRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Begin long work */
+            readonly 202: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Job"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description idempotency-busy: The first request with this Idempotency-Key is still at work. */
+            readonly 409: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. idempotency-mismatch: This Idempotency-Key was used with another request. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getJob: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000f1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description See how far a job is */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Job"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly cancelJob: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000f1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Cancel a job */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Job"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly watchJob: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000f1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Server-sent events; the schema is that of the data of an event. */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "text/event-stream": components["schemas"]["Job"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listJobItems: {
+        readonly parameters: {
+            readonly query?: {
+                /** @example 10 */
+                readonly limit?: number;
+                /** @description The number behind which the page begins. */
+                readonly after?: number;
+            };
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000f1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Read what became of the items */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["JobItems"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly retryJob: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000f1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Try a job again */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Job"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description conflict: What is there already does not go with the request. */
+            readonly 409: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listKeys: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description List the keys */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["KeyList"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createKey: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 4096 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "name": "The magazine’s figures",
+                 *       "scopes": [
+                 *         "compute"
+                 *       ],
+                 *       "days": 30
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["KeyRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Make a key */
+            readonly 201: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["NewKey"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly revokeKey: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000c1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description End a key */
+            readonly 204: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getUsage: {
+        readonly parameters: {
+            readonly query?: {
+                /**
+                 * @description How many days back.
+                 * @example 7
+                 */
+                readonly days?: number;
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description See what the keys have used */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Usage"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;

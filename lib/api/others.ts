@@ -1,4 +1,5 @@
 /** The methods that an address does not take, and what is at no address at all. */
+import { isOpen } from '@/openapi/contract';
 import { AppError } from '@/lib/errors';
 import { log } from '@/lib/log';
 import { commonHeaders, PREFLIGHT, requestIdOf } from './headers';
@@ -6,12 +7,18 @@ import { problemResponse } from './problem';
 import type { Route } from './route';
 
 type Method = 'GET' | 'HEAD' | 'OPTIONS' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
+type RoutedMethod = Exclude<Method, 'HEAD' | 'OPTIONS'>;
 type Handler = (request: Request, segments?: { readonly params: Promise<unknown> }) => Promise<Response>;
 
 /** Handlers for every method that an address has no route for: OPTIONS and HEAD are answered, the others refused with Allow. */
-export function others(routes: { readonly GET?: Route; readonly POST?: Route }): Readonly<Record<Method, Handler>> {
+export function others(routes: Readonly<Partial<Record<RoutedMethod, Route>>>): Readonly<Record<Method, Handler>> {
   const { GET } = routes;
-  const allow = [...(GET ? ['GET', 'HEAD'] : []), ...(routes.POST ? ['POST'] : []), 'OPTIONS'].join(', ');
+  const allow = [
+    ...(GET ? ['GET', 'HEAD'] : []),
+    ...(['POST', 'PUT', 'PATCH', 'DELETE'] as const).filter((method) => routes[method]),
+    'OPTIONS',
+  ].join(', ');
+  const open = Object.values(routes).every(({ contract }) => isOpen(contract));
   const refuse: Handler = (request) =>
     refused(
       request,
@@ -22,11 +29,11 @@ export function others(routes: { readonly GET?: Route; readonly POST?: Route }):
   return {
     GET: GET ?? refuse,
     HEAD: GET ? headOf(GET) : refuse,
-    OPTIONS: (request) => preflight(request, allow),
+    OPTIONS: (request) => preflight(request, allow, open),
     POST: routes.POST ?? refuse,
-    PUT: refuse,
-    PATCH: refuse,
-    DELETE: refuse,
+    PUT: routes.PUT ?? refuse,
+    PATCH: routes.PATCH ?? refuse,
+    DELETE: routes.DELETE ?? refuse,
   };
 }
 
@@ -54,13 +61,12 @@ function headOf(get: Handler): Handler {
   };
 }
 
-async function preflight(request: Request, allow: string): Promise<Response> {
-  const headers = {
-    ...commonHeaders(requestIdOf(request)),
-    ...PREFLIGHT,
-    Allow: allow,
-    'Access-Control-Allow-Methods': allow,
-  };
+/** What is stored answers no preflight: without its headers a browser lets no other site call. */
+async function preflight(request: Request, allow: string, open: boolean): Promise<Response> {
+  const requestId = requestIdOf(request);
+  const headers: Record<string, string> = open
+    ? { ...commonHeaders(requestId), ...PREFLIGHT, Allow: allow, 'Access-Control-Allow-Methods': allow }
+    : { 'X-Request-Id': requestId, Allow: allow };
   return new Response(null, { status: 204, headers });
 }
 

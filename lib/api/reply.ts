@@ -1,6 +1,6 @@
 /** Values to the text of a reply: checked and written by their schema, here or in a thread that computed them. */
 import type { z } from 'zod';
-import type { JsonReply, LinesReply } from '@/openapi/contract';
+import type { EventsReply, JsonReply, LinesReply } from '@/openapi/contract';
 import { replyCheck } from './check';
 import { jsonWriter } from './writer';
 
@@ -15,7 +15,7 @@ export class Written {
 
 /** The function that turns a reply's values, or its lines, into JSON. Throws on a value that was never promised. */
 export function replyText<S extends z.ZodType>(
-  reply: JsonReply<S> | LinesReply<S>,
+  reply: JsonReply<S> | LinesReply<S> | EventsReply<S>,
   production: boolean,
 ): (value: z.output<S>) => string {
   const checked = replyCheck(reply.schema, reply.check, production);

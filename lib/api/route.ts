@@ -1,14 +1,26 @@
 /** A contract and a handler to a route: parse, run, check the reply, answer problems. */
 import type { z } from 'zod';
-import { anonymousContext, type Context } from '@/lib/context';
+import type { Actor } from '@/lib/actor';
+import { type Context, contextOf } from '@/lib/context';
 import { env } from '@/lib/env';
 import { AppError } from '@/lib/errors';
 import { log } from '@/lib/log';
-import type { Contract, JsonReply, LinesReply, Reply, ReplyValue } from '@/openapi/contract';
+import {
+  type Contract,
+  type JsonReply,
+  type LinesReply,
+  type NoReply,
+  type Reply,
+  type ReplyValue,
+} from '@/openapi/contract';
 import { Answer } from './answer';
 import { readBody } from './body';
 import { isUnchanged } from './etag';
+import { callerOf } from './caller';
+import { eventStream } from './events';
 import { commonHeaders, requestIdOf } from './headers';
+import { idempotencyKeyOf, once } from './idempotency';
+import { versionIn } from './if-match';
 import { lineStream } from './lines';
 import { problemResponse } from './problem';
 import { readParams, readQuery } from './query';
@@ -20,6 +32,8 @@ export interface Call<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
   readonly params: z.output<P>;
   readonly query: z.output<Q>;
   readonly body: z.output<B>;
+  /** The version that If-Match names, for calls that are guarded by it; 0 for the others. */
+  readonly version: number;
 }
 
 /** The value of a reply; JSON may be written already. */
@@ -47,24 +61,50 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
 ): Route {
   const write = bodyWriter(contract.reply);
   const faultsIn = contract.body ? 'body' : 'query';
+  const status = contract.status ?? 200;
 
   async function answer(request: Request, requestId: string, segments?: Segments): Promise<Response> {
-    const ctx = anonymousContext(requestId, request.signal);
+    const { actor, headers: limits } = await callerOf(request, contract);
+    const ctx = contextOf(actor, requestId, request.signal);
     const call: Call<P, Q, B> = {
       ctx,
       params: (contract.params && readParams(await segments?.params, contract.params)) as z.output<P>,
       query: (contract.query && readQuery(new URL(request.url).searchParams, contract.query)) as z.output<Q>,
       body: (contract.body && (await readBody(request, contract.body))) as z.output<B>,
+      version: contract.guarded ? versionIn(request) : 0,
     };
-    const given = await handler(call);
-    const { value, etag, headers } = given instanceof Answer ? given : new Answer<Value<R>>({ value: () => given });
-    const allHeaders = { ...commonHeaders(requestId), ...(etag && { ETag: etag }), ...headers };
-    if (etag && isUnchanged(request.headers.get('if-none-match'), etag))
+    const common = { ...commonHeaders(requestId, contract), ...limits };
+    const key = contract.stores ? idempotencyKeyOf(request) : undefined;
+    if (key !== undefined) {
+      const { pathname } = new URL(request.url);
+      const asked = JSON.stringify([pathname, call.body]);
+      const kept = await once({ ctx, owner: ownerOf(actor), call: contract.id, key, request: asked }, async () => {
+        const { value, headers, etag } = await given(call);
+        const made = JSON.parse(write(await value()) as string) as unknown;
+        return { status, reply: made, headers: { ...(etag && { ETag: etag }), ...headers } };
+      });
+      return new Response(JSON.stringify(kept.reply), {
+        status: kept.status,
+        headers: { 'Content-Type': 'application/json', ...common, ...kept.headers },
+      });
+    }
+    const { value, etag, headers } = await given(call);
+    const allHeaders = { ...common, ...(etag && { ETag: etag }), ...headers };
+    if (etag && contract.method === 'GET' && isUnchanged(request.headers.get('if-none-match'), etag))
       return new Response(null, { status: 304, headers: allHeaders });
+    if (contract.reply.form === 'none') {
+      await value();
+      return new Response(null, { status, headers: allHeaders });
+    }
     return new Response(write(await value()), {
-      status: 200,
+      status,
       headers: { 'Content-Type': mediaOf(contract.reply), ...allHeaders },
     });
+  }
+
+  async function given(call: Call<P, Q, B>): Promise<Answer<Value<R>>> {
+    const made = await handler(call);
+    return made instanceof Answer ? made : new Answer<Value<R>>({ value: () => made });
   }
 
   async function served(request: Request, segments?: Segments): Promise<Response> {
@@ -75,7 +115,7 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
       response = await answer(request, requestId, segments);
     } catch (error) {
       if (!(error instanceof AppError)) log.error({ err: error, requestId, call: contract.id }, 'our own mistake');
-      response = problemResponse(error, { request, requestId, faultsIn });
+      response = problemResponse(error, { request, requestId, faultsIn, call: contract });
     }
     log.info(
       { requestId, call: contract.id, status: response.status, ms: Math.round((performance.now() - begun) * 10) / 10 },
@@ -87,15 +127,21 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
   return Object.assign(served, { contract: contract as Contract });
 }
 
+/** Whose idempotency key it is. */
+function ownerOf(actor: Actor): string {
+  return actor.kind === 'key' ? actor.keyId : actor.kind === 'person' ? actor.userId : 'visitor';
+}
+
 /** How a reply's value becomes a body, checked on the way. Made once a route. */
 function bodyWriter(reply: Reply): (value: unknown) => BodyInit {
-  if (reply.form !== 'json' && reply.form !== 'lines') return (value) => value as BodyInit;
+  if (!('schema' in reply)) return (value) => value as BodyInit;
   const text = replyText(reply, env.isProduction);
+  if (reply.form === 'events') return (value) => eventStream(value as AsyncIterable<unknown>, text);
   if (reply.form === 'lines') return (value) => lineStream(value as AsyncIterable<unknown>, text);
   return (value) => (value instanceof Written ? (value.bytes as BodyInit) : text(value));
 }
 
 /** Text types say their encoding; JSON has only one (RFC 8259, 8.1). */
-function mediaOf(reply: Reply): string {
+function mediaOf(reply: Exclude<Reply, NoReply>): string {
   return reply.form === 'text' ? `${reply.media}; charset=utf-8` : reply.media;
 }

@@ -3,9 +3,31 @@ import type { Contract } from '../contract';
 import { createReadings } from './batch';
 import { getDocument, getIndex, getProblem } from './document';
 import { getHealth } from './health';
+import { cancelJob, createJob, getJob, listJobItems, listJobs, retryJob, watchJob } from './jobs';
+import { createKey, getUsage, listKeys, revokeKey } from './keys';
 import { getPlatePng, getPlateSvg } from './plates';
+import {
+  changePosition,
+  createPosition,
+  deletePosition,
+  getPosition,
+  listPositions,
+  restorePosition,
+} from './positions';
 import { createReading, getReading } from './readings';
+import { studyRoutes } from './results';
 import { createRouteCheck, createRoutes } from './routes';
+import {
+  changeStudy,
+  createStudy,
+  deleteStudy,
+  getShares,
+  getStudy,
+  listChanges,
+  listStudies,
+  putShares,
+  restoreStudy,
+} from './studies';
 
 export const contracts = {
   createReading,
@@ -15,6 +37,38 @@ export const contracts = {
   createRouteCheck,
   getPlateSvg,
   getPlatePng,
+  listStudies,
+  createStudy,
+  getStudy,
+  changeStudy,
+  deleteStudy,
+  restoreStudy,
+  listChanges,
+  getShares,
+  putShares,
+  listPositions,
+  createPosition,
+  getPosition,
+  changePosition,
+  deletePosition,
+  restorePosition,
+  listStudyRoutes: studyRoutes.list,
+  createStudyRoute: studyRoutes.create,
+  getStudyRoute: studyRoutes.get,
+  changeStudyRoute: studyRoutes.change,
+  deleteStudyRoute: studyRoutes.remove,
+  restoreStudyRoute: studyRoutes.restore,
+  listJobs,
+  createJob,
+  getJob,
+  watchJob,
+  listJobItems,
+  cancelJob,
+  retryJob,
+  listKeys,
+  createKey,
+  revokeKey,
+  getUsage,
   getIndex,
   getDocument,
   getProblem,

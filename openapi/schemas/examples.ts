@@ -5,3 +5,13 @@ export const EXAMPLE_FEN = 'r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4R
 
 /** A pawn ending, as teachers draw it. */
 export const EXAMPLE_ENDING = '8/5ppp/4k3/3p4/3P1K2/4P3/5PPP/8 w - - 0 1';
+
+/** Ids that the examples of stored things use. */
+export const EXAMPLE_IDS = {
+  study: '00000000-0000-4000-8000-0000000000a1',
+  position: '00000000-0000-4000-8000-0000000000b1',
+  key: '00000000-0000-4000-8000-0000000000c1',
+  result: '00000000-0000-4000-8000-0000000000d1',
+  game: '00000000-0000-4000-8000-0000000000e1',
+  job: '00000000-0000-4000-8000-0000000000f1',
+} as const;

@@ -22,6 +22,16 @@ export const PROBLEMS = {
     title: 'The body is not JSON.',
     fix: 'Send one JSON value in UTF-8.',
   },
+  'not-signed-in': {
+    status: 401,
+    title: 'This call needs a key that is good, or a person who is signed in.',
+    fix: 'Send the header "Authorization: Bearer <key>" with a key that is neither expired nor ended.',
+  },
+  'not-allowed': {
+    status: 403,
+    title: 'The key’s scopes, or the person’s role, do not allow this call.',
+    fix: 'Use a key with the scope that the call names, or ask an owner of the workspace.',
+  },
   'not-found': {
     status: 404,
     title: 'There is nothing at this address.',
@@ -31,6 +41,21 @@ export const PROBLEMS = {
     status: 405,
     title: 'This address does not take this method.',
     fix: 'Use one of the methods named in the Allow header.',
+  },
+  conflict: {
+    status: 409,
+    title: 'What is there already does not go with the request.',
+    fix: 'Read what is there, and send a request that fits it.',
+  },
+  'idempotency-busy': {
+    status: 409,
+    title: 'The first request with this Idempotency-Key is still at work.',
+    fix: 'Send the same request again in a moment.',
+  },
+  'version-lost': {
+    status: 412,
+    title: 'Somebody else has changed this first.',
+    fix: 'Read it again, and send your change with the new ETag in If-Match.',
   },
   'body-too-large': {
     status: 413,
@@ -51,6 +76,26 @@ export const PROBLEMS = {
     status: 422,
     title: 'The FEN is not a position that can be read.',
     fix: 'Mend the FEN fields listed in "faults", or send "mode": "diagram" to read what teachers draw.',
+  },
+  'pgn-refused': {
+    status: 422,
+    title: 'The text holds no game that can be read.',
+    fix: 'Mend the places listed in "faults".',
+  },
+  'idempotency-mismatch': {
+    status: 422,
+    title: 'This Idempotency-Key was used with another request.',
+    fix: 'Use a new key for each new request.',
+  },
+  'version-needed': {
+    status: 428,
+    title: 'This call needs to know which version it changes.',
+    fix: 'Send the header If-Match with the ETag that reading it gave you.',
+  },
+  'too-many-requests': {
+    status: 429,
+    title: 'The allowance is used up for now.',
+    fix: 'Wait as many seconds as the Retry-After header says.',
   },
   internal: {
     status: 500,

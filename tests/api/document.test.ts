@@ -1,13 +1,17 @@
 /** The OpenAPI document: valid, fresh, and its examples work. */
 import { readFileSync } from 'node:fs';
 import { compileErrors, validate } from '@readme/openapi-parser';
-import { describe, expect, it } from 'vitest';
+import { afterAll, describe, expect, it } from 'vitest';
 import { contractList } from '@/openapi/contracts';
 import { apiDocument } from '@/openapi/document';
 import { generatedFiles } from '@/openapi/generate';
+import { exampleWorld, renewed } from '@/tests/support/example-world';
 import { call, mediaOf, promisedJson, promisedLines } from './caller';
 
-describe('the OpenAPI document', () => {
+describe('the OpenAPI document', async () => {
+  const example = await exampleWorld();
+  afterAll(() => example.close());
+
   it('is valid OpenAPI 3.1', async () => {
     const copy = JSON.parse(JSON.stringify(apiDocument()));
     const result = await validate(copy);
@@ -43,9 +47,12 @@ describe('the OpenAPI document', () => {
   it.each(contractList.map((contract) => [contract.id, contract] as const))(
     'the example of %s is answered as promised',
     async (_, contract) => {
-      const response = await call(contract, contract.example);
-      expect(response.status).toBe(200);
-      expect(mediaOf(response)).toBe(contract.reply.media);
+      const response = await call(contract, {
+        ...contract.example,
+        headers: await (await renewed(example)).headersFor(contract),
+      });
+      expect(response.status, await response.clone().text()).toBe(contract.status ?? 200);
+      if (contract.reply.form !== 'none') expect(mediaOf(response)).toBe(contract.reply.media);
       if (contract.reply.form === 'json') await promisedJson(contract, response);
       if (contract.reply.form === 'lines') expect(await promisedLines(contract, response)).toHaveLength(3);
     },
