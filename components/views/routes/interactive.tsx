@@ -74,7 +74,7 @@ export function InteractiveRoutes({ address, first }: { readonly address: Routes
       />
       <div
         aria-busy={isLate}
-        className="mt-5 grid gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,11fr)_minmax(0,10fr)] print:block"
+        className="mt-5 grid grid-cols-[minmax(0,1fr)] gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,11fr)_minmax(0,10fr)] print:block"
       >
         <div>
           <div ref={plateFrame}>

@@ -12,7 +12,7 @@ export function Way({ choice, side }: { readonly choice: RankedChoice; readonly 
   return (
     <section aria-label="The way" className="double-rule-top mt-8 pt-6">
       <h2 className="border-b border-rule pb-2">{`The way: ${kind} ${man} to ${post}`}</h2>
-      <div className="grid gap-x-12 lg:grid-cols-[minmax(0,11fr)_minmax(0,10fr)]">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-x-12 lg:grid-cols-[minmax(0,11fr)_minmax(0,10fr)]">
         <div>
           <p className="max-w-170 py-3">{text}</p>
           <Stops steps={steps} />
