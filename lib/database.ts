@@ -56,6 +56,10 @@ export function databaseFolder(): string {
 async function openMigrated(): Promise<Database> {
   if (env.isBuilding)
     throw new Error('A page asks for the database while it is built: it must be drawn at each request.');
+  if (env.databaseUrl !== undefined && !/^postgres(ql)?:\/\//.test(env.databaseUrl)) {
+    // Not repeated: it may hold a password.
+    throw new Error('DATABASE_URL is not the address of a PostgreSQL server: it begins with postgresql://');
+  }
   const database = await openDatabase({
     url: env.databaseUrl,
     folder: databaseFolder(),
