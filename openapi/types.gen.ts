@@ -2228,14 +2228,16 @@ export interface operations {
                  * @description What is drawn over the board.
                  * @example command
                  */
-                readonly layer?: "position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility";
+                readonly layer?: "position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes";
                 /** @description Width of the whole figure in pixels. */
                 readonly width?: number;
                 readonly theme?: "light" | "dark" | "print";
                 /** @description The side at the foot of the board. */
                 readonly side?: components["schemas"]["Side"];
-                /** @description For the layer "mobility": the square of the man. */
+                /** @description For the layers "mobility" and "routes": the square of the man. Routes without one show the way that helps the side to move most. */
                 readonly man?: components["schemas"]["Square"];
+                /** @description For the layer "routes": where the man is to stand. Left out: the post that helps most. */
+                readonly post?: components["schemas"]["Square"];
                 /** @description A line of text under the board, instead of the one from the reading. */
                 readonly caption?: string;
                 /** @description The leading statements: in the margin where there is room, as numbers with a list below, or not at all. */
@@ -2349,7 +2351,7 @@ export interface operations {
                  * @description What is drawn over the board.
                  * @example command
                  */
-                readonly layer?: "position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility";
+                readonly layer?: "position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes";
                 /**
                  * @description Width of the whole figure in pixels.
                  * @example 480
@@ -2358,8 +2360,10 @@ export interface operations {
                 readonly theme?: "light" | "dark" | "print";
                 /** @description The side at the foot of the board. */
                 readonly side?: components["schemas"]["Side"];
-                /** @description For the layer "mobility": the square of the man. */
+                /** @description For the layers "mobility" and "routes": the square of the man. Routes without one show the way that helps the side to move most. */
                 readonly man?: components["schemas"]["Square"];
+                /** @description For the layer "routes": where the man is to stand. Left out: the post that helps most. */
+                readonly post?: components["schemas"]["Square"];
                 /** @description A line of text under the board, instead of the one from the reading. */
                 readonly caption?: string;
                 /** @description The leading statements: in the margin where there is room, as numbers with a list below, or not at all. */

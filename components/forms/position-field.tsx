@@ -50,7 +50,7 @@ export function PositionField(props: PositionFieldProps) {
           ))}
           <button
             type="submit"
-            className="h-11 shrink-0 cursor-pointer rounded-sm bg-ink px-5 font-bold text-paper hover:underline"
+            className="h-11 shrink-0 cursor-pointer rounded-sm bg-ink px-5 font-bold text-paper hover:underline print:hidden"
           >
             {verb}
           </button>

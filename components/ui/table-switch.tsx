@@ -15,8 +15,8 @@ export interface TableSwitchProps {
 export function TableSwitch({ caption, heads, rows, children }: TableSwitchProps) {
   return (
     <div className="mt-3">
-      <details className="group">
-        <summary className="underlined inline-flex min-h-11 cursor-pointer items-center text-[14px]">
+      <details className="group print:[&:not([open])]:hidden">
+        <summary className="underlined inline-flex print:hidden min-h-11 cursor-pointer items-center text-[14px]">
           <span className="group-open:hidden">Show as a table</span>
           <span className="hidden group-open:inline">Hide the table</span>
         </summary>

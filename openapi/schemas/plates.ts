@@ -3,7 +3,16 @@ import { z } from 'zod';
 import { sideSchema, squareSchema } from '../../engine/reading/schema';
 import { fenSchema, modeSchema } from './ids';
 
-export const plateLayers = ['position', 'control', 'command', 'weak', 'outposts', 'files', 'mobility'] as const;
+export const plateLayers = [
+  'position',
+  'control',
+  'command',
+  'weak',
+  'outposts',
+  'files',
+  'mobility',
+  'routes',
+] as const;
 export const plateNotes = ['margin', 'numbers', 'none'] as const;
 export const plateThemes = ['light', 'dark', 'print'] as const;
 
@@ -28,7 +37,14 @@ const plateQueryShape = {
     .describe('Width of the whole figure in pixels.'),
   theme: z.enum(plateThemes).default('light'),
   side: sideSchema.default('white').describe('The side at the foot of the board.'),
-  man: squareSchema.optional().describe('For the layer "mobility": the square of the man.'),
+  man: squareSchema
+    .optional()
+    .describe(
+      'For the layers "mobility" and "routes": the square of the man. Routes without one show the way that helps the side to move most.',
+    ),
+  post: squareSchema
+    .optional()
+    .describe('For the layer "routes": where the man is to stand. Left out: the post that helps most.'),
   caption: z
     .string()
     .max(plateCaptionMax)

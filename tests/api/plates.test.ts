@@ -31,7 +31,7 @@ function isNoXml(code: number): boolean {
 
 describe('plates', () => {
   it('are offered with every layer and theme that can be drawn', () => {
-    expect(plateLayers).toEqual(LAYERS);
+    expect(plateLayers).toEqual([...LAYERS, 'routes']);
     expect(plateThemes).toEqual(THEMES);
   });
 
@@ -40,6 +40,15 @@ describe('plates', () => {
     expect(svg).toMatch(/^<svg [^>]*xmlns="http:\/\/www\.w3\.org\/2000\/svg"/);
     expect(svg.trimEnd()).toMatch(/<\/svg>$/);
     expect(svg).not.toMatch(/NaN|undefined|\[object/);
+  });
+
+  it('draw the way of a man to a post, and say so; refuse a post that it does not reach', async () => {
+    const svg = await svgOf({ layer: 'routes', man: 'f3', post: 'b3' });
+    expect(svg).toContain('The knight from f3 to b3 in 2 moves by d2');
+    expect(svg).not.toBe(await svgOf({ layer: 'routes', man: 'f3' }));
+    const refused = await call(getPlateSvg, { query: { fen, layer: 'routes', man: 'f3', post: 'a8' } });
+    expect(refused.status).toBe(422);
+    expect(await refused.json()).toMatchObject({ faults: [{ path: '/post', code: 'no-way' }] });
   });
 
   it('differ by layer, theme, side, caption and notes', async () => {

@@ -138,16 +138,19 @@ test('plate and chart come as SVG, the table as CSV', async ({ page }) => {
   const screen = new RoutesScreen(page);
   await screen.open(`${KNIGHT}&post=f3-g3`);
   await expect(screen.board).toBeVisible();
-  const saved = async (name: string): Promise<string> => {
+  const saved = async (name: string, role: 'button' | 'link' = 'button'): Promise<string> => {
     const download = page.waitForEvent('download');
-    await page.getByRole('button', { name }).click();
+    await page.getByRole(role, { name }).click();
     return readFile(await (await download).path(), 'utf8');
   };
-  expect(await saved('Save the plate as SVG')).toContain('The knight from f3 to g3 in 3 moves by d2, f1');
+  expect(await saved('Save the plate as SVG', 'link')).toContain('The knight from f3 to g3 in 3 moves by d2, f1');
   expect(await saved('Save the chart as SVG')).toContain('Posts of the knight on f3');
   const csv = await saved('Save the chart as CSV');
   expect(csv.split('\r\n')[0]).toBe('Rank,Man,Post,Way,Count,Now,There,Difference,Weight,Adds,Sum');
   expect(csv).toContain('knight f3,g3,"3 moves by d2, f1"');
+  await screen.check('d2 b3 c5');
+  await expect(screen.own.getByText('The step to c5 fails.')).toBeVisible();
+  expect(await saved('Save the plate as SVG')).toContain('A route of the knight: f3, d2, b3, c5, which fails');
 });
 
 test('the header leads here and says where one is', async ({ page }) => {

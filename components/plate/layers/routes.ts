@@ -1,7 +1,7 @@
 /** Routes as dotted trails with numbered stops: dots where safe, broken where not, other ways in lighter ink. */
-import type { Side, SquareName } from '@/engine/types';
+import type { Kind, Side, SquareName } from '@/engine/types';
 import { cornerOf, n } from '../place';
-import type { BoardPlace, LegendItem, Mark, Paint } from '../types';
+import type { BoardPlace, LegendItem, Mark, Paint, PlateExtra } from '../types';
 
 /** One way over the board. */
 export interface Trail {
@@ -16,6 +16,36 @@ export interface TrailStop {
   readonly square: SquareName;
   /** The step is safe and possible. */
   readonly fine: boolean;
+}
+
+/** A way of one man as the engine's answer has it. */
+export interface WayOfMan {
+  readonly man: SquareName;
+  readonly kind: Kind;
+  readonly post: SquareName;
+  readonly stops: readonly SquareName[];
+}
+
+/** The trail of a way all of whose stops are safe, and those of other ways to the same post. */
+export function wayTrails(
+  side: Side,
+  { man, stops }: Pick<WayOfMan, 'man' | 'stops'>,
+  others: readonly (readonly SquareName[])[],
+): Trail[] {
+  const trail = (way: readonly SquareName[], rank: Trail['rank']): Trail => ({
+    side,
+    from: man,
+    stops: way.map((square) => ({ square, fine: true })),
+    rank,
+  });
+  return [trail(stops, 'shown'), ...others.map((way) => trail(way, 'other'))];
+}
+
+/** A way in a line: 'The knight from f3 to g3 in 3 moves by d2, f1'. */
+export function wayTitle({ man, kind, post, stops }: WayOfMan): string {
+  const via = stops.slice(0, -1).join(', ');
+  const moves = stops.length === 1 ? '1 move' : `${stops.length} moves`;
+  return `The ${kind} from ${man} to ${post} in ${moves}${via ? ` by ${via}` : ''}`;
 }
 
 /** Radius of a stop in sides of a square. */
@@ -141,6 +171,11 @@ export function trailLegend(trails: readonly Trail[]): LegendItem[] {
   if (trails.some(({ rank }) => rank === 'other'))
     items.push({ label: 'another way', marks: [line('hair', 1.8, true)] });
   return items;
+}
+
+/** The trails as what a plate shows besides its layer; `words` say them for the alt text. */
+export function trailExtra(trails: readonly Trail[], words: string): PlateExtra {
+  return { over: (board) => trailMarks(trails, board), legend: trailLegend(trails), alt: `${words}.` };
 }
 
 function stopLook(trail: Trail): { paint: Paint; last: boolean; thin: boolean; fine: boolean } {

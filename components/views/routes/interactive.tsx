@@ -5,6 +5,7 @@ import { useMemo, useReducer } from 'react';
 import { PositionField } from '@/components/forms/position-field';
 import { useWorker } from '@/components/ui/use-worker';
 import { useAddress, useWidth } from '../reading/use-page';
+import { useChosenInView } from '@/components/ui/use-chosen-in-view';
 import { type RoutesAddress, routesHref } from './address';
 import type { Answer, Ask, RankedChoice } from './ask';
 import { openedFirst } from './first-position';
@@ -49,6 +50,7 @@ export function InteractiveRoutes({ address, first }: { readonly address: Routes
   const labels = useMemo(() => routeLabels(answer, choice), [answer, choice]);
   const here = routesAddressOf(state);
   useAddress(routesHref(here));
+  const men = useChosenInView(man);
   return (
     <>
       <div className="lg:-mt-[86px] lg:ml-auto lg:w-[50%]">
@@ -67,6 +69,7 @@ export function InteractiveRoutes({ address, first }: { readonly address: Routes
       </div>
       <MenList
         side={side}
+        frame={men}
         men={answer.men}
         chosen={man}
         hrefOf={(next) => routesHref(here, { man: next, of: side, post: null, route: '' })}
@@ -95,6 +98,7 @@ export function InteractiveRoutes({ address, first }: { readonly address: Routes
             address={here}
             side={side}
             act={act}
+            way={check === null && choice ? { man: choice.man, post: choice.post } : null}
             drawing={() => routesPlate({ answer, choice, man, flipped, width: 720, below: 'drawn', id: 'f' })}
           />
           <OwnRoute

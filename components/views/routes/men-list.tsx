@@ -1,4 +1,5 @@
 /** The men of a side in the order of what helps most, on a rule, the chosen one under our small pennant. */
+import type { RefObject } from 'react';
 import { jsxOf, PAGE_PALETTE } from '@/components/plate/draw-jsx';
 import { elementOf } from '@/components/plate/element';
 import { manMarks } from '@/components/plate/men';
@@ -7,6 +8,8 @@ import type { ManRow } from './ask';
 import { manText, SIDE_NAMES } from './words';
 
 export interface MenListProps {
+  /** The list itself, which scrolls sideways where it is too long. */
+  readonly frame: RefObject<HTMLElement | null>;
   readonly side: Side;
   readonly men: readonly ManRow[];
   readonly chosen: SquareName | null;
@@ -15,7 +18,7 @@ export interface MenListProps {
 }
 
 /** Links, so that it works without scripts; the first one asks the whole side. */
-export function MenList({ side, men, chosen, hrefOf, onChoose }: MenListProps) {
+export function MenList({ frame, side, men, chosen, hrefOf, onChoose }: MenListProps) {
   const items = [
     { square: null, name: 'All men', text: `${SIDE_NAMES[side]}’s best posts`, kind: null },
     ...men.map((row) => ({
@@ -26,7 +29,7 @@ export function MenList({ side, men, chosen, hrefOf, onChoose }: MenListProps) {
     })),
   ];
   return (
-    <nav aria-label="Man" className="-mx-3 mt-6 overflow-x-auto px-3 print:hidden">
+    <nav ref={frame} aria-label="Man" className="-mx-3 mt-6 overflow-x-auto px-3 print:hidden">
       <ul className="flex w-max min-w-full border-b border-ink">
         {items.map(({ square, name, text, kind }, index) => {
           const isChosen = square === chosen;

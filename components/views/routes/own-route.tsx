@@ -17,11 +17,11 @@ const BUTTON = 'underlined min-h-11 cursor-pointer text-[14px]';
 
 export function OwnRoute({ typed, man, check, fault, hidden, act, onBack }: OwnRouteProps) {
   return (
-    <section aria-label="A route of your own" className="mt-5">
+    <section aria-label="A route of your own" className={`mt-5 ${check === null ? 'print:hidden' : ''}`}>
       <h2 className="border-b border-rule pb-2">A route of your own</h2>
       <form
         action="/routes"
-        className="pt-3"
+        className="pt-3 print:hidden"
         onSubmit={(event) => {
           event.preventDefault();
           act({ type: 'route-read' });

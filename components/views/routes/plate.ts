@@ -1,10 +1,10 @@
 /** The plate of the routes page: the men, the chosen way as a trail, others in lighter ink, and a route of one's own. */
-import { trailLegend, trailMarks, type Trail } from '@/components/plate/layers/routes';
+import { type Trail, trailExtra, wayTitle, wayTrails } from '@/components/plate/layers/routes';
 import { plateOf } from '@/components/plate/layout';
 import type { Plate } from '@/components/plate/types';
 import type { SquareName } from '@/engine/types';
 import type { Answer, RankedChoice } from './ask';
-import { movesText, SIDE_NAMES } from './words';
+import { SIDE_NAMES } from './words';
 
 export interface RoutesPlateRequest {
   readonly answer: Answer;
@@ -20,19 +20,12 @@ export interface RoutesPlateRequest {
 
 /** The ways that the plate shows. A route of one's own sets the chosen way back to lighter ink. */
 export function trailsOf({ check, side }: Answer, choice: RankedChoice | undefined): Trail[] {
-  const trails: Trail[] = [];
-  const fine = (stops: readonly SquareName[]) => stops.map((square) => ({ square, fine: true }));
-  if (choice && check === null) {
-    trails.push({ side, from: choice.man, stops: fine(choice.stops), rank: 'shown' });
-    for (const stops of choice.others) trails.push({ side, from: choice.man, stops: fine(stops), rank: 'other' });
-  }
-  if (check) {
-    const stops = check.steps.map(({ to, code }) => ({ square: to, fine: code === 'fine' }));
-    trails.push({ side: check.side, from: check.man, stops, rank: 'own' });
-    if (choice && choice.man === check.man)
-      trails.push({ side, from: choice.man, stops: fine(choice.stops), rank: 'other' });
-  }
-  return trails;
+  if (check === null) return choice ? wayTrails(side, choice, choice.others) : [];
+  const stops = check.steps.map(({ to, code }) => ({ square: to, fine: code === 'fine' }));
+  const own: Trail = { side: check.side, from: check.man, stops, rank: 'own' };
+  if (choice?.man !== check.man) return [own];
+  const [ranked] = wayTrails(side, choice, []);
+  return ranked ? [own, { ...ranked, rank: 'other' }] : [own];
 }
 
 /** The figure. */
@@ -58,7 +51,7 @@ export function routesPlate({ answer, choice, man, flipped, width, below, id }: 
           : `${mover} The enemy stands still on the way.`,
     },
     lit: shownMan === null ? [] : [shownMan],
-    extra: { over: (board) => trailMarks(trails, board), legend: trailLegend(trails), alt: `${words}.` },
+    extra: trailExtra(trails, words),
   });
 }
 
@@ -69,8 +62,7 @@ function trailWords({ check, side }: Answer, choice: RankedChoice | undefined): 
     return `A route of the ${check.kind}: ${squares}${check.holds ? '' : ', which fails'}`;
   }
   if (!choice) return `${SIDE_NAMES[side]}: no way to show`;
-  const via = choice.stops.slice(0, -1).join(', ');
-  return `The ${choice.kind} from ${choice.man} to ${choice.post} in ${movesText(choice.moves)}${via ? ` by ${via}` : ''}`;
+  return wayTitle(choice);
 }
 
 /** Names of all squares for a reader: what stands there, and which stop it is. */

@@ -5,7 +5,9 @@ import { AppError } from '@/lib/errors';
 import { type PlateOptions, plateSvg } from '@/lib/figures/plate';
 import { pngOf } from '@/lib/figures/png';
 import type { PlateQuery } from '@/openapi/schemas/plates';
+import type { RouteChoice } from '@/engine/reading/schema/routes';
 import { fullReading } from '../readings/full-reading';
+import { findRoutes } from '../routes/find-routes';
 
 /** The figure as SVG text. Throws `fen-refused`, or `invalid-request` for a man that is not there. */
 export async function drawPlateSvg(_ctx: Context, query: PlateQuery): Promise<string> {
@@ -32,7 +34,21 @@ function optionsOf(reading: Reading, query: PlateQuery): PlateOptions {
     flipped: side === 'black',
     man: man ?? null,
     caption: caption === undefined ? null : { title: caption },
+    ...(layer === 'routes' && { way: wayOf(reading, query) }),
   };
+}
+
+/** How far and how widely ways are looked for: every post within four moves. */
+const WAY_BOUNDS = { movesMax: 4, choicesMax: 96 };
+
+/** The way asked for, or the one that helps most. Throws `invalid-request` for a post that the man does not reach. */
+function wayOf({ fen }: Reading, { man, post, mode }: PlateQuery): RouteChoice | null {
+  const { choices } = findRoutes({ fen, man, ...WAY_BOUNDS }, mode);
+  if (post === undefined) return choices[0] ?? null;
+  const way = choices.find((choice) => choice.post === post);
+  if (way) return way;
+  const message = `There is no safe way to ${post} within four moves${man === undefined ? '' : ` from ${man}`}.`;
+  throw new AppError('invalid-request', message, { faults: [{ path: '/post', code: 'no-way', message }] });
 }
 
 function manRefused(code: string, message: string): AppError {

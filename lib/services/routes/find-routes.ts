@@ -4,11 +4,15 @@ import { manOn } from '@/engine/board';
 import type { RoutesAnswer } from '@/engine/reading/schema/routes';
 import { AppError } from '@/lib/errors';
 import { positionOf } from '@/lib/services/readings/position';
+import type { Mode } from '@/openapi/schemas/ids';
 import type { RoutesRequest } from '@/openapi/schemas/routes';
 
-/** Computes the answer in place. Throws `fen-refused`, or `invalid-request` where the named square holds no such piece. */
-export function findRoutes({ fen, man, side, movesMax, choicesMax }: RoutesRequest): RoutesAnswer {
-  const position = positionOf(fen);
+/**
+ * Computes the answer in place, of a diagram where `mode` admits one. Throws `fen-refused`, or `invalid-request` where
+ * the named square holds no such piece.
+ */
+export function findRoutes({ fen, man, side, movesMax, choicesMax }: RoutesRequest, mode?: Mode): RoutesAnswer {
+  const position = positionOf(fen, '/fen', mode);
   const from = man === undefined ? undefined : pieceOn(position, man, side);
   const found = routes(position, {
     movesMax,
