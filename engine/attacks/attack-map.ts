@@ -13,14 +13,15 @@ import {
   KNIGHT,
   KNIGHT_LEAPS,
   LEAP_ROW,
-  OPPOSITE,
   PAWN,
+  PAWN_STRIKES,
   type Position,
   QUEEN,
   RAY_ROW,
   RAYS,
   ROOK,
   STRIDES,
+  STRIKE_ROW,
 } from '../board';
 
 /** Sides as numbers: 0 White, 1 Black. */
@@ -38,6 +39,12 @@ export interface AttackMap {
   readonly numbers: Int8Array;
   /** Mask of the men of a side that attack a square: entry (side << 6 | square). */
   readonly attackers: Int32Array;
+  /** Squares that a man attacks, as two words: entry ((side << 5 | number) << 1 | word). */
+  readonly sights: Int32Array;
+  /** Squares that a side attacks, as two words: entry (side << 1 | word). */
+  readonly control: Int32Array;
+  /** Squares of a side's men, as two words: entry (side << 1 | word). */
+  readonly men: Int32Array;
   /** King's square of each side, -1 in diagrams without one. */
   readonly kings: Int8Array;
   /** Mask of each side's absolutely pinned men, see `pinnedMask`. */
@@ -58,10 +65,13 @@ export function newAttackMap(): AttackMap {
     squares: new Uint8Array(64),
     numbers: new Int8Array(64),
     attackers: new Int32Array(128),
+    sights: new Int32Array(128),
+    control: new Int32Array(4),
+    men: new Int32Array(4),
     kings: new Int8Array(2),
     pinned: new Int32Array(2),
     pinsKnown: false,
-    lines: new Int8Array(512),
+    lines: new Int8Array(512).fill(-1),
     lined: false,
   };
 }
@@ -93,12 +103,20 @@ function fillAttackers(map: AttackMap): void {
   fillSide(map, 8);
 }
 
+/** The set that the marking of one man fills: what it attacks. Scratch. */
+const sight = new Int32Array(2);
+
 /** `white` is 0, `black` 8: what is added to a kind's place to give the code. */
-function fillSide({ board, counts, squares, numbers, attackers, kings }: AttackMap, sideCode: number): void {
+function fillSide(map: AttackMap, sideCode: number): void {
+  const { board, counts, squares, numbers, attackers, kings, sights, control, men } = map;
   const side = sideCode >> 3;
   const offset = side << 6;
   const row = side << 5;
   let number = 0;
+  let controlLow = 0;
+  let controlHigh = 0;
+  men[side << 1] = 0;
+  men[(side << 1) | 1] = 0;
   for (let kind = PAWN; kind <= KING; kind++) {
     const code = sideCode | kind;
     const end = tally[code]!;
@@ -106,31 +124,39 @@ function fillSide({ board, counts, squares, numbers, attackers, kings }: AttackM
       const from = buckets[(code << 6) | i]!;
       numbers[from] = number;
       squares[row | number] = from;
+      men[(side << 1) | (from >> 5)]! |= 1 << (from & 31);
+      const man = row | number;
       const bit = 1 << number++;
-      if (kind === PAWN) markPawn(attackers, offset, from, bit);
-      else if (kind === KNIGHT) markLeaps(attackers, offset, KNIGHT_LEAPS, from, bit);
-      else if (kind === KING) markLeaps(attackers, offset, KING_STEPS, from, bit);
+      sight[0] = 0;
+      sight[1] = 0;
+      if (kind === PAWN) markLeaps(attackers, offset, PAWN_STRIKES, (offset | from) * STRIKE_ROW, bit);
+      else if (kind === KNIGHT) markLeaps(attackers, offset, KNIGHT_LEAPS, from * LEAP_ROW, bit);
+      else if (kind === KING) markLeaps(attackers, offset, KING_STEPS, from * LEAP_ROW, bit);
       else {
         if (kind !== BISHOP) markLines(attackers, board, offset, from, bit, 0);
         if (kind !== ROOK) markLines(attackers, board, offset, from, bit, 4);
       }
+      const low = sight[0];
+      const high = sight[1];
+      sights[man << 1] = low;
+      sights[(man << 1) | 1] = high;
+      controlLow |= low;
+      controlHigh |= high;
     }
   }
+  control[side << 1] = controlLow;
+  control[(side << 1) | 1] = controlHigh;
   counts[side] = number;
   const kingCode = sideCode | KING;
   kings[side] = tally[kingCode]! > 0 ? buckets[kingCode << 6]! : -1;
 }
 
-function markPawn(attackers: Int32Array, offset: number, from: number, bit: number): void {
-  const ahead = offset === 0 ? from + 8 : from - 8;
-  if (ahead < 0 || ahead > 63) return;
-  const file = from & 7;
-  if (file > 0) attackers[offset | (ahead - 1)]! |= bit;
-  if (file < 7) attackers[offset | (ahead + 1)]! |= bit;
-}
-
-function markLeaps(attackers: Int32Array, offset: number, leaps: Readonly<Int8Array>, from: number, bit: number): void {
-  for (let at = from * LEAP_ROW, to = leaps[at]!; to >= 0; to = leaps[++at]!) attackers[offset | to]! |= bit;
+/** Marks the squares of a row of leaps, which ends with -1. */
+function markLeaps(attackers: Int32Array, offset: number, leaps: Readonly<Int8Array>, row: number, bit: number): void {
+  for (let at = row, to = leaps[at]!; to >= 0; to = leaps[++at]!) {
+    attackers[offset | to]! |= bit;
+    sight[to >> 5]! |= 1 << (to & 31);
+  }
 }
 
 /** Marks the four lines of a rook (`first` 0) or bishop (`first` 4). */
@@ -148,32 +174,11 @@ function markLines(
     for (let to = from; to !== edge; ) {
       to += stride;
       attackers[offset | to]! |= bit;
+      sight[to >> 5]! |= 1 << (to & 31);
       if (board[to] !== 0) break;
     }
   }
 }
-
-/**
- * Squares in the order in which a direction's lines are filled: each line from its far end back, so that the last
- * man passed is the first man met. Row (direction << 6); a square that begins a line is marked by FRESH.
- */
-const FRESH = 64;
-const FILL_ORDER: Readonly<Uint8Array> = (() => {
-  const order = new Uint8Array(512);
-  for (let direction = 0; direction < 8; direction++) {
-    let at = direction << 6;
-    const back = OPPOSITE[direction]!;
-    for (let start = 0; start < 64; start++) {
-      if (EDGES[(start << 3) | direction] !== start) continue;
-      order[at++] = start | FRESH;
-      for (let square = start; square !== EDGES[(start << 3) | back]; ) {
-        square += STRIDES[back]!;
-        order[at++] = square;
-      }
-    }
-  }
-  return order;
-})();
 
 /** The table of first men in every direction, filled on first use: entry (square << 3 | direction), -1 where there is none. */
 export function firstMen(map: AttackMap): Readonly<Int8Array> {
@@ -181,36 +186,46 @@ export function firstMen(map: AttackMap): Readonly<Int8Array> {
   return map.lines;
 }
 
+/**
+ * Each square asks its neighbour: the man there is the first, or else the neighbour's own first man is. Squares at the end of
+ * a line keep the -1 that the table is made with.
+ */
 function fillLines(map: AttackMap): void {
   const { board, lines } = map;
-  for (let direction = 0; direction < 8; direction++) {
-    let first = -1;
-    for (let at = direction << 6, end = at + 64; at < end; at++) {
-      const entry = FILL_ORDER[at]!;
-      if (entry >= FRESH) first = -1;
-      const square = entry & 63;
-      lines[(square << 3) | direction] = first;
-      if (board[square] !== 0) first = square;
-    }
+  for (let square = 62; square >= 0; square--) {
+    const file = square & 7;
+    if (file < 7) lookOn(board, lines, square, 2, 1);
+    if (square > 55) continue;
+    lookOn(board, lines, square, 0, 8);
+    if (file < 7) lookOn(board, lines, square, 4, 9);
+    if (file > 0) lookOn(board, lines, square, 7, 7);
+  }
+  for (let square = 1; square < 64; square++) {
+    const file = square & 7;
+    if (file > 0) lookOn(board, lines, square, 3, -1);
+    if (square < 8) continue;
+    lookOn(board, lines, square, 1, -8);
+    if (file > 0) lookOn(board, lines, square, 5, -9);
+    if (file < 7) lookOn(board, lines, square, 6, -7);
   }
   map.lined = true;
+}
+
+function lookOn(
+  board: Readonly<Uint8Array>,
+  lines: Int8Array,
+  square: number,
+  direction: number,
+  stride: number,
+): void {
+  const next = square + stride;
+  lines[(square << 3) | direction] = board[next] !== 0 ? next : lines[(next << 3) | direction]!;
 }
 
 /** Whether a man's code moves along a direction of the rook (0 to 3) or bishop (4 to 7). */
 export function slidesAlong(code: number, direction: number): boolean {
   const kind = code & 7;
   return kind === QUEEN || kind === (direction < 4 ? ROOK : BISHOP);
-}
-
-/** First man met from a square in a direction by walking the board; -1 where there is none. */
-function walk(board: Readonly<Uint8Array>, from: number, direction: number): number {
-  const stride = STRIDES[direction]!;
-  const edge = EDGES[(from << 3) | direction]!;
-  for (let to = from; to !== edge; ) {
-    to += stride;
-    if (board[to] !== 0) return to;
-  }
-  return -1;
 }
 
 /** Mask of a side's absolutely pinned men, found on first use. */
@@ -220,15 +235,17 @@ export function pinnedMask(map: AttackMap, side: SideIndex): number {
   return map.pinned[side]!;
 }
 
-function fillPins({ board, kings, numbers, pinned }: AttackMap): void {
+function fillPins(map: AttackMap): void {
+  const { board, kings, numbers, pinned } = map;
+  const lines = firstMen(map);
   for (let side = 0; side < 2; side++) {
     const king = kings[side]!;
     let mask = 0;
     if (king >= 0) {
       for (let direction = 0; direction < 8; direction++) {
-        const front = walk(board, king, direction);
+        const front = lines[(king << 3) | direction]!;
         if (front < 0 || board[front]! >> 3 !== side) continue;
-        const pinner = walk(board, front, direction);
+        const pinner = lines[(front << 3) | direction]!;
         if (pinner < 0) continue;
         const code = board[pinner]!;
         if (code >> 3 !== side && slidesAlong(code, direction)) mask |= 1 << numbers[front]!;

@@ -185,6 +185,20 @@ function begin(from: AttackMap, square: number): void {
   gone[1] = 0;
 }
 
+/** The price of capturing where the side cannot capture at all. */
+export const NO_PRICE = 127;
+
+/**
+ * What the side pays, in pawns, for capturing on the square: the first capture's gain is the worth of the man taken less
+ * this, whatever stands there, since the captures that follow do not hang on it. NO_PRICE where it cannot capture.
+ */
+export function priceOn(attacks: AttackMap, side: SideIndex, square: number): number {
+  begin(attacks, square);
+  if (available[side] === 0) return NO_PRICE;
+  const gain = forced(side, 0);
+  return gain === NONE ? NO_PRICE : -gain;
+}
+
 /**
  * The exchange that the side begins by capturing what stands on the square, in pawns; the first capture
  * is made whatever it costs, so the figure can be negative. Null where the side cannot capture there:

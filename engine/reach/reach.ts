@@ -4,43 +4,53 @@
  *
  * Asked for knights, bishops, rooks and queens; kings and pawns have questions of their own.
  */
-import { pinnedMask, type SideIndex } from '../attacks';
-import { BISHOP, DIRECTION_TO, EDGES, KING, KNIGHT, KNIGHT_LEAPS, LEAP_ROW, PAWN, ROOK, STRIDES } from '../board';
-import { isSafeMove, type Safety } from '../exchange';
+import { type AttackMap, pinnedMask, type SideIndex } from '../attacks';
+import { BISHOP, DIRECTION_TO, KING, KNIGHT, lowestSquare, PAWN, RAY_WORDS, ROOK } from '../board';
+import { type Safety, safeAmong } from '../exchange';
 import type { Side, Square } from '../types';
+import { leapFrom, slideDiagonal, slideStraight, spread } from './spread';
+
+/** The tables of a reach, to be filled again and again. */
+export interface ReachTables {
+  /** Entry ((side << 5 | man's number) << 6 | square): moves needed, 0 where it stands, negative where not within `movesMax`. */
+  readonly moves: Int8Array;
+  /** Mask of the men of a side that need just so many moves to a square: entry ((side << 2 | moves) << 6 | square). */
+  readonly arrivals: Int32Array;
+  /** Squares that some piece of a side reaches, as two words: entry (side << 1 | word). */
+  readonly reached: Int32Array;
+}
 
 /** Moves to every square for every man. */
-export interface Reach {
+export interface Reach extends ReachTables {
   readonly safety: Safety;
   /** How far was looked, in own moves. */
   readonly movesMax: number;
-  /** Entry ((side << 5 | man's number) << 6 | square): moves needed, 0 where it stands, negative where not within `movesMax`. */
-  readonly moves: Int8Array;
-  /** Number of the first man of each side that is no pawn: men are numbered by worth. */
-  readonly firstPieces: readonly [number, number];
 }
 
 const UNKNOWN = -1;
-const UNSAFE = -2;
 
-/** The reach of all men of both sides within `movesMax` own moves; `into` gives the table to use again. */
-export function reachOf(safety: Safety, movesMax: number, into: Int8Array = new Int8Array(4096)): Reach {
-  const white = fillSide(safety, 0, movesMax, into);
-  const black = fillSide(safety, 1, movesMax, into);
-  return { safety, movesMax, moves: into, firstPieces: [white, black] };
+/** The most moves that `reachOf` looks ahead: what the entries of `arrivals` have room for. */
+export const REACH_MOVES_MAX = 3;
+
+/** Empty tables for `reachOf`. */
+export function newReachTables(): ReachTables {
+  return { moves: new Int8Array(4096), arrivals: new Int32Array(512), reached: new Int32Array(4) };
 }
 
-/** Fills the rows of a side's pieces; returns the number of its first one. */
-function fillSide(safety: Safety, side: SideIndex, movesMax: number, into: Int8Array): number {
-  const { map } = safety;
-  let first = 0;
-  for (let number = 0; number < map.counts[side]!; number++) {
-    const man = (side << 5) | number;
-    const place = map.board[map.squares[man]!]! & 7;
-    if (place === PAWN) first = number + 1;
-    else if (place !== KING) fillReach(safety, map.squares[man]!, movesMax, into, man << 6);
+/** The reach of all pieces of both sides within `movesMax` own moves, 3 at the most; `into` gives the tables to use again. */
+export function reachOf(safety: Safety, movesMax: number, into: ReachTables = newReachTables()): Reach {
+  into.arrivals.fill(0);
+  into.reached.fill(0);
+  const { counts, squares, board } = safety.map;
+  for (let side = 0; side < 2; side++) {
+    for (let number = counts[side]! - 1; number >= 0; number--) {
+      const man = (side << 5) | number;
+      const place = board[squares[man]!]! & 7;
+      if (place === PAWN) break;
+      if (place !== KING) search(safety, man, Math.min(movesMax, REACH_MOVES_MAX), into.moves, man << 6, into);
+    }
   }
-  return first;
+  return { safety, movesMax, moves: into.moves, arrivals: into.arrivals, reached: into.reached };
 }
 
 /** A man that can come, and how soon. */
@@ -52,94 +62,123 @@ export interface User {
 const NO_USERS: readonly User[] = [];
 
 /** Pieces of the side (king and pawns apart) that can come to stand safely on the square, soonest first, cheaper before dearer. */
-export function usersOf({ safety: { map }, moves, firstPieces }: Reach, side: Side, square: Square): readonly User[] {
+export function usersOf({ safety: { map }, arrivals, reached }: Reach, side: Side, square: Square): readonly User[] {
   const index = side === 'white' ? 0 : 1;
-  const row = index << 5;
-  let users: User[] | null = null;
-  for (let number = firstPieces[index]!; number < map.counts[index]!; number++) {
-    const needed = moves[((row | number) << 6) | square]!;
-    const from = map.squares[row | number]! as Square;
-    if (needed < 0 || (map.board[from]! & 7) === KING) continue;
-    if (users === null) users = [{ from, moves: needed }];
-    else users.push({ from, moves: needed });
+  if (((reached[(index << 1) | (square >> 5)]! >>> (square & 31)) & 1) === 0) return NO_USERS;
+  const users: User[] = [];
+  for (let moves = 0; moves <= REACH_MOVES_MAX; moves++) {
+    for (let rest = arrivals[(((index << 2) | moves) << 6) | square]!; rest !== 0; rest &= rest - 1) {
+      users.push({ from: map.squares[(index << 5) | lowestSquare(rest, 0)]! as Square, moves });
+    }
   }
-  if (users === null) return NO_USERS;
-  return users.length > 1 ? users.sort((a, b) => a.moves - b.moves) : users;
+  return users;
 }
-
-const frontier = new Uint8Array(64);
-/** Lines already swept through a square: one bit an axis (direction >> 1). */
-const swept = new Uint8Array(64);
-
-/** The search under way: whose reach it is, and where it is written. It lives here so that nothing is allocated. */
-const search = { from: 0, enemyRow: 0, moves: 0, offset: 0, end: 0, pinKing: -1, pinDirection: 0 };
 
 /**
- * Fills 64 entries of `out` from `offset` with the moves that the man on `from` needs: a search in breadth,
- * each square tested once, since the board is frozen and safety does not hang on the way taken.
+ * Fills 64 entries of `out` from `offset` with the moves that the man on `from` needs, -1 where more than `movesMax`
+ * (any number) are.
  */
 export function fillReach(safety: Safety, from: number, movesMax: number, out: Int8Array, offset: number): void {
+  const { board, numbers } = safety.map;
+  search(safety, ((board[from]! >> 3) << 5) | numbers[from]!, movesMax, out, offset, null);
+}
+
+/**
+ * A search in breadth, all squares of a move at once. Each square is tested once, since the board is frozen and safety
+ * does not hang on the way taken.
+ */
+function search(
+  safety: Safety,
+  man: number,
+  movesMax: number,
+  out: Int8Array,
+  offset: number,
+  tables: ReachTables | null,
+): void {
   const { map } = safety;
-  const side = (map.board[from]! >> 3) as SideIndex;
+  const { men, sights } = map;
+  const side = (man >> 5) as SideIndex;
+  const enemy = side ^ 1;
+  const from = map.squares[man]!;
   const place = map.board[from]! & 7;
+  const homeLow = from < 32 ? 1 << from : 0;
+  const homeHigh = from < 32 ? 0 : 1 << (from & 31);
+  const emptyLow = ~(men[0]! | men[2]!) | homeLow;
+  const emptyHigh = ~(men[1]! | men[3]!) | homeHigh;
+  fillAims(map, side, man);
+  let openLow = aims[0]! & ~homeLow;
+  let openHigh = aims[1]! & ~homeHigh;
   out.fill(UNKNOWN, offset, offset + 64);
-  swept.fill(0);
-  search.from = from;
-  search.enemyRow = (side ^ 1) << 6;
-  search.offset = offset;
-  search.pinKing = (pinnedMask(map, side) >>> map.numbers[from]!) & 1 ? map.kings[side]! : -1;
-  search.pinDirection = search.pinKing < 0 ? 0 : DIRECTION_TO[(search.pinKing << 6) | from]!;
-  out[offset + from] = isSafeMove(safety, from, from) ? 0 : UNSAFE;
-  frontier[0] = from;
-  search.end = 1;
-  let begin = 0;
-  for (search.moves = 1; search.moves <= movesMax && begin < search.end; search.moves++) {
-    for (const last = search.end; begin < last; begin++) {
-      const at = frontier[begin]!;
-      if (place === KNIGHT) leap(safety, at, out);
-      else slide(safety, at, out, place);
+  const home = safeAmong(safety, man, from >> 5, 1 << (from & 31));
+  if (home !== 0) record(out, offset, 0, from >> 5, home, man, tables);
+  let low = homeLow;
+  let high = homeHigh;
+  for (let moves = 1; moves <= movesMax && (low | high) !== 0; moves++) {
+    if (moves === 1) {
+      low = sights[man << 1]!;
+      high = sights[(man << 1) | 1]!;
+    } else {
+      step(place, low, high, emptyLow, emptyHigh);
+      low = spread.low;
+      high = spread.high;
     }
+    low &= openLow;
+    high &= openHigh;
+    openLow &= ~low;
+    openHigh &= ~high;
+    low = low === 0 ? 0 : safeAmong(safety, man, 0, low);
+    high = high === 0 ? 0 : safeAmong(safety, man, 1, high);
+    record(out, offset, moves, 0, low, man, tables);
+    record(out, offset, moves, 1, high, man, tables);
+    low &= ~men[enemy << 1]!;
+    high &= ~men[(enemy << 1) | 1]!;
   }
 }
 
-function leap(safety: Safety, at: number, out: Int8Array): void {
-  for (let row = at * LEAP_ROW, to = KNIGHT_LEAPS[row]!; to >= 0; to = KNIGHT_LEAPS[++row]!) {
-    if (out[search.offset + to] === UNKNOWN) visit(safety, to, out);
+/** Where a man may come to stand at all: not on its side's men, nor on a king; a pinned one keeps to its line. Two words. */
+const aims = new Int32Array(2);
+
+function fillAims(map: AttackMap, side: SideIndex, man: number): void {
+  const { men, kings, counts, squares, board } = map;
+  aims[0] = ~men[side << 1]!;
+  aims[1] = ~men[(side << 1) | 1]!;
+  // A diagram may have more than one king.
+  for (let number = counts[side ^ 1]! - 1; number >= 0; number--) {
+    const square = squares[((side ^ 1) << 5) | number]!;
+    if ((board[square]! & 7) !== KING) break;
+    aims[square >> 5]! &= ~(1 << (square & 31));
   }
+  if (((pinnedMask(map, side) >>> (man & 31)) & 1) === 0) return;
+  const king = kings[side]!;
+  const ray = (king << 3) | DIRECTION_TO[(king << 6) | map.squares[man]!]!;
+  aims[0] &= RAY_WORDS[ray << 1]!;
+  aims[1] &= RAY_WORDS[(ray << 1) | 1]!;
 }
 
-/** A line between two blockers is swept once, both ways, from the first square on it that is reached. */
-function slide(safety: Safety, at: number, out: Int8Array, place: number): void {
-  const { board } = safety.map;
-  const { from, offset } = search;
-  const last = place === ROOK ? 4 : 8;
-  for (let direction = place === BISHOP ? 4 : 0; direction < last; direction += 2) {
-    const axis = 1 << (direction >> 1);
-    if ((swept[at]! & axis) !== 0) continue;
-    for (let way = direction; way < direction + 2; way++) {
-      const stride = STRIDES[way]!;
-      const edge = EDGES[(at << 3) | way]!;
-      for (let to = at; to !== edge; ) {
-        to += stride;
-        if (out[offset + to] === UNKNOWN) visit(safety, to, out);
-        if (board[to] !== 0 && to !== from) break;
-        swept[to]! |= axis;
-      }
-    }
-  }
-}
-
-/** Tests a square on first sight; a safe empty one joins the frontier. */
-function visit(safety: Safety, to: number, out: Int8Array): void {
-  const { map } = safety;
-  const code = map.board[to]!;
-  if (code !== 0 && (code >> 3 !== search.enemyRow >> 6 || (code & 7) === KING)) return;
-  if (search.pinKing >= 0 && DIRECTION_TO[(search.pinKing << 6) | to] !== search.pinDirection) return;
-  const free = map.attackers[search.enemyRow | to] === 0 && safety.uncovers[search.from] === 0;
-  if (!free && !isSafeMove(safety, search.from, to)) {
-    out[search.offset + to] = UNSAFE;
+function step(place: number, low: number, high: number, emptyLow: number, emptyHigh: number): void {
+  if (place === KNIGHT) {
+    leapFrom(low, high);
     return;
   }
-  out[search.offset + to] = search.moves;
-  if (code === 0) frontier[search.end++] = to;
+  spread.low = 0;
+  spread.high = 0;
+  if (place !== BISHOP) slideStraight(low, high, emptyLow, emptyHigh);
+  if (place !== ROOK) slideDiagonal(low, high, emptyLow, emptyHigh);
+}
+
+function record(
+  out: Int8Array,
+  offset: number,
+  moves: number,
+  half: number,
+  squares: number,
+  man: number,
+  tables: ReachTables | null,
+): void {
+  for (let rest = squares; rest !== 0; rest &= rest - 1) {
+    const square = lowestSquare(rest, half);
+    out[offset + square] = moves;
+    if (tables) tables.arrivals[((((man >> 5) << 2) | moves) << 6) | square]! |= 1 << (man & 31);
+  }
+  if (tables) tables.reached[((man >> 5) << 1) | half]! |= squares;
 }

@@ -6,7 +6,7 @@ import type { ReadingValues } from '../explain';
 import { diagonalValues, fileValues, seventhRank } from '../files';
 import { bishopNotes, bishopValues, kingValue, manValues, safeMovesOf } from '../men';
 import { newPawnMap, pawnMap, pawnValues } from '../pawns';
-import { reachOf } from '../reach';
+import { newReachTables, reachOf } from '../reach';
 import { colourComplexes, newSquareTable, outposts, squareTable, squareTotals, weakSquares } from '../squares';
 import { nameStructure } from '../structures';
 import { bySide } from '../types';
@@ -20,7 +20,7 @@ export type Desk = ReturnType<typeof newDesk>;
 /** A fresh set of tables. */
 export function newDesk() {
   const map = newAttackMap();
-  return { map, safety: safetyOf(map), reach: new Int8Array(4096), pawns: newPawnMap(), table: newSquareTable() };
+  return { map, safety: safetyOf(map), reach: newReachTables(), pawns: newPawnMap(), table: newSquareTable() };
 }
 
 /**

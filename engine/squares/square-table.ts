@@ -1,6 +1,7 @@
 /** Every square at once: who commands it, what captures there would bring, and who stands behind. */
-import { type AttackMap, fillBehind, menOfMask, type SideIndex } from '../attacks';
-import { exchangeOn, isSafeHere, type Safety } from '../exchange';
+import { type AttackMap, fillBehind, menOfMask } from '../attacks';
+import { KING, KNIGHT } from '../board';
+import { NO_PRICE, priceOf, type Safety, worthOf } from '../exchange';
 import type { Side, Square } from '../types';
 
 /**
@@ -28,30 +29,31 @@ export function newSquareTable(): SquareTable {
   return { commands: new Uint8Array(64), exchanges: new Int8Array(128), behind: new Int32Array(128) };
 }
 
-const KNIGHT_PLACE = 2;
+/** Worth of a knight, by which command is tested. */
+const KNIGHT_WORTH = worthOf(KNIGHT);
 
 /** Fills the tables for one position. */
 export function squareTable(safety: Safety, into: SquareTable = newSquareTable()): SquareTable {
   const { map } = safety;
+  const { board, attackers } = map;
+  const { commands, exchanges } = into;
   fillBehind(map, into.behind);
   for (let square = 0; square < 64; square++) {
-    into.commands[square] = commandIndex(safety, square);
-    fillSide(map, into, 0, square);
-    fillSide(map, into, 1, square);
+    const byWhite = attackers[square] === 0 ? NO_PRICE : priceOf(safety, 0, square);
+    const byBlack = attackers[64 | square] === 0 ? NO_PRICE : priceOf(safety, 1, square);
+    const whiteSafe = byBlack >= KNIGHT_WORTH;
+    const blackSafe = byWhite >= KNIGHT_WORTH;
+    commands[square] = whiteSafe ? (blackSafe ? 2 : 0) : blackSafe ? 1 : 3;
+    const code = board[square]!;
+    const mayTake = code !== 0 && (code & 7) !== KING;
+    exchanges[square] = mayTake && code >> 3 === 1 ? gainOf(code, byWhite) : NO_EXCHANGE;
+    exchanges[64 | square] = mayTake && code >> 3 === 0 ? gainOf(code, byBlack) : NO_EXCHANGE;
   }
   return into;
 }
 
-function commandIndex(safety: Safety, square: number): number {
-  const white = isSafeHere(safety, 0, KNIGHT_PLACE, square);
-  const black = isSafeHere(safety, 1, KNIGHT_PLACE, square);
-  return white ? (black ? 2 : 0) : black ? 1 : 3;
-}
-
-function fillSide(map: AttackMap, into: SquareTable, side: SideIndex, square: number): void {
-  const entry = (side << 6) | square;
-  const gain = map.board[square] === 0 ? null : exchangeOn(map, side, square);
-  into.exchanges[entry] = gain === null ? NO_EXCHANGE : gain;
+function gainOf(code: number, price: number): number {
+  return price === NO_PRICE ? NO_EXCHANGE : worthOf(code) - price;
 }
 
 /** Who commands the square. */
