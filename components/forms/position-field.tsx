@@ -18,7 +18,7 @@ export interface PositionFieldProps {
   readonly children?: ReactNode;
 }
 
-/** One position as FEN. What was typed stays whatever is wrong with it. */
+/** One position as FEN, or a game whose last position is taken. What was typed stays whatever is wrong with it. */
 export function PositionField(props: PositionFieldProps) {
   const { action, hidden, text, faults, refused, verb, onTyped, onRead, children } = props;
   return (
@@ -31,7 +31,7 @@ export function PositionField(props: PositionFieldProps) {
         }}
       >
         <label htmlFor="fen" className="block text-[13px] leading-5 font-medium">
-          Position, as FEN
+          Position, as FEN or as the moves of a game (PGN)
         </label>
         <div className="mt-1 flex gap-x-2">
           <input

@@ -111,6 +111,9 @@ test('a route can be typed as squares or as moves; what cannot be read is told i
   await screen.check('f3 d2 zz');
   await expect(screen.own.getByRole('alert')).toContainText('"zz" is no square');
   await expect(screen.route).toHaveValue('f3 d2 zz');
+  await screen.field.fill('1. d4 d5 2. c4 e6 3. Nc3 Nf6');
+  await page.getByRole('button', { name: 'Find', exact: true }).click();
+  await expect(screen.square('f6')).toHaveAttribute('aria-label', /black knight/);
   await screen.field.fill('what?');
   await page.getByRole('button', { name: 'Find', exact: true }).click();
   await expect(page.getByText('This cannot be read. The plate shows the position before.')).toBeVisible();

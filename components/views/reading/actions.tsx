@@ -37,6 +37,9 @@ export function Actions({ state, act }: { readonly state: PageState; readonly ac
       >
         Undo
       </button>
+      <a href={`/routes?${new URLSearchParams({ fen: address.fen }).toString()}`} className={LINK}>
+        Routes
+      </a>
       <span className="flex items-center gap-x-2 text-[14px]">
         Figure:
         <a href={figure('svg')} download="waypost-plate.svg" className={LINK}>

@@ -2,8 +2,11 @@
 import { looksLikeGame, textOf } from './open-position';
 import type { Act } from './state';
 
+/** What comes of a text: it is read, or refused with its faults. */
+export type ReadAct = Extract<Act, { readonly type: 'read' | 'refused' }>;
+
 /** Reads a FEN at once; a game goes through the library of notations, which is fetched only then. */
-export async function readTyped(text: string, act: (act: Act) => void): Promise<void> {
+export async function readTyped(text: string, act: (act: ReadAct) => void): Promise<void> {
   if (!looksLikeGame(text)) {
     act({ type: 'read', text });
     return;

@@ -1,5 +1,14 @@
 /** Answers the routes page: run by the server for an address, by the worker for every change after. */
-import { checkRoute, encodeCheck, encodeRoutes, parseFen, type Position, readPosition, routes } from '@/engine';
+import {
+  checkRoute,
+  encodeCheck,
+  encodeRoutes,
+  formatFen,
+  parseFen,
+  type Position,
+  readPosition,
+  routes,
+} from '@/engine';
 import { manOn, squareName, squareNamed } from '@/engine/board';
 import { routeFaultText } from '@/engine/explain';
 import { MOVE_COST, PREPARATION_MOVES } from '@/engine/posts';
@@ -20,23 +29,36 @@ const SIDE_WEIGHED_MAX = 96;
 const OTHERS_MAX = 3;
 
 /** Computes the whole answer in place: some 25 ms for a side. Throws where the FEN cannot be read, which the page has done before. */
-export function answerRoutes({ fen, of, man, route }: Ask): Answer {
-  const position = openedPosition(fen);
+export function answerRoutes(ask: Ask): Answer {
+  const position = openedPosition(ask.fen);
+  const { man, of } = ask;
   const from = man === null ? undefined : squareNamed(man);
   const side = sideOf(position, of, from);
-  const whole = routes(position, { side, movesMax: MOVES_MAX, choicesMax: SIDE_WEIGHED_MAX });
-  const asked =
-    from === undefined ? whole : routes(position, { from, side, movesMax: MOVES_MAX, choicesMax: MAN_CHOICES_MAX });
-  const listed = { side, choices: asked.choices.slice(0, from === undefined ? SIDE_CHOICES_MAX : MAN_CHOICES_MAX) };
-  const { engine, choices } = encodeRoutes(position, listed);
-  return {
+  return { ...postsOf(position, side, from), ...given(position, ask.route) };
+}
+
+type Posts = Omit<Answer, 'check' | 'fault'>;
+
+/** The posts that were computed last: a route drawn stop by stop asks for the same again and again. */
+let last: { readonly key: string; readonly posts: Posts } | null = null;
+
+function postsOf(position: Position, side: Side, from: Square | undefined): Posts {
+  const key = `${formatFen(position)} ${side} ${from ?? ''}`;
+  if (last?.key === key) return last.posts;
+  const bounds = { side, movesMax: MOVES_MAX };
+  const whole = routes(position, { ...bounds, choicesMax: SIDE_WEIGHED_MAX });
+  const asked = from === undefined ? whole : routes(position, { ...bounds, from, choicesMax: MAN_CHOICES_MAX });
+  const listed = asked.choices.slice(0, from === undefined ? SIDE_CHOICES_MAX : MAN_CHOICES_MAX);
+  const { engine, choices } = encodeRoutes(position, { side, choices: listed });
+  const posts = {
     engine,
     reading: bareReading(readPosition(position)),
     side,
     men: menOf(position, whole),
     choices: withOthers(position, side, choices),
-    ...given(position, route),
   };
+  last = { key, posts };
+  return posts;
 }
 
 function openedPosition(fen: string): Position {

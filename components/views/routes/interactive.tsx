@@ -4,6 +4,7 @@
 import { useMemo, useReducer } from 'react';
 import { PositionField } from '@/components/forms/position-field';
 import { useWorker } from '@/components/ui/use-worker';
+import { readTyped } from '../reading/read-typed';
 import { useAddress, useWidth } from '../reading/use-page';
 import { useChosenInView } from '@/components/ui/use-chosen-in-view';
 import { type RoutesAddress, routesHref } from './address';
@@ -62,7 +63,7 @@ export function InteractiveRoutes({ address, first }: { readonly address: Routes
           refused={state.refused}
           verb="Find"
           onTyped={(text) => act({ type: 'typed', text })}
-          onRead={(text) => act({ type: 'read', text })}
+          onRead={(text) => void readTyped(text, act)}
         >
           <RoutesExamples onRead={(text) => act({ type: 'read', text })} />
         </PositionField>

@@ -31,6 +31,7 @@ export interface DrawnRoute {
 export type RoutesAct =
   | { readonly type: 'typed'; readonly text: string }
   | { readonly type: 'read'; readonly text: string }
+  | { readonly type: 'refused'; readonly text: string; readonly faults: readonly Fault[] }
   | { readonly type: 'of'; readonly side: Side }
   | { readonly type: 'man'; readonly man: SquareName | null }
   | { readonly type: 'post'; readonly post: string }
@@ -94,6 +95,8 @@ export function routesActed(state: RoutesState, act: RoutesAct): RoutesState {
       return { ...state, text: act.text };
     case 'read':
       return read(state, act.text);
+    case 'refused':
+      return { ...state, text: act.text, faults: act.faults, refused: true };
     case 'of':
       return { ...state, of: act.side, man: null, post: null, route: '', routeTyped: '' };
     case 'man':
