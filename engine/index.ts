@@ -19,9 +19,11 @@ export {
   heatMapOf,
   newDesk,
   readFen,
+  readFenText,
   readPosition,
   readValues,
   type Reading,
+  type ReadingText,
   type Statement,
 } from './reading';
 export { checkRoute, routes } from './routes';

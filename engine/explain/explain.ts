@@ -25,8 +25,8 @@ export interface StatementValue {
   readonly text: string;
   readonly squares: readonly SquareName[];
   readonly men: readonly SquareName[];
-  /** The fact without what stands in the fields above. */
-  readonly facts: Readonly<Record<string, unknown>>;
+  /** What it says; id, side, squares and men stand in the fields above too. */
+  readonly fact: Fact;
 }
 
 export interface Explanation {
@@ -134,7 +134,7 @@ function withoutRepeats(weighed: readonly Weighed[]): Weighed[] {
 }
 
 function statement({ theme, fact, weight }: Weighed): StatementValue {
-  const { id, side, squares, men, ...facts } = fact;
+  const { id, side, squares, men } = fact;
   const phrase = phraseOf(fact);
   return {
     key: keyOf(fact),
@@ -146,7 +146,7 @@ function statement({ theme, fact, weight }: Weighed): StatementValue {
     text: phraseText(phrase),
     squares,
     men,
-    facts,
+    fact,
   };
 }
 

@@ -23,7 +23,6 @@ export function encodeMen(map: AttackMap, men: readonly ManValue[]): Reading['me
     defenders: names(menOfMask(map, man.side, man.defenders)),
     duties: man.duties.map(({ square, loses, by }) => ({ square: squareName(square), loses, by })),
     trapped: man.trapped,
-    movesToCentre: man.movesToCentre,
     notes: [...man.notes],
   }));
 }

@@ -36,6 +36,7 @@ export function encodeReading(
   };
 }
 
-function encodeStatement({ key, id, theme, side, weight, head, text, squares, men, facts }: StatementValue): Statement {
+function encodeStatement({ key, theme, weight, head, text, fact }: StatementValue): Statement {
+  const { id, side, squares, men, ...facts } = fact;
   return { key, id, theme, side, weight, head, text, squares: [...squares], men: [...men], facts };
 }

@@ -12,17 +12,19 @@ import type { z } from 'zod';
 /** One reply in so many is checked in production, where the contract says `sampled`. */
 const SAMPLE_EVERY = 100;
 
+/** Tells of one reply after another whether it is to be checked. */
+export function sampling(how: 'always' | 'sampled', production: boolean): () => boolean {
+  if (how === 'always' || !production) return () => true;
+  let count = 0;
+  return () => count++ % SAMPLE_EVERY === 0;
+}
+
 /** A function that passes replies through their schema, or now and then only. Throws on a reply that was never promised. */
 export function replyCheck<S extends z.ZodType>(
   schema: S,
   how: 'always' | 'sampled',
   production: boolean,
 ): (value: z.output<S>) => z.output<S> {
-  if (how === 'always' || !production) return (value) => schema.parse(value);
-  let count = 0;
-  return (value) => {
-    const isDue = count % SAMPLE_EVERY === 0;
-    count += 1;
-    return isDue ? schema.parse(value) : value;
-  };
+  const isDue = sampling(how, production);
+  return (value) => (isDue() ? schema.parse(value) : value);
 }

@@ -1,6 +1,7 @@
 /** `waypost read`: a FEN to a page of text or to JSON. */
-import type { Fault, Reading } from '@/engine/reading/schema';
-import { computeReading } from '@/lib/services/readings/engine';
+import type { ReadingText } from '@/engine';
+import type { Fault } from '@/engine/reading/schema';
+import { computeReading, writeReading } from '@/lib/services/readings/engine';
 import { MODES, type Mode } from '@/openapi/schemas/ids';
 import { choiceOf, commandArguments, fenOf } from './arguments';
 import { inkFor } from './ink';
@@ -49,13 +50,14 @@ export async function runRead(args: readonly string[], terminal: Terminal): Prom
     await written(terminal.errors, refusalText(result.fault, mode === 'strict' && computeReading(fen, 'diagram').ok));
     return EXIT.fault;
   }
-  const text = values.json ? jsonLine(result.value) : readingText(result.value, inkFor(terminal.colour));
+  const json = values.json ? writeReading(fen, mode) : null;
+  const text = json?.ok ? jsonLine(json.value) : readingText(result.value, inkFor(terminal.colour));
   await written(terminal.output, text);
   return EXIT.good;
 }
 
-function readingOf(text: string, mode: Mode): Answer<Reading, Fault> {
-  const result = computeReading(text, mode);
+function readingOf(text: string, mode: Mode): Answer<ReadingText, Fault> {
+  const result = writeReading(text, mode);
   return result.ok ? { ok: true, value: result.value } : { ok: false, fault: result.fault[0] };
 }
 

@@ -2,8 +2,8 @@
 import type { Fault } from '@/engine/reading/schema';
 import { env } from '@/lib/env';
 import { replyText } from '@/lib/api/reply';
-import { computeReading } from '@/lib/services/readings/engine';
-import { partsOf } from '@/lib/services/readings/parts';
+import { writtenCheck } from '@/lib/api/written-check';
+import { engineVersion, writeReading } from '@/lib/services/readings/engine';
 import { contracts } from '@/openapi/contracts';
 import { type CallJob, type CallOutcome, doCall } from './calls';
 import type { Mode, ReadingPart } from '@/openapi/schemas/ids';
@@ -59,16 +59,17 @@ export function doJob(job: Job): ReadingOutcome | LinesOutcome | CallOutcome {
 }
 
 const encoder = new TextEncoder();
-const readingText = replyText(contracts.createReading.reply, env.isProduction);
-const lineText = replyText(contracts.createReadings.reply, env.isProduction);
+const checkedReading = writtenCheck(contracts.createReading.reply, env.isProduction);
+const checkedLine = writtenCheck(contracts.createReadings.reply, env.isProduction);
+const badLine = replyText(contracts.createReadings.reply, env.isProduction);
 
 function doReading({ fen, mode, include }: ReadingJob): ReadingOutcome {
-  const result = computeReading(fen, mode);
+  const result = writeReading(fen, mode, include);
   if (!result.ok) return { ok: false, faults: result.fault };
-  const reading = result.value;
+  const { fen: normalised, warnings, json } = result.value;
   // The warnings take part: a diagram's say what its FEN claimed before it was normalised.
-  const identity = JSON.stringify([reading.engine, reading.mode, reading.fen, reading.warnings, include]);
-  return { ok: true, json: encoder.encode(readingText(partsOf(reading, include))), identity };
+  const identity = JSON.stringify([engineVersion, mode, normalised, warnings, include]);
+  return { ok: true, json: encoder.encode(checkedReading(json)), identity };
 }
 
 function doLines({ fens, firstLine, mode, include }: LinesJob): LinesOutcome {
@@ -76,11 +77,11 @@ function doLines({ fens, firstLine, mode, include }: LinesJob): LinesOutcome {
   const lines = fens.map((fen, index) => {
     const line = firstLine + index;
     try {
-      const result = computeReading(fen, mode);
-      return lineText(result.ok ? partsOf(result.value, include) : { error: result.fault[0], line });
+      const result = writeReading(fen, mode, include);
+      return result.ok ? checkedLine(result.value.json) : badLine({ error: result.fault[0], line });
     } catch (error) {
       mistakes.push({ line, reason: error instanceof Error ? (error.stack ?? error.message) : String(error) });
-      return lineText({ error: OUR_MISTAKE, line });
+      return badLine({ error: OUR_MISTAKE, line });
     }
   });
   return { ndjson: encoder.encode(lines.map((line) => `${line}\n`).join('')), mistakes };

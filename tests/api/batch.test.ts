@@ -15,10 +15,10 @@ vi.mock('@/lib/services/readings/engine', async (original) => {
   const real = await original<typeof EngineDoor>();
   return {
     ...real,
-    computeReading: (...args: Parameters<typeof real.computeReading>) => {
+    writeReading: (...args: Parameters<typeof real.writeReading>) => {
       asked.count += 1;
       if (asked.count === asked.throwAt) throw new Error('secret of the house');
-      return real.computeReading(...args);
+      return real.writeReading(...args);
     },
   };
 });
