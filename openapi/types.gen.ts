@@ -84,6 +84,46 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/api/v1/comparisons": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Compare positions or placements
+         * @description Holds one to three positions against a first: what differs by square, man and theme, what is said of one only, and the difference in sentences. A placement is a position with one man put elsewhere.
+         */
+        readonly post: operations["createComparison"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/exchanges": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Test the trades
+         * @description For every pair of men of like worth: what changes when both leave the board, and when it could be offered.
+         */
+        readonly post: operations["createExchanges"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/api/v1/plates.svg": {
         readonly parameters: {
             readonly query?: never;
@@ -384,6 +424,150 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/api/v1/studies/{id}/comparisons": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the comparisons of a study
+         * @description All comparisons kept in a study, the oldest first.
+         */
+        readonly get: operations["listStudyComparisons"];
+        readonly put?: never;
+        /**
+         * Compute a comparison and keep it
+         * @description Computes the request now, and keeps it with its result and the version of the engine.
+         */
+        readonly post: operations["createStudyComparison"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/comparisons/{resultId}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a comparison of a study
+         * @description What was asked, what came out, and which engine said so.
+         */
+        readonly get: operations["getStudyComparison"];
+        readonly put?: never;
+        readonly post?: never;
+        /**
+         * Put a comparison into the trash
+         * @description It can be restored for thirty days.
+         */
+        readonly delete: operations["deleteStudyComparison"];
+        readonly options?: never;
+        readonly head?: never;
+        /**
+         * Change the words of a comparison
+         * @description Changes title or note; request and result stay.
+         */
+        readonly patch: operations["changeStudyComparison"];
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/comparisons/{resultId}/restore": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Take a comparison out of the trash
+         * @description It is as it was.
+         */
+        readonly post: operations["restoreStudyComparison"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/exchanges": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the exchange tests of a study
+         * @description All exchange tests kept in a study, the oldest first.
+         */
+        readonly get: operations["listStudyExchanges"];
+        readonly put?: never;
+        /**
+         * Compute a exchange test and keep it
+         * @description Computes the request now, and keeps it with its result and the version of the engine.
+         */
+        readonly post: operations["createStudyExchange"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/exchanges/{resultId}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a exchange test of a study
+         * @description What was asked, what came out, and which engine said so.
+         */
+        readonly get: operations["getStudyExchange"];
+        readonly put?: never;
+        readonly post?: never;
+        /**
+         * Put a exchange test into the trash
+         * @description It can be restored for thirty days.
+         */
+        readonly delete: operations["deleteStudyExchange"];
+        readonly options?: never;
+        readonly head?: never;
+        /**
+         * Change the words of a exchange test
+         * @description Changes title or note; request and result stay.
+         */
+        readonly patch: operations["changeStudyExchange"];
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/exchanges/{resultId}/restore": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Take a exchange test out of the trash
+         * @description It is as it was.
+         */
+        readonly post: operations["restoreStudyExchange"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/api/v1/jobs": {
         readonly parameters: {
             readonly query?: never;
@@ -646,6 +830,25 @@ export interface components {
             /** @description The number of the FEN, from 1. */
             readonly line: number;
         };
+        /** @description One count a theme, before and after. */
+        readonly BalanceLine: {
+            /** @enum {string} */
+            readonly theme: "structure" | "squares" | "outposts" | "files" | "men" | "king" | "control";
+            /** @description What is counted, in words. */
+            readonly counts: string;
+            readonly white: {
+                /** @description Before. */
+                readonly a: number;
+                /** @description After. */
+                readonly b: number;
+            };
+            readonly black: {
+                /** @description Before. */
+                readonly a: number;
+                /** @description After. */
+                readonly b: number;
+            };
+        };
         /** @description Positions to read. */
         readonly BatchRequest: {
             /** @description FENs, answered in this order, one a line. */
@@ -707,6 +910,32 @@ export interface components {
          * @enum {string}
          */
         readonly Colour: "light" | "dark";
+        /** @description Two to four positions or placements side by side. */
+        readonly Comparison: {
+            readonly engine: string;
+            /** @description What was compared, each as a position; the first is the one the others are held against. */
+            readonly subjects: readonly {
+                readonly fen: string;
+                readonly label: string;
+            }[];
+            /** @description From the first subject to each of the others, in order. */
+            readonly differences: readonly components["schemas"]["Difference"][];
+        };
+        /** @description Two to four positions or placements. */
+        readonly ComparisonRequest: {
+            /** @description Positions or placements; the first is the one the others are held against. */
+            readonly subjects: readonly {
+                readonly fen: components["schemas"]["Fen"];
+                /** @description One man put elsewhere, whether or not it could move there. */
+                readonly place?: {
+                    readonly from: components["schemas"]["Square"];
+                    readonly to: components["schemas"]["Square"];
+                };
+                readonly label?: string;
+            }[];
+            /** @default diagram */
+            readonly mode?: components["schemas"]["Mode"];
+        };
         /** @description How far a bishop or queen sees along a diagonal, one way. */
         readonly DiagonalReading: {
             readonly from: components["schemas"]["Square"];
@@ -717,6 +946,94 @@ export interface components {
             readonly stoppedBy: components["schemas"]["Square"] | null;
             /** @description The man that stops it is a rammed pawn. */
             readonly stopperFixed: boolean;
+        };
+        /** @description All that differs from A to B. */
+        readonly Difference: {
+            readonly squares: readonly components["schemas"]["SquareDifference"][];
+            readonly men: readonly components["schemas"]["ManDifference"][];
+            readonly balance: readonly components["schemas"]["BalanceLine"][];
+            /** @description Statements of B that A does not make. */
+            readonly gained: readonly components["schemas"]["Statement"][];
+            /** @description Statements of A that B does not make. */
+            readonly lost: readonly components["schemas"]["Statement"][];
+            /** @description How many statements both make. */
+            readonly unchanged: number;
+            /** @description Best said first. */
+            readonly sentences: readonly components["schemas"]["DifferenceSentence"][];
+        };
+        /** @description A sentence of the difference. */
+        readonly DifferenceSentence: {
+            /** @description Stable id of what is said, e.g. "last-guard-gone". */
+            readonly id: string;
+            /** @enum {string} */
+            readonly theme: "structure" | "squares" | "outposts" | "files" | "men" | "king" | "control";
+            /** @description Whose gain or loss it is. */
+            readonly side: components["schemas"]["Side"];
+            /** @description Good for that side. */
+            readonly good: boolean;
+            /** @description Only orders. */
+            readonly weight: number;
+            readonly text: string;
+            readonly squares: readonly components["schemas"]["Square"][];
+            /** @description What the text is made from. */
+            readonly facts: {
+                readonly [key: string]: unknown;
+            };
+        };
+        /** @description One trade and what it changes. */
+        readonly Exchange: {
+            readonly white: {
+                readonly square: components["schemas"]["Square"];
+                readonly kind: components["schemas"]["Kind"];
+            };
+            readonly black: {
+                readonly square: components["schemas"]["Square"];
+                readonly kind: components["schemas"]["Kind"];
+            };
+            /** @description Own safe moves until each side’s man attacks the other; 0: now; null: not within three. */
+            readonly offers: {
+                readonly white: number | null;
+                readonly black: number | null;
+            };
+            /** @description The position with both gone. */
+            readonly fen: string;
+            readonly balance: readonly components["schemas"]["BalanceLine"][];
+            /** @description Themes whose balance moves towards each side. */
+            readonly themes: {
+                readonly white: number;
+                readonly black: number;
+            };
+            /** @description What is said for and against each side, weighted and added up; only orders. */
+            readonly points: {
+                readonly white: number;
+                readonly black: number;
+            };
+            /** @description The side that the trade helps by those points; null: neither. */
+            readonly helps: components["schemas"]["Side"] | null;
+            readonly sentences: readonly components["schemas"]["DifferenceSentence"][];
+        };
+        /** @description Every trade of men of like worth. */
+        readonly ExchangeTest: {
+            readonly engine: string;
+            readonly fen: string;
+            /** @description White’s men that can be traded: the rows. */
+            readonly white: readonly {
+                readonly square: components["schemas"]["Square"];
+                readonly kind: components["schemas"]["Kind"];
+            }[];
+            /** @description Black’s men that can be traded: the columns. */
+            readonly black: readonly {
+                readonly square: components["schemas"]["Square"];
+                readonly kind: components["schemas"]["Kind"];
+            }[];
+            /** @description Row by row; pairs of unlike worth are left out. */
+            readonly exchanges: readonly components["schemas"]["Exchange"][];
+        };
+        /** @description A position whose trades are to be tested. */
+        readonly ExchangesRequest: {
+            readonly fen: components["schemas"]["Fen"];
+            /** @default diagram */
+            readonly mode?: components["schemas"]["Mode"];
         };
         /** @description Why a position was refused, or what a diagram lacks. */
         readonly Fault: {
@@ -902,6 +1219,40 @@ export interface components {
             readonly method: string;
             readonly href: string;
             readonly summary: string;
+        };
+        /** @description A man that stands elsewhere, is gone or new, or whose counts differ. */
+        readonly ManDifference: {
+            readonly side: components["schemas"]["Side"];
+            readonly kind: components["schemas"]["Kind"];
+            /** @description Where it stands; null: not on the board. */
+            readonly squares: {
+                /** @description Before. */
+                readonly a: components["schemas"]["Square"] | null;
+                /** @description After. */
+                readonly b: components["schemas"]["Square"] | null;
+            };
+            readonly counts: {
+                /** @description Before. */
+                readonly a: {
+                    readonly safeMoves: number;
+                    /** @description Squares attacked in the enemy half. */
+                    readonly enemyHalf: number;
+                    readonly attackers: number;
+                    readonly defenders: number;
+                    /** @description Pawns the enemy gains by taking it now. */
+                    readonly enPrise: number;
+                } | null;
+                /** @description After. */
+                readonly b: {
+                    readonly safeMoves: number;
+                    /** @description Squares attacked in the enemy half. */
+                    readonly enemyHalf: number;
+                    readonly attackers: number;
+                    readonly defenders: number;
+                    /** @description Pawns the enemy gains by taking it now. */
+                    readonly enPrise: number;
+                } | null;
+            };
         };
         /** @description One man and what it can do from where it stands. */
         readonly ManReading: {
@@ -1399,6 +1750,81 @@ export interface components {
          * @enum {string}
          */
         readonly Square: "a1" | "b1" | "c1" | "d1" | "e1" | "f1" | "g1" | "h1" | "a2" | "b2" | "c2" | "d2" | "e2" | "f2" | "g2" | "h2" | "a3" | "b3" | "c3" | "d3" | "e3" | "f3" | "g3" | "h3" | "a4" | "b4" | "c4" | "d4" | "e4" | "f4" | "g4" | "h4" | "a5" | "b5" | "c5" | "d5" | "e5" | "f5" | "g5" | "h5" | "a6" | "b6" | "c6" | "d6" | "e6" | "f6" | "g6" | "h6" | "a7" | "b7" | "c7" | "d7" | "e7" | "f7" | "g7" | "h7" | "a8" | "b8" | "c8" | "d8" | "e8" | "f8" | "g8" | "h8";
+        /** @description A square on which anything differs. */
+        readonly SquareDifference: {
+            readonly square: components["schemas"]["Square"];
+            /** @description What stands there. */
+            readonly occupant: {
+                /** @description Before. */
+                readonly a: {
+                    readonly side: components["schemas"]["Side"];
+                    readonly kind: components["schemas"]["Kind"];
+                } | null;
+                /** @description After. */
+                readonly b: {
+                    readonly side: components["schemas"]["Side"];
+                    readonly kind: components["schemas"]["Kind"];
+                } | null;
+            };
+            /** @description How many men of each side attack it. */
+            readonly attackers: {
+                readonly white: {
+                    /** @description Before. */
+                    readonly a: number;
+                    /** @description After. */
+                    readonly b: number;
+                };
+                readonly black: {
+                    /** @description Before. */
+                    readonly a: number;
+                    /** @description After. */
+                    readonly b: number;
+                };
+            };
+            /** @description As in a reading. */
+            readonly command: {
+                /**
+                 * @description Before.
+                 * @enum {string}
+                 */
+                readonly a: "white" | "black" | "open" | "disputed";
+                /**
+                 * @description After.
+                 * @enum {string}
+                 */
+                readonly b: "white" | "black" | "open" | "disputed";
+            };
+            /** @description Its hold as a weak square of a side. */
+            readonly weakFor: {
+                readonly white: {
+                    /** @description Before. */
+                    readonly a: ("permanent" | "fixed") | null;
+                    /** @description After. */
+                    readonly b: ("permanent" | "fixed") | null;
+                };
+                readonly black: {
+                    /** @description Before. */
+                    readonly a: ("permanent" | "fixed") | null;
+                    /** @description After. */
+                    readonly b: ("permanent" | "fixed") | null;
+                };
+            };
+            /** @description Whether it is an outpost of a side. */
+            readonly outpostFor: {
+                readonly white: {
+                    /** @description Before. */
+                    readonly a: boolean;
+                    /** @description After. */
+                    readonly b: boolean;
+                };
+                readonly black: {
+                    /** @description Before. */
+                    readonly a: boolean;
+                    /** @description After. */
+                    readonly b: boolean;
+                };
+            };
+        };
         /** @description One square: who attacks it and who commands it. */
         readonly SquareReading: {
             readonly square: components["schemas"]["Square"];
@@ -1474,6 +1900,30 @@ export interface components {
             readonly title?: string;
             readonly summary?: string;
         };
+        /** @description Something to be computed and kept. */
+        readonly StudyComparisonRequest: {
+            /** @default  */
+            readonly title?: string;
+            /**
+             * @description Markdown.
+             * @default
+             */
+            readonly note?: string;
+            /** @description The request of the computing call; its answer is kept. */
+            readonly request: components["schemas"]["ComparisonRequest"];
+        };
+        /** @description Something to be computed and kept. */
+        readonly StudyExchangeRequest: {
+            /** @default  */
+            readonly title?: string;
+            /**
+             * @description Markdown.
+             * @default
+             */
+            readonly note?: string;
+            /** @description The request of the computing call; its answer is kept. */
+            readonly request: components["schemas"]["ExchangesRequest"];
+        };
         /** @description A page of a list. */
         readonly StudyPage: {
             readonly items: readonly components["schemas"]["Study"][];
@@ -1505,7 +1955,7 @@ export interface components {
         readonly StudyResult: {
             readonly id: components["schemas"]["Id"];
             /** @enum {string} */
-            readonly kind: "route";
+            readonly kind: "comparison" | "route" | "exchange";
             readonly title: string;
             readonly note: string;
             /** @description As it was sent. */
@@ -2123,6 +2573,266 @@ export interface operations {
                 };
                 content: {
                     readonly "application/json": components["schemas"]["RouteCheck"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createComparison: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 8192 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "subjects": [
+                 *         {
+                 *           "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11"
+                 *         },
+                 *         {
+                 *           "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11",
+                 *           "place": {
+                 *             "from": "f3",
+                 *             "to": "e5"
+                 *           },
+                 *           "label": "Knight on e5"
+                 *         }
+                 *       ]
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["ComparisonRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Compare positions or placements */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["Comparison"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createExchanges: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 4096 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11"
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["ExchangesRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Test the trades */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["ExchangeTest"];
                 };
             };
             /** @description not-json: The body is not JSON. */
@@ -4629,7 +5339,7 @@ export interface operations {
                 readonly id: components["schemas"]["Id"];
                 /**
                  * @description An id of something stored.
-                 * @example 00000000-0000-4000-8000-0000000000d1
+                 * @example 00000000-0000-4000-8000-0000000000d2
                  */
                 readonly resultId: components["schemas"]["Id"];
             };
@@ -4752,7 +5462,7 @@ export interface operations {
                 readonly id: components["schemas"]["Id"];
                 /**
                  * @description An id of something stored.
-                 * @example 00000000-0000-4000-8000-0000000000d1
+                 * @example 00000000-0000-4000-8000-0000000000d2
                  */
                 readonly resultId: components["schemas"]["Id"];
             };
@@ -4874,7 +5584,7 @@ export interface operations {
                 readonly id: components["schemas"]["Id"];
                 /**
                  * @description An id of something stored.
-                 * @example 00000000-0000-4000-8000-0000000000d1
+                 * @example 00000000-0000-4000-8000-0000000000d2
                  */
                 readonly resultId: components["schemas"]["Id"];
             };
@@ -5044,7 +5754,7 @@ export interface operations {
                 readonly id: components["schemas"]["Id"];
                 /**
                  * @description An id of something stored.
-                 * @example 00000000-0000-4000-8000-0000000000d1
+                 * @example 00000000-0000-4000-8000-0000000000d2
                  */
                 readonly resultId: components["schemas"]["Id"];
             };
@@ -5053,6 +5763,1569 @@ export interface operations {
         readonly requestBody?: never;
         readonly responses: {
             /** @description Take a route out of the trash */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listStudyComparisons: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description List the comparisons of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResults"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createStudyComparison: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description A text of your own; the same request sent again with it stores nothing twice and answers the same for a day. */
+                readonly "Idempotency-Key"?: string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 131072 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "title": "First try",
+                 *       "request": {
+                 *         "subjects": [
+                 *           {
+                 *             "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11"
+                 *           },
+                 *           {
+                 *             "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11",
+                 *             "place": {
+                 *               "from": "f3",
+                 *               "to": "e5"
+                 *             }
+                 *           }
+                 *         ]
+                 *       }
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["StudyComparisonRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Compute a comparison and keep it */
+            readonly 201: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description idempotency-busy: The first request with this Idempotency-Key is still at work. */
+            readonly 409: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. idempotency-mismatch: This Idempotency-Key was used with another request. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getStudyComparison: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d1
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Read a comparison of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly deleteStudyComparison: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d1
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Put a comparison into the trash */
+            readonly 204: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly changeStudyComparison: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d1
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 131072 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "note": "Black is slower by one move."
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["ResultChange"];
+            };
+        };
+        readonly responses: {
+            /** @description Change the words of a comparison */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly restoreStudyComparison: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d1
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Take a comparison out of the trash */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listStudyExchanges: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description List the exchange tests of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResults"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createStudyExchange: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: {
+                /** @description A text of your own; the same request sent again with it stores nothing twice and answers the same for a day. */
+                readonly "Idempotency-Key"?: string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 131072 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "title": "First try",
+                 *       "request": {
+                 *         "fen": "r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11"
+                 *       }
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["StudyExchangeRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Compute a exchange test and keep it */
+            readonly 201: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description idempotency-busy: The first request with this Idempotency-Key is still at work. */
+            readonly 409: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. idempotency-mismatch: This Idempotency-Key was used with another request. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getStudyExchange: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d3
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Read a exchange test of a study */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly deleteStudyExchange: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d3
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Put a exchange test into the trash */
+            readonly 204: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly changeStudyExchange: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header: {
+                /** @description The ETag that reading gave. Where somebody else was first, the answer is 412 and nothing is changed. */
+                readonly "If-Match": string;
+            };
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d3
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        /** @description At most 131072 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "note": "Black is slower by one move."
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["ResultChange"];
+            };
+        };
+        readonly responses: {
+            /** @description Change the words of a exchange test */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Names this version. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyResult"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-lost: Somebody else has changed this first. */
+            readonly 412: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description version-needed: This call needs to know which version it changes. */
+            readonly 428: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly restoreStudyExchange: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000d3
+                 */
+                readonly resultId: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Take a exchange test out of the trash */
             readonly 200: {
                 headers: {
                     /** @description The id of this request. */

@@ -7,3 +7,4 @@ export * from './preparations';
 export * from './routes';
 export * from './name-move';
 export * from './check-route';
+export { bears } from './boards';

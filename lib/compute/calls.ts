@@ -2,6 +2,8 @@
 import { env } from '@/lib/env';
 import { replyText } from '@/lib/api/reply';
 import { AppError, type InputFault } from '@/lib/errors';
+import { compareSubjects } from '@/lib/services/compare/compare-subjects';
+import { testExchanges } from '@/lib/services/compare/test-exchanges';
 import { checkGivenRoute } from '@/lib/services/routes/check-given-route';
 import { findRoutes } from '@/lib/services/routes/find-routes';
 import { contracts } from '@/openapi/contracts';
@@ -18,6 +20,8 @@ function computed<I, S extends z.ZodType>(compute: (input: I) => z.output<S>, re
 /** Each computed call by its contract's id. */
 const CALLS = {
   createRoutes: computed(findRoutes, contracts.createRoutes.reply),
+  createComparison: computed(compareSubjects, contracts.createComparison.reply),
+  createExchanges: computed(testExchanges, contracts.createExchanges.reply),
   createRouteCheck: computed(checkGivenRoute, contracts.createRouteCheck.reply),
 } as const;
 

@@ -1,6 +1,7 @@
 /** Every call of the API, by its id. */
 import type { Contract } from '../contract';
 import { createReadings } from './batch';
+import { createComparison, createExchanges } from './compare';
 import { getDocument, getIndex, getProblem } from './document';
 import { getHealth } from './health';
 import { cancelJob, createJob, getJob, listJobItems, listJobs, retryJob, watchJob } from './jobs';
@@ -15,7 +16,7 @@ import {
   restorePosition,
 } from './positions';
 import { createReading, getReading } from './readings';
-import { studyRoutes } from './results';
+import { studyComparisons, studyExchanges, studyRoutes } from './results';
 import { createRouteCheck, createRoutes } from './routes';
 import {
   changeStudy,
@@ -35,6 +36,8 @@ export const contracts = {
   createReadings,
   createRoutes,
   createRouteCheck,
+  createComparison,
+  createExchanges,
   getPlateSvg,
   getPlatePng,
   listStudies,
@@ -58,6 +61,18 @@ export const contracts = {
   changeStudyRoute: studyRoutes.change,
   deleteStudyRoute: studyRoutes.remove,
   restoreStudyRoute: studyRoutes.restore,
+  listStudyComparisons: studyComparisons.list,
+  createStudyComparison: studyComparisons.create,
+  getStudyComparison: studyComparisons.get,
+  changeStudyComparison: studyComparisons.change,
+  deleteStudyComparison: studyComparisons.remove,
+  restoreStudyComparison: studyComparisons.restore,
+  listStudyExchanges: studyExchanges.list,
+  createStudyExchange: studyExchanges.create,
+  getStudyExchange: studyExchanges.get,
+  changeStudyExchange: studyExchanges.change,
+  deleteStudyExchange: studyExchanges.remove,
+  restoreStudyExchange: studyExchanges.restore,
   listJobs,
   createJob,
   getJob,

@@ -1,9 +1,11 @@
 /** Comparisons, routes and exchange tests kept in a study: the same six calls for each. */
 import { type z } from 'zod';
 import { contract, json, NOTHING } from '../contract';
+import { comparisonRequestSchema, exchangesRequestSchema } from '../schemas/compare';
 import { EXAMPLE_FEN, EXAMPLE_IDS } from '../schemas/examples';
 import { idParams } from '../schemas/page';
 import {
+  type ResultKind,
   resultChangeSchema,
   resultListSchema,
   resultParams,
@@ -14,11 +16,11 @@ import { routesRequestSchema } from '../schemas/routes';
 
 const tag = 'Studies';
 const inStudy = { id: EXAMPLE_IDS.study };
-const one = { id: EXAMPLE_IDS.study, resultId: EXAMPLE_IDS.result };
 
 interface Kind<Name extends string, S extends z.ZodType> {
   /** As ids name it: `Comparison`. */
   readonly name: Name;
+  readonly kind: ResultKind;
   /** As the path names many of it. */
   readonly path: string;
   /** As sentences name one and many of it. */
@@ -30,6 +32,7 @@ interface Kind<Name extends string, S extends z.ZodType> {
 
 function resultContracts<Name extends string, S extends z.ZodType>({
   name,
+  kind,
   path,
   noun,
   nouns,
@@ -37,6 +40,7 @@ function resultContracts<Name extends string, S extends z.ZodType>({
   example,
 }: Kind<Name, S>) {
   const all = `/api/v1/studies/{id}/${path}` as const;
+  const one = { id: EXAMPLE_IDS.study, resultId: EXAMPLE_IDS[kind] };
   const single = `${all}/{resultId}` as const;
   return {
     list: contract({
@@ -130,9 +134,30 @@ function resultContracts<Name extends string, S extends z.ZodType>({
 
 export const studyRoutes = resultContracts({
   name: 'Route',
+  kind: 'route',
   path: 'routes',
   noun: 'route',
   nouns: 'routes',
   request: routesRequestSchema,
   example: { fen: EXAMPLE_FEN, man: 'f3', choicesMax: 2 },
+});
+
+export const studyComparisons = resultContracts({
+  name: 'Comparison',
+  kind: 'comparison',
+  path: 'comparisons',
+  noun: 'comparison',
+  nouns: 'comparisons',
+  request: comparisonRequestSchema,
+  example: { subjects: [{ fen: EXAMPLE_FEN }, { fen: EXAMPLE_FEN, place: { from: 'f3', to: 'e5' } }] },
+});
+
+export const studyExchanges = resultContracts({
+  name: 'Exchange',
+  kind: 'exchange',
+  path: 'exchanges',
+  noun: 'exchange test',
+  nouns: 'exchange tests',
+  request: exchangesRequestSchema,
+  example: { fen: EXAMPLE_FEN },
 });

@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { momentSchema, uuidSchema, versionSchema } from './page';
 import { NOTE_LENGTH_MAX, TITLE_LENGTH_MAX } from './studies';
 
-export const RESULT_KINDS = ['route'] as const;
+export const RESULT_KINDS = ['comparison', 'route', 'exchange'] as const;
 export type ResultKind = (typeof RESULT_KINDS)[number];
 
 const words = {

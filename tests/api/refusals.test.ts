@@ -20,6 +20,7 @@ const BARE = {
   guarded: undefined,
 } as const;
 
+const BAD_FEN = '8/8 w - - 0 1';
 const NOWHERE = '99999999-0000-4000-8000-000000000000';
 
 /** A request that has to be refused with the code: the contract's own example with one thing wrong. */
@@ -40,7 +41,7 @@ async function faultyRequest(contract: Contract, code: ProblemCode, example: Exa
       return { ...good, params: { ...params, [Object.keys(params ?? {})[0] ?? 'code']: 'x'.repeat(65) } };
     case 'fen-refused':
       return body === undefined
-        ? { ...good, query: { ...query, fen: '8/8 w - - 0 1' } }
+        ? { ...good, query: { ...query, fen: BAD_FEN } }
         : { ...good, body: withBadFen(body as Record<string, unknown>) };
     case 'not-found':
       if (contract.id === 'createJob') return { ...good, body: { kind: 'recompute', study: NOWHERE } };
@@ -106,10 +107,11 @@ async function conflicting(contract: Contract, good: Wanted, { world }: ExampleW
 
 /** The body with a bad FEN in place of its first. */
 function withBadFen(body: Record<string, unknown>): Record<string, unknown> {
-  const { request } = body;
-  return typeof request === 'object'
-    ? { ...body, request: { ...request, fen: '8/8 w - - 0 1' } }
-    : { ...body, fen: '8/8 w - - 0 1' };
+  const { request, subjects } = body;
+  if (typeof request === 'object' && request !== null)
+    return { ...body, request: withBadFen(request as Record<string, unknown>) };
+  if (Array.isArray(subjects)) return { ...body, subjects: [{ fen: BAD_FEN }, ...subjects.slice(1)] };
+  return { ...body, fen: BAD_FEN };
 }
 
 function lastParam(params: Wanted['params'], value: string): Record<string, string> {

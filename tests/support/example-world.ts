@@ -11,6 +11,7 @@ import { ALLOWANCES, spend } from '@/lib/api/limits';
 import { newKeySecret } from '@/lib/key-secret';
 import { type Contract, isOpen, KEY_SCOPES, type KeyScope } from '@/openapi/contract';
 import { EXAMPLE_ENDING, EXAMPLE_IDS } from '@/openapi/schemas/examples';
+import { RESULT_KINDS } from '@/openapi/schemas/results';
 import { sessionHeaders } from './sessions';
 import { freshWorld, type World } from './world';
 
@@ -63,14 +64,8 @@ async function peopled(world: World): Promise<Omit<ExampleWorld, 'close'>> {
       title: 'One',
     },
   ]);
-  await insertResult(db, {
-    id: EXAMPLE_IDS.result,
-    studyId: EXAMPLE_IDS.study,
-    kind: 'route',
-    request: { fen: EXAMPLE_ENDING },
-    result: {},
-    engineVersion: '0',
-  });
+  const kept = { studyId: EXAMPLE_IDS.study, request: { fen: EXAMPLE_ENDING }, result: {}, engineVersion: '0' };
+  for (const kind of RESULT_KINDS) await insertResult(db, { ...kept, id: EXAMPLE_IDS[kind], kind });
   const job = { id: EXAMPLE_IDS.job, workspaceId, kind: 'readings', state: 'failed', input: {} } as const;
   await insertJob(db, { ...job, endedAt: new Date() }, [EXAMPLE_ENDING]);
   const makeKey = async (scopes: readonly KeyScope[], id?: string): Promise<Record<string, string>> => {

@@ -1,0 +1,21 @@
+import { others } from '@/lib/api/others';
+import { route } from '@/lib/api/route';
+import { versioned } from '@/lib/api/versioned';
+import { changeWords, readResult, trashResult } from '@/lib/services/results/results';
+import { contracts } from '@/openapi/contracts';
+
+const kind = 'comparison';
+
+export const GET = route(contracts.getStudyComparison, async ({ ctx, params }) =>
+  versioned(await readResult(ctx, { ...params, kind })),
+);
+
+export const PATCH = route(contracts.changeStudyComparison, async ({ ctx, params, body, version }) =>
+  versioned(await changeWords(ctx, { ...params, ...body, kind, version })),
+);
+
+export const DELETE = route(contracts.deleteStudyComparison, ({ ctx, params, version }) =>
+  trashResult(ctx, { ...params, kind, version }),
+);
+
+export const { HEAD, OPTIONS, POST, PUT } = others({ GET, PATCH, DELETE });
