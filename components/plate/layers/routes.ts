@@ -162,7 +162,7 @@ export function trailLegend(trails: readonly Trail[]): LegendItem[] {
     ...(fine ? { dash: `0.01 ${n(width * 2.1)}`, cap: 'round' } : { dash: '7 4' }),
   });
   if (main) {
-    items.push({ label: 'way, each stop safe', marks: [line(paintOf(main, true), 2.6, true)] });
+    items.push({ label: 'way, each stop safe by exchange', marks: [line(paintOf(main, true), 2.6, true)] });
     if (main.stops[main.stops.length - 1]?.fine)
       items.push({ label: 'post', marks: stop(12, 8, 7, main.stops.length, stopLook(main)) });
   }

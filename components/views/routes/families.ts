@@ -1,5 +1,5 @@
 /** The parts of a post in seven families, each with a hatching of its own, so that a bar is read without colour. */
-import { PARTS, type PartName } from '@/engine/posts';
+import { PARTS, type PartName } from '@/engine/posts/weights';
 import type { Paint, Pattern } from '@/components/plate/types';
 
 export const FAMILIES = ['tactics', 'squares', 'room', 'files', 'aims', 'order', 'time'] as const;
@@ -29,6 +29,8 @@ export interface StackedPart {
   readonly name: PartName;
   readonly label: string;
   readonly weight: number;
+  /** Why it counts so, in a coach's words. */
+  readonly reason: string;
   readonly family: Family;
 }
 
@@ -38,7 +40,7 @@ export const STACKED: readonly StackedPart[] = FAMILIES.flatMap((family) =>
     ? []
     : MEMBERS[family].flatMap((name) => {
         const part = PARTS.find((each) => each.name === name);
-        return part ? [{ name, label: part.label, weight: part.weight, family }] : [];
+        return part ? [{ name, label: part.label, weight: part.weight, reason: part.reason, family }] : [];
       }),
 );
 

@@ -1,6 +1,6 @@
 /** The ranking of posts as a figure: sums only. D3 stacks the parts of each post and scales them to the width. */
 import { scaleLinear, stack, stackOffsetDiverging } from 'd3';
-import { MOVE_COST, PREPARATION_MOVES, type PartName } from '@/engine/posts';
+import { MOVE_COST, PREPARATION_MOVES, type PartName } from '@/engine/posts/weights';
 import type { RankedChoice } from './ask';
 import { type Family, STACKED } from './families';
 
@@ -12,6 +12,8 @@ export interface Segment {
   readonly now: number;
   readonly there: number;
   readonly weight: number;
+  /** Why it counts so, in a coach's words. */
+  readonly reason: string;
   /** Weight times difference. */
   readonly value: number;
   /** Left and right edge, px. */
@@ -50,9 +52,9 @@ type Weighed = Omit<Segment, 'x0' | 'x1'>;
 
 /** The parts of a choice that differ, family by family, the time last. */
 export function weighedParts({ parts, moves, needs }: RankedChoice): Weighed[] {
-  const counted = STACKED.map(({ name, label, weight, family }): Weighed => {
+  const counted = STACKED.map(({ name, family, ...said }): Weighed => {
     const { now, there } = parts[name] ?? { now: 0, there: 0 };
-    return { part: name, family, label, now, there, weight, value: weight * (there - now) };
+    return { part: name, family, now, there, ...said, value: said.weight * (there - now) };
   });
   const further = moves - 1 + (needs === null ? 0 : PREPARATION_MOVES);
   const label = needs === null ? 'further moves' : 'further moves, a preparation counted as two';
@@ -63,6 +65,7 @@ export function weighedParts({ parts, moves, needs }: RankedChoice): Weighed[] {
     now: 0,
     there: further,
     weight: -MOVE_COST,
+    reason: 'Each further move lets the enemy have one.',
     value: -MOVE_COST * further,
   };
   return [...counted, time].filter(({ now, there }) => now !== there);

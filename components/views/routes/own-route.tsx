@@ -95,13 +95,14 @@ function Verdicts({ check }: { readonly check: RouteCheck }) {
           : `The step to ${failed?.to ?? ''} fails.`}
       </p>
       <ol>
-        {steps.map(({ to, code, reason }, index) => (
+        {steps.map(({ to, code, reason, guard }, index) => (
           <li key={index} className={`mt-1 border-l-3 py-1 pl-3 ${code === 'fine' ? 'border-rule' : 'border-pick'}`}>
             <span className="font-bold">{`${index + 1} ${to} `}</span>
             <span className={`font-medium ${code === 'fine' ? '' : 'text-pick'}`}>
               {code === 'fine' ? 'fine. ' : 'fails. '}
             </span>
             {reason}
+            {guard?.verdict === 'unknown' ? ' The tactical check gave up before its end.' : ''}
           </li>
         ))}
       </ol>

@@ -37,13 +37,16 @@ export function PartsList({ choice, side }: { readonly choice: RankedChoice; rea
           </tr>
         </thead>
         <tbody>
-          {parts.map(({ part, family, label, now, there, weight, value }) => (
+          {parts.map(({ part, family, label, reason, now, there, weight, value }) => (
             <tr key={part} className="border-b border-rule align-top">
               <th scope="row" className="flex gap-x-2 px-2 py-1.5 pl-0 text-left font-normal">
                 <span className="pt-0.5">
                   <LegendFigure item={{ label, marks: familyMarks(family, paint, ID) }} />
                 </span>
-                {label}
+                <span>
+                  {label}
+                  <span className="block text-[12px] leading-4 text-soft">{reason}</span>
+                </span>
               </th>
               <td className="px-2 py-1.5 text-right">{now}</td>
               <td className="px-2 py-1.5 text-right font-bold">{there}</td>

@@ -117,6 +117,11 @@ function guardText({ guard }: RouteChoice): string {
     case 'unknown':
       return `It gave up before its end: no verdict.${line}`;
     case 'loses':
-      return `Something is lost:${line}.`;
+      return `${lossText(guard)}:${line}.`;
   }
+}
+
+function lossText({ loses, line }: RouteChoice['guard']): string {
+  if (line[line.length - 1]?.endsWith('#')) return 'Mate follows';
+  return `${loses === 1 ? 'One pawn’s worth' : `${loses} pawns’ worth`} is lost by force`;
 }

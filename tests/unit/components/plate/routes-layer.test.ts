@@ -72,6 +72,6 @@ describe('trails', () => {
 
   it('explain in the legend what occurs and nothing else', () => {
     expect(trailLegend([]).map(({ label }) => label)).toEqual([]);
-    expect(trailLegend([shown]).map(({ label }) => label)).toEqual(['way, each stop safe', 'post']);
+    expect(trailLegend([shown]).map(({ label }) => label)).toEqual(['way, each stop safe by exchange', 'post']);
   });
 });
