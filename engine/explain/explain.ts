@@ -1,5 +1,5 @@
 /** From engine values to ranked statements, and the few that lead. */
-import { THEMES, type Side, type SquareName, type Theme } from '../types';
+import { bySide, THEMES, type Side, type SquareName, type Theme } from '../types';
 import type { Fact, FactId } from './fact';
 import { controlFacts } from './gather/control';
 import { filesFacts } from './gather/files';
@@ -105,27 +105,26 @@ function placeInView(square: SquareName | undefined, side: Side): number {
 
 /** Names the statement among the others: what it says, of whom, about which men and squares. */
 function keyOf({ id, side, men, squares }: Fact): string {
-  let key = side === null ? id : `${id}.${side}`;
+  let key: string = side === null ? id : `${id}.${side}`;
   for (const man of men) key += `.${man}`;
-  key += '-';
-  for (const square of squares) key += `${square}.`;
-  return key.slice(0, -1);
+  for (let index = 0; index < squares.length; index++) key += (index === 0 ? '-' : '.') + squares[index]!;
+  return key;
 }
 
 /** Drops what an outpost's sentence says better, and all but the heaviest of a kind and of a theme. */
 function withoutRepeats(weighed: readonly Weighed[]): Weighed[] {
-  const posts = new Set<SquareName>();
+  const posts: SquareName[] = [];
   for (const { fact } of weighed) {
-    if (fact.id === 'outpost-free') posts.add(fact.square);
-    if (fact.id === 'outpost-taken') posts.add(fact.man.square);
+    if (fact.id === 'outpost-free') posts.push(fact.square);
+    else if (fact.id === 'outpost-taken') posts.push(fact.man.square);
   }
-  const counts = new Map<string, number>();
+  const counts = bySide(() => new Map<FactId, number>());
   const themes = new Map<Theme, number>();
   return weighed.filter(({ theme, fact }) => {
-    if ((fact.id === 'weak-for-good' || fact.id === 'weak-while-fixed') && posts.has(fact.square)) return false;
-    const kind = fact.side === 'black' ? `-${fact.id}` : fact.id;
-    const count = (counts.get(kind) ?? 0) + 1;
-    counts.set(kind, count);
+    if ((fact.id === 'weak-for-good' || fact.id === 'weak-while-fixed') && posts.includes(fact.square)) return false;
+    const kinds = counts[fact.side ?? 'white'];
+    const count = (kinds.get(fact.id) ?? 0) + 1;
+    kinds.set(fact.id, count);
     if (count > MOST_OF_A_KIND) return false;
     const ofTheme = (themes.get(theme) ?? 0) + 1;
     themes.set(theme, ofTheme);

@@ -17,7 +17,8 @@ export type Phrases<F extends { readonly id: string }> = {
 };
 
 /** The whole text of a phrase: 'head: body. more. more.' */
-export function phraseText({ head, body, more = [] }: Phrase): string {
-  const sentences = [body ? `${head}: ${body}` : head, ...more.filter((each): each is string => Boolean(each))];
-  return sentences.map((sentence) => `${sentence}.`).join(' ');
+export function phraseText({ head, body, more }: Phrase): string {
+  let text = body ? `${head}: ${body}.` : `${head}.`;
+  if (more) for (const sentence of more) if (sentence) text += ` ${sentence}.`;
+  return text;
 }

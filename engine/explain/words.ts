@@ -35,14 +35,18 @@ export function pawnsStand(count: number, total: number): string {
 
 /** A text at the beginning of a sentence; a square's name stays as it is. */
 export function capital(text: string): string {
-  if (/^[a-h][1-8]/.test(text)) return text;
-  return text.charAt(0).toUpperCase() + text.slice(1);
+  const second = text.charCodeAt(1);
+  const isSquare = second >= 49 && second <= 56;
+  return isSquare ? text : text.charAt(0).toUpperCase() + text.slice(1);
 }
 
 /** 'a', 'a and b', 'a, b and c'. */
 export function listed(items: readonly string[], word = 'and'): string {
-  if (items.length < 2) return items[0] ?? '';
-  return `${items.slice(0, -1).join(', ')} ${word} ${items[items.length - 1]}`;
+  const last = items.length - 1;
+  if (last < 1) return items[0] ?? '';
+  let text = items[0] as string;
+  for (let index = 1; index < last; index++) text += `, ${items[index]}`;
+  return `${text} ${word} ${items[last]}`;
 }
 
 /** 'White' or 'Black'. */
@@ -78,18 +82,23 @@ export function theMan({ kind, square }: ManAt): string {
 
 /** 'the knight on d6 and the pawns on e5 and f4': men of a list, like kinds together, in the order given. */
 export function theMen(men: readonly ManAt[]): string {
-  const kinds = [...new Set(men.map(({ kind }) => kind))];
-  return listed(
-    kinds.map((kind) => {
-      const squares = men.filter((man) => man.kind === kind).map(({ square }) => square);
-      return squares.length === 1 ? `the ${kind} on ${squares[0]}` : `the ${kind}s on ${listed(squares)}`;
-    }),
-  );
+  const [first] = men;
+  if (men.length === 1 && first) return theMan(first);
+  const kinds: Kind[] = [];
+  for (const { kind } of men) if (!kinds.includes(kind)) kinds.push(kind);
+  return listed(kinds.map((kind) => kindOnSquares(kind, men)));
+}
+
+/** 'the pawns on e5 and f4': the men of one kind. */
+function kindOnSquares(kind: Kind, men: readonly ManAt[]): string {
+  const squares: SquareName[] = [];
+  for (const man of men) if (man.kind === kind) squares.push(man.square);
+  return squares.length === 1 ? `the ${kind} on ${squares[0]}` : `the ${kind}s on ${listed(squares)}`;
 }
 
 /** A square as its side sees it, for orders that hold when the board is turned: file first, then relative rank. */
 function viewOrder(square: SquareName, side: Side): number {
-  const rank = Number(square.charAt(1));
+  const rank = square.charCodeAt(1) - 48;
   return square.charCodeAt(0) * 10 + (side === 'white' ? rank : 9 - rank);
 }
 
@@ -100,7 +109,9 @@ export function compareInView(a: SquareName, b: SquareName, side: Side): number 
 
 /** Squares by file, then by rank as the side counts it: the same list when colours and board are turned. */
 export function inView(squares: readonly SquareName[], side: Side): SquareName[] {
-  return [...squares].sort((a, b) => viewOrder(a, side) - viewOrder(b, side));
+  const sorted = squares.slice();
+  if (sorted.length > 1) sorted.sort((a, b) => viewOrder(a, side) - viewOrder(b, side));
+  return sorted;
 }
 
 /** 'c-file', 'c- and e-file', 'files c, e and g'. */

@@ -26,7 +26,7 @@ export function textOf(text: string): string {
   return ODD.test(text) ? JSON.stringify(text) : `"${text}"`;
 }
 
-/** A word of a closed list of ours (a side, a kind, a status), or null: nothing in it is written in another way. */
+/** Words of ours (a side, a status, a sentence), or null: nothing in them is written in another way, as tests hold. */
 export function wordText(word: string | null): string {
   return word === null ? 'null' : `"${word}"`;
 }

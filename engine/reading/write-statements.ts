@@ -1,33 +1,31 @@
 /** Statements as the text of their JSON. Their facts are JSON as they stand; what the statement says beside them is left out. */
 import type { Fact, StatementValue } from '../explain';
 import type { Reading } from './schema';
-import { objectText, textOf, wordsText, wordText } from './text';
+import { objectText, wordsText, wordText } from './text';
 
-/** The fields of a fact that stand in the statement itself. */
-const SAID = new Set(['id', 'side', 'squares', 'men']);
-
-/** Plain values as JSON: what facts are made of. */
+/** Plain values as JSON: what facts are made of. Their words are ours, square names among them: see `wordText`. */
 function plainJson(value: unknown): string {
-  if (typeof value === 'string') return textOf(value);
+  if (typeof value === 'string') return `"${value}"`;
   if (typeof value !== 'object' || value === null) return `${value as number | boolean | null}`;
+  let text = '';
   if (Array.isArray(value)) {
-    let items = '';
-    for (const item of value as readonly unknown[]) items += (items === '' ? '' : ',') + plainJson(item);
-    return `[${items}]`;
+    for (const item of value as readonly unknown[]) text += text === '' ? `[${plainJson(item)}` : `,${plainJson(item)}`;
+    return text === '' ? '[]' : `${text}]`;
   }
-  return fieldsJson(value, null);
+  for (const name in value)
+    text += `${text === '' ? '{"' : ',"'}${name}":${plainJson((value as Readonly<Record<string, unknown>>)[name])}`;
+  return text === '' ? '{}' : `${text}}`;
 }
 
-function fieldsJson(object: object, without: ReadonlySet<string> | null): string {
-  let fields = '';
-  for (const name of Object.keys(object)) {
-    if (without?.has(name)) continue;
-    fields += `${fields === '' ? '' : ','}"${name}":${plainJson((object as Readonly<Record<string, unknown>>)[name])}`;
+/** What a fact says beside what stands in the statement itself. */
+function factsJson(fact: Fact): string {
+  let text = '';
+  for (const name in fact) {
+    if (name === 'id' || name === 'side' || name === 'squares' || name === 'men') continue;
+    text += `${text === '' ? '{"' : ',"'}${name}":${plainJson(fact[name as keyof Fact])}`;
   }
-  return `{${fields}}`;
+  return text === '' ? '{}' : `${text}}`;
 }
-
-const factsJson = (fact: Fact): string => fieldsJson(fact, SAID);
 
 /** A statement. */
 export const statementJson = objectText<StatementValue, Reading['statements'][number]>({
@@ -36,8 +34,8 @@ export const statementJson = objectText<StatementValue, Reading['statements'][nu
   theme: ({ theme }) => wordText(theme),
   side: ({ side }) => wordText(side),
   weight: ({ weight }) => `${weight}`,
-  head: ({ head }) => textOf(head),
-  text: ({ text }) => textOf(text),
+  head: ({ head }) => wordText(head),
+  text: ({ text }) => wordText(text),
   squares: ({ squares }) => wordsText(squares),
   men: ({ men }) => wordsText(men),
   facts: ({ fact }) => factsJson(fact),

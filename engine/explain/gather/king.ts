@@ -1,29 +1,30 @@
 /** Facts about kings that hold in a position. */
-import { attackersOf } from '../../attacks';
-import { fileName, fileOf, relativeRank, squareName } from '../../board';
+import { attackersOf, isAttacked } from '../../attacks';
+import { fileName, fileOf, relativeRank, squareName, viewOrder } from '../../board';
 import type { KingValue } from '../../men';
 import { opponent, SIDES, type Square } from '../../types';
 import type { KingFact } from '../facts/king';
 import type { ReadingValues } from '../values';
-import { inView } from '../words';
-import { countOf, manAt, namesInView } from './names';
+import type { ManAt } from '../words';
+import { countOf, manAt, menInView, namesInView } from './names';
 
 /** Everything worth saying about the kings. */
 export function kingFacts(values: ReadingValues): KingFact[] {
-  return SIDES.flatMap((side) => {
+  const facts: KingFact[] = [];
+  for (const side of SIDES) {
     const king = values.kings[side];
-    return king ? oneKing(values, king) : [];
-  });
+    if (king) oneKing(values, king, facts);
+  }
+  return facts;
 }
 
-function oneKing(values: ReadingValues, king: KingValue): KingFact[] {
-  const facts: KingFact[] = [];
+function oneKing(values: ReadingValues, king: KingValue, facts: KingFact[]): void {
   const { side } = king;
   const enemy = opponent(side);
   const at = squareName(king.square);
   const base = { side, king: at, squares: [at], men: [at] };
-  const checkers = attackersOf(values.map, enemy, king.square).map((square) => manAt(values, square));
-  if (checkers.length > 0) {
+  if (isAttacked(values.map, enemy, king.square)) {
+    const checkers = attackersOf(values.map, enemy, king.square).map((square) => manAt(values, square));
     facts.push({ ...base, id: 'in-check', checkers, squares: [at, ...checkers.map(({ square }) => square)] });
   }
   luft(values, king, base, facts);
@@ -32,15 +33,12 @@ function oneKing(values: ReadingValues, king: KingValue): KingFact[] {
   if (isExposed) {
     openLines(values, king, base, facts, shelter(king, base, facts));
   }
-  const attackers = inView(king.reachedBy.map(squareName), enemy).map((name) =>
-    manAt(values, king.reachedBy.find((square) => squareName(square) === name) ?? king.square),
-  );
-  if (isExposed && attackers.length >= 3) {
+  if (isExposed && king.reachedBy.length >= 3) {
+    const attackers = menInView(values, king.reachedBy, enemy);
     const from = attackers.map(({ square }) => square);
     facts.push({ ...base, id: 'king-zone', attackers, guards: king.guardedBy.length, men: [at, ...from] });
   }
   if (king.weakBackRank) facts.push({ ...base, id: 'weak-back-rank' });
-  return facts;
 }
 
 type KingBase = Pick<KingFact, 'squares' | 'men'> & {
@@ -55,22 +53,25 @@ type KingBase = Pick<KingFact, 'squares' | 'men'> & {
 function shelter({ square, side, shelter: files }: KingValue, base: KingBase, facts: KingFact[]): number[] {
   const onWing = fileOf(square) <= 2 || fileOf(square) >= 5;
   if (!onWing || relativeRank(square, side) > 2) return [];
-  const pawns = files.flatMap(({ pawn }) => (pawn === null ? [] : [pawn]));
-  const names = namesInView(pawns, side);
-  if (pawns.length === files.length && files.every(({ advanced }) => advanced === 0)) {
+  if (files.every(({ pawn, advanced }) => pawn !== null && advanced === 0)) {
+    const names = namesInView(pawnsOf(files, 0), side);
     facts.push({ ...base, id: 'shelter-whole', pawns: names, squares: [base.king, ...names] });
     return [];
   }
-  const gone = namesInView(
-    files.flatMap(({ pawn, advanced }) => (pawn !== null && advanced >= 2 ? [pawn] : [])),
-    side,
-  );
+  const gone = namesInView(pawnsOf(files, 2), side);
   const gaps = files.filter(({ pawn }) => pawn === null).map(({ file }) => file);
   if (gaps.length + gone.length > 0) {
     const bare = gaps.map(fileName);
     facts.push({ ...base, id: 'shelter-broken', bare, advanced: gone, squares: [base.king, ...gone] });
   }
   return gaps;
+}
+
+/** The shelter's pawns that have left their first square that many ranks behind or more. */
+function pawnsOf(files: KingValue['shelter'], advancedLeast: number): Square[] {
+  const pawns: Square[] = [];
+  for (const { pawn, advanced } of files) if (pawn !== null && advanced >= advancedLeast) pawns.push(pawn);
+  return pawns;
 }
 
 /**
@@ -84,11 +85,13 @@ function openLines(
   facts: KingFact[],
   bare: readonly number[],
 ): void {
-  if (relativeRank(king.square, king.side) > 3) return;
+  if (king.openBeside.length === 0 || relativeRank(king.square, king.side) > 3) return;
   const enemy = opponent(king.side);
   for (const status of ['open', 'half-open'] as const) {
     const lines = values.files.filter((each) => king.openBeside.includes(each.file) && each.status === status);
-    const heavy = lines.flatMap((each) => each.heavy[enemy].map((square) => manAt(values, square)));
+    if (lines.length === 0) continue;
+    const heavy: ManAt[] = [];
+    for (const line of lines) for (const square of line.heavy[enemy]) heavy.push(manAt(values, square));
     if (heavy.length === 0 && lines.every(({ file }) => bare.includes(file))) continue;
     // The squares of the files level with the king, so that it shows which are meant.
     const beside = lines
@@ -111,19 +114,14 @@ function luft(values: ReadingValues, king: KingValue, base: KingBase, facts: Kin
     if (flights.length === 0) facts.push({ ...base, id: 'no-flight' });
     return;
   }
-  const developed = values.men.some((man) => man.side !== side && (man.kind === 'rook' || man.kind === 'queen'));
   const onWing = fileOf(square) <= 2 || fileOf(square) >= 5;
-  if (free.length > 0 || !developed || !onWing) return;
-  const singles = luftMoves.filter(({ from, to }) => Math.abs(to - from) === 8);
-  const order = inView(
-    singles.map(({ from }) => squareName(from)),
-    side,
-  );
-  const gives = order.flatMap((name) =>
-    singles
-      .filter(({ from }) => squareName(from) === name)
-      .map(({ from, to }) => ({ from: squareName(from), to: squareName(to) })),
-  );
+  if (free.length > 0 || !onWing) return;
+  const enemy = opponent(side);
+  if (countOf(values, enemy, 'rook') + countOf(values, enemy, 'queen') === 0) return;
+  const gives = luftMoves
+    .filter(({ from, to }) => Math.abs(to - from) === 8)
+    .sort((a, b) => viewOrder(a.from, side) - viewOrder(b.from, side))
+    .map(({ from, to }) => ({ from: squareName(from), to: squareName(to) }));
   facts.push({
     ...base,
     id: 'no-luft',

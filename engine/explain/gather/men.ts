@@ -5,9 +5,9 @@ import { fillAttacked, type ManValue, newWords, squaresOfWords } from '../../men
 import { opponent, type Side, SIDES, type Square } from '../../types';
 import type { MenFact } from '../facts/men';
 import type { ReadingValues } from '../values';
-import { compareInView, inView } from '../words';
+import { compareInView } from '../words';
 import { bishopFacts } from './bishops';
-import { manAt } from './names';
+import { manAt, menInView } from './names';
 import { isOutOfPlay, placementFacts } from './placement';
 
 /** Everything worth saying about men. */
@@ -103,14 +103,12 @@ const words = newWords();
 /** Pieces shut in by their own men, where these are exceptions: at most two a side. */
 function blockedIn(values: ReadingValues, side: Side, facts: MenFact[]): void {
   const shut = values.men.filter((man) => man.side === side && man.notes.includes('blocked-in'));
-  if (shut.length > 2) return;
+  if (shut.length === 0 || shut.length > 2) return;
   for (const { square } of shut) {
     const man = manAt(values, square);
     fillAttacked(values.map.board, values.map.board[square]!, square, square, words);
     const blockers = squaresOfWords(words);
-    const by = inView(blockers.map(squareName), side).map((name) =>
-      manAt(values, blockers.find((each) => squareName(each) === name) ?? square),
-    );
+    const by = menInView(values, blockers, side);
     facts.push({
       id: 'blocked-in',
       side,

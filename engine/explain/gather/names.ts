@@ -1,11 +1,11 @@
 /** From engine values to what facts hold: names of squares, men as they stand, comers in a stable order. */
 import { isPinned, kindOn } from '../../attacks';
-import { ahead, fileOf, rankOf, squareName } from '../../board';
+import { ahead, fileOf, manCode, rankOf, squareName, viewOrder } from '../../board';
 import type { User } from '../../reach';
-import { KINDS, type Side, type Square, type SquareName } from '../../types';
+import type { Side, Square, SquareName } from '../../types';
 import type { ReadingValues } from '../values';
 import type { PawnMoves } from '../facts/base';
-import { type Comer, inView, type ManAt } from '../words';
+import type { Comer, ManAt } from '../words';
 
 /** The man on an occupied square. */
 export function manAt({ map }: ReadingValues, square: Square): ManAt {
@@ -19,28 +19,36 @@ export function manAtOrNull(values: ReadingValues, square: Square | null): ManAt
 
 /** Names by file, then rank as the side counts it. */
 export function namesInView(squares: readonly Square[], side: Side): SquareName[] {
-  return inView(squares.map(squareName), side);
+  const ordered = squares.slice();
+  if (ordered.length > 1) ordered.sort((a, b) => viewOrder(a, side) - viewOrder(b, side));
+  return ordered.map(squareName);
+}
+
+/** Men by file, then rank as the side counts it. */
+export function menInView(values: ReadingValues, squares: readonly Square[], side: Side): ManAt[] {
+  const ordered = squares.slice();
+  if (ordered.length > 1) ordered.sort((a, b) => viewOrder(a, side) - viewOrder(b, side));
+  return ordered.map((square) => manAt(values, square));
+}
+
+/** Order of users: soonest first, of those cheaper kinds first, then in the side's view. */
+function userOrder({ map }: ReadingValues, { from, moves }: User, side: Side): number {
+  return (moves << 10) | ((map.board[from]! & 7) << 6) | viewOrder(from, side);
 }
 
 /** Users as facts hold them: soonest first, of those cheaper kinds first, then in the side's view. */
 export function comers(values: ReadingValues, users: readonly User[], side: Side): Comer[] {
-  const list = users.map(({ from, moves }) => ({ kind: kindOn(values.map, from), square: squareName(from), moves }));
-  if (list.length < 2) return list;
-  const order = inView(
-    list.map(({ square }) => square),
-    side,
-  );
-  return list.sort(
-    (a, b) =>
-      a.moves - b.moves ||
-      KINDS.indexOf(a.kind) - KINDS.indexOf(b.kind) ||
-      order.indexOf(a.square) - order.indexOf(b.square),
-  );
+  const ordered = users.slice();
+  if (ordered.length > 1) ordered.sort((a, b) => userOrder(values, a, side) - userOrder(values, b, side));
+  return ordered.map(({ from, moves }) => ({ kind: kindOn(values.map, from), square: squareName(from), moves }));
 }
 
 /** Men of one kind that a side has. */
-export function countOf({ men }: ReadingValues, side: Side, kind: ManAt['kind']): number {
-  return men.reduce((sum, man) => sum + (man.side === side && man.kind === kind ? 1 : 0), 0);
+export function countOf({ map }: ReadingValues, side: Side, kind: ManAt['kind']): number {
+  const code = manCode(side, kind);
+  let count = 0;
+  for (let square = 0; square < 64; square++) if (map.board[square] === code) count++;
+  return count;
 }
 
 /** Whether a pin keeps a pawn of the side from going straight on. */

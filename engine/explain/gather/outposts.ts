@@ -21,37 +21,54 @@ export function outpostsFacts(values: ReadingValues): OutpostsFact[] {
 }
 
 function outpostFact(values: ReadingValues, post: OutpostValue): OutpostsFact | null {
-  const { side, square, support, challenge, hold, occupant, users, tradable } = post;
-  const name = squareName(square);
-  const man = occupant === null ? null : manAt(values, square);
-  const settled = man !== null && man.kind !== 'king' && man.kind !== 'queen';
+  const { side, support, challenge, hold, occupant } = post;
+  // Most posts are neither taken nor outposts: nothing is said of them.
+  const isOutpost = post.rank === 'outpost' && support !== null && hold !== 'open';
+  if (!isOutpost && occupant === null) return null;
   const isHeld = (of: Side, pawn: { moves: number } | null, from: Square | undefined) =>
     pawn !== null && pawn.moves > 0 && from !== undefined && isHeldOffItsFile(values, of, from);
   if (isHeld(side, support, support?.pawn) || isHeld(opponent(side), challenge, challenge?.from)) return null;
-  if (post.rank === 'outpost' && support && hold !== 'open') {
-    const base = { side, hold, support: pawnOnItsWay(values, side, support.pawn, support.moves, square) };
-    // A rook on the seventh has its own sentence.
-    if (man?.kind === 'rook' && relativeRank(square, side) === 7) return null;
-    if (settled) return { ...base, id: 'outpost-taken', man, tradable, squares: [name], men: [name] };
-    const coming = comers(values, users, side).filter(
-      ({ kind }) => kind === 'knight' || kind === 'bishop' || kind === 'rook',
-    );
-    const [first] = coming;
-    if (man !== null || !first || values.map.board[square] !== 0) return null;
-    if (coming.every(({ kind }) => kind === 'rook') && !isOpenFor(values, side, square)) return null;
-    const men = coming.filter(({ moves }) => moves === first.moves).map((comer) => comer.square);
-    return {
-      ...base,
-      id: 'outpost-free',
-      square: name,
-      comers: coming,
-      ownKnights: countOf(values, side, 'knight'),
-      squares: [name],
-      men,
-    };
+  return isOutpost ? outpost(values, post, support, hold) : advancedPost(values, post);
+}
+
+function outpost(
+  values: ReadingValues,
+  { side, square, occupant, users, tradable }: OutpostValue,
+  support: NonNullable<OutpostValue['support']>,
+  hold: 'permanent' | 'fixed',
+): OutpostsFact | null {
+  const name = squareName(square);
+  const man = occupant === null ? null : manAt(values, square);
+  // A rook on the seventh has its own sentence.
+  if (man?.kind === 'rook' && relativeRank(square, side) === 7) return null;
+  if (man !== null && man.kind !== 'king' && man.kind !== 'queen') {
+    const pawn = pawnOnItsWay(values, side, support.pawn, support.moves, square);
+    return { side, hold, support: pawn, id: 'outpost-taken', man, tradable, squares: [name], men: [name] };
   }
-  if (!settled || !challenge || relativeRank(square, side) < 5 || (man.kind !== 'knight' && man.kind !== 'bishop'))
-    return null;
+  if (man !== null || values.map.board[square] !== 0 || users.length === 0) return null;
+  const coming = comers(values, users, side).filter(
+    ({ kind }) => kind === 'knight' || kind === 'bishop' || kind === 'rook',
+  );
+  const [first] = coming;
+  if (!first || (coming.every(({ kind }) => kind === 'rook') && !isOpenFor(values, side, square))) return null;
+  return {
+    side,
+    hold,
+    support: pawnOnItsWay(values, side, support.pawn, support.moves, square),
+    id: 'outpost-free',
+    square: name,
+    comers: coming,
+    ownKnights: countOf(values, side, 'knight'),
+    squares: [name],
+    men: coming.filter(({ moves }) => moves === first.moves).map((comer) => comer.square),
+  };
+}
+
+function advancedPost(values: ReadingValues, { side, square, support, challenge }: OutpostValue): OutpostsFact | null {
+  if (!challenge || relativeRank(square, side) < 5) return null;
+  const man = manAt(values, square);
+  if (man.kind !== 'knight' && man.kind !== 'bishop') return null;
+  const name = squareName(square);
   return {
     id: 'advanced-post',
     side,

@@ -1,5 +1,5 @@
 /** Facts about what pawns can still do: levers, minority attacks, majorities. */
-import { ahead, fileName, fileOf, squareName } from '../../board';
+import { ahead, fileOf, squareName } from '../../board';
 import type { Lever } from '../../pawns';
 import { opponent, type Side, type Square } from '../../types';
 import type { LeverFact, Majority, StructureFact } from '../facts/structure';
@@ -7,13 +7,11 @@ import type { ReadingValues } from '../values';
 import { compareInView } from '../words';
 import { isHeldOffItsFile, manAtOrNull, namesInView } from './names';
 
-/** Levers still to come, minority attacks and majorities of a side. */
-export function planFacts(values: ReadingValues, side: Side): StructureFact[] {
-  const facts: StructureFact[] = [];
+/** Adds levers still to come, minority attacks and majorities of a side. */
+export function planFacts(values: ReadingValues, side: Side, facts: StructureFact[]): void {
   levers(values, side, facts);
   minority(values, side, facts);
   majorities(values, side, facts);
-  return facts;
 }
 
 /** The first man in the way of a lever's pawn, its strike square included. */
@@ -34,6 +32,7 @@ function isWorthWaitingFor({ moves, supported, against }: Lever): boolean {
 /** Levers still to be played: of each pawn the soonest, central and supported ones first, three a side at most. */
 function levers(values: ReadingValues, side: Side, facts: StructureFact[]): void {
   const { pawns } = values;
+  if (!pawns.levers.some((lever) => lever.side === side && lever.moves > 0)) return;
   const alreadyNow = new Set(pawns.levers.filter((lever) => lever.moves === 0).map((lever) => lever.from));
   const minority = new Set(pawns[side].minorityAttacks.map(({ lever }) => lever.from));
   const coming: LeverFact[] = [];
@@ -71,14 +70,16 @@ function levers(values: ReadingValues, side: Side, facts: StructureFact[]): void
     (lever.blocker ? 0 : 2) -
     lever.moves +
     ('cdef'.includes(lever.against.charAt(0)) ? 2 : 0);
-  coming.sort((a, b) => worth(b) - worth(a) || compareInView(a.pawn, b.pawn, side));
+  if (coming.length > 1) coming.sort((a, b) => worth(b) - worth(a) || compareInView(a.pawn, b.pawn, side));
   facts.push(...coming.slice(0, 3));
 }
 
-const WING_FILES = { queenside: 'abc', centre: 'de', kingside: 'fgh' } as const;
+/** First and last file of each wing: a to c, d and e, f to h. */
+const WING_FILES = { queenside: [0, 2], centre: [3, 4], kingside: [5, 7] } as const;
 
 function pawnsOnWing(values: ReadingValues, side: Side, wing: keyof typeof WING_FILES): Square[] {
-  return values.pawns[side].pawns.filter((square) => WING_FILES[wing].includes(fileName(fileOf(square))));
+  const [first, last] = WING_FILES[wing];
+  return values.pawns[side].pawns.filter((square) => fileOf(square) >= first && fileOf(square) <= last);
 }
 
 function minority(values: ReadingValues, side: Side, facts: StructureFact[]): void {

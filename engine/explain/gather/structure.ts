@@ -1,5 +1,5 @@
 /** Facts about pawns that hold in a position. */
-import { ahead, colourOf, fileName, fileOf, relativeRank, squareName, viewOrder } from '../../board';
+import { ahead, colourOf, fileName, fileOf, relativeRank, squareName, step, viewOrder } from '../../board';
 import { type PawnReading, type PawnSideValue, pawnOn, type Ram } from '../../pawns';
 import { commandOf } from '../../squares';
 import { structureLead } from '../../structures';
@@ -20,7 +20,7 @@ export function structureFacts(values: ReadingValues): StructureFact[] {
     const pawns = values.pawns[side];
     doubled(pawns, values, facts);
     chains(values, side, facts);
-    facts.push(...planFacts(values, side));
+    planFacts(values, side, facts);
     hanging(pawns, facts);
     onColour(pawns, facts);
   }
@@ -85,6 +85,7 @@ function centre(values: ReadingValues, facts: StructureFact[]): void {
 }
 
 function onePawn(values: ReadingValues, pawn: PawnReading, facts: StructureFact[]): void {
+  if (!pawn.isolated && !pawn.backward && !pawn.passed && !pawn.candidate) return;
   const { side } = pawn;
   const at = squareName(pawn.square);
   const file = fileName(fileOf(pawn.square));
@@ -138,6 +139,7 @@ function guardsOf({ pawns }: ReadingValues, pawn: PawnReading): Square[] {
 }
 
 function doubled(pawns: PawnSideValue, values: ReadingValues, facts: StructureFact[]): void {
+  if (pawns.doubled.length === 0) return;
   for (let file = 0; file < 8; file++) {
     const list = pawns.doubled.filter((square) => fileOf(square) === file);
     if (list.length < 2) continue;
@@ -149,26 +151,27 @@ function doubled(pawns: PawnSideValue, values: ReadingValues, facts: StructureFa
 
 /** The longest chain of three or more pawns that guard one another, from a base that no pawn guards. */
 function chains(values: ReadingValues, side: Side, facts: StructureFact[]): void {
-  const own = values.pawns.pawns.filter((pawn) => pawn.side === side);
-  const at = new Map(own.map((pawn) => [pawn.square, pawn]));
-  const longest = (from: Square): Square[] => {
-    const next = [-1, 1]
-      .map((files) =>
-        ahead(from, side) !== undefined && fileOf(from) + files >= 0 && fileOf(from) + files < 8
-          ? (((ahead(from, side) ?? 0) + files) as Square)
-          : undefined,
-      )
-      .filter((square): square is Square => square !== undefined && at.has(square))
-      .map(longest);
-    next.sort((a, b) => b.length - a.length || ((a[0] ?? 0) % 8) - ((b[0] ?? 0) % 8));
-    return [from, ...(next[0] ?? [])];
-  };
-  const found = own.filter((pawn) => pawn.chain === 'base').map((pawn) => longest(pawn.square));
+  const bases = values.pawns.pawns.filter((pawn) => pawn.side === side && pawn.chain === 'base');
+  if (bases.length === 0) return;
+  const found = bases.map((pawn) => longestChain(values, side, pawn.square));
   found.sort((a, b) => b.length - a.length || fileOf(a[0] ?? (0 as Square)) - fileOf(b[0] ?? (0 as Square)));
   const [best] = found;
   if (!best || best.length < 3) return;
   const names = best.map(squareName);
   facts.push({ id: 'pawn-chain', side, pawns: names, squares: names, men: names });
+}
+
+/** The longest chain from a pawn on; of two equally long the one to the lower file. */
+function longestChain(values: ReadingValues, side: Side, from: Square): Square[] {
+  const next = ahead(from, side);
+  let best: Square[] = [];
+  for (const files of [-1, 1]) {
+    const to = next === undefined ? undefined : step(next, files, 0);
+    if (to === undefined || pawnOn(values.pawns, to)?.side !== side) continue;
+    const chain = longestChain(values, side, to);
+    if (chain.length > best.length) best = chain;
+  }
+  return [from, ...best];
 }
 
 function hanging({ side, hangingPawns }: PawnSideValue, facts: StructureFact[]): void {
