@@ -1,5 +1,5 @@
 /** The real browser: the built application on a free port, in the Chromium that the system has. */
-import { mkdtempSync } from 'node:fs';
+import { mkdtempSync, rmSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -18,7 +18,11 @@ async function freePort(): Promise<number> {
 // Workers read this file again: they find the port that the first reading chose.
 process.env.E2E_PORT ??= String(await freePort());
 // A database of their own, with the demo workspace; how to sign in to it stands in the folder's demo-sign-in.txt.
-process.env.E2E_DATA ??= mkdtempSync(join(tmpdir(), 'waypost-e2e-'));
+if (process.env.E2E_DATA === undefined) {
+  const data = mkdtempSync(join(tmpdir(), 'waypost-e2e-'));
+  process.env.E2E_DATA = data;
+  process.once('exit', () => rmSync(data, { recursive: true, force: true }));
+}
 const baseURL = `http://127.0.0.1:${process.env.E2E_PORT}`;
 
 export default defineConfig({

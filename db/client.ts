@@ -8,7 +8,7 @@ import { migrate as migratePg } from 'drizzle-orm/node-postgres/migrator';
 import { drizzle as drizzlePglite } from 'drizzle-orm/pglite';
 import { migrate as migratePglite } from 'drizzle-orm/pglite/migrator';
 import { Pool } from 'pg';
-import { lockFolder } from './folder-lock';
+import { type FolderLock, lockFolder } from './folder-lock';
 import * as schema from './schema';
 
 /** A connection or a transaction. Inside a transaction pass the transaction on, never the outer one: that would wait for itself. */
@@ -19,6 +19,8 @@ export interface Database {
   readonly db: Db;
   /** Applies the migrations of a folder that are not yet applied. Several processes may do so at once. */
   readonly migrate: (folder: string) => Promise<void>;
+  /** Answers other processes that ask for the folder; only where there is one. */
+  readonly answerWith?: FolderLock['answerWith'];
   /** Ends all connections; what is under way is finished first. */
   readonly close: () => Promise<void>;
 }
@@ -68,7 +70,8 @@ async function openFolder(folder: string): Promise<Database> {
   const lock = await lockFolder(folder);
   try {
     await createFolder(folder);
-    return embedded(await PGlite.create(folder), () => lock.release());
+    const database = embedded(await PGlite.create(folder), () => lock.release());
+    return { ...database, answerWith: lock.answerWith };
   } catch (error) {
     await lock.release();
     throw error;

@@ -159,7 +159,7 @@ async function textsOf(db: Db, query: SQL): Promise<string[]> {
   return rows.map(({ line }) => line);
 }
 
-/** Every table, each after those it points at. */
+/** Every table, each after those it points at, else by name: loaders of modules differ in the order of what a module exports. */
 function tablesInOrder(): PgTable[] {
   const ordered = new Set<PgTable>();
   const add = (table: PgTable): void => {
@@ -170,7 +170,8 @@ function tablesInOrder(): PgTable[] {
     }
     ordered.add(table);
   };
-  for (const value of Object.values(schema) as unknown[]) if (is(value, PgTable)) add(value);
+  const tables = (Object.values(schema) as unknown[]).filter((value): value is PgTable => is(value, PgTable));
+  for (const table of tables.sort((a, b) => (shapeOf(a).name < shapeOf(b).name ? -1 : 1))) add(table);
   return [...ordered];
 }
 

@@ -6,17 +6,25 @@
  * twice, and a number is only removed when a higher one stands, so of several that start at once exactly one succeeds.
  */
 import { linkSync, readdirSync, rmSync } from 'node:fs';
-import { connect, createServer } from 'node:net';
+import { connect, createServer, type Socket } from 'node:net';
 import { basename, dirname, join } from 'node:path';
 
 /** How long the holder has to say its name: it may be busy opening the database. */
 const NAME_TIMEOUT_MS = 3_000;
 
+/** The longest request of another process, in characters: a word and a path. */
+const REQUEST_LENGTH_MAX = 8_192;
+
 /** The longest address of a Unix socket that all systems take, less what we add to the folder's name. */
 const FOLDER_BYTES_MAX = 80;
 
+/** What the holder answers a request of another process, which has no place on the folder itself. One line each way. */
+export type AnswerRequest = (request: string) => Promise<string>;
+
 /** A lock that is held. */
 export interface FolderLock {
+  /** From now on requests are answered. Before, and where this is never called, the answer is empty. */
+  readonly answerWith: (answer: AnswerRequest) => void;
   readonly release: () => Promise<void>;
 }
 
@@ -42,10 +50,20 @@ export async function lockFolder(folder: string): Promise<FolderLock> {
   }
   const own = `${folder}.lock-${process.pid}-new`;
   rmSync(own, { force: true });
-  const server = createServer((socket) => socket.end(String(process.pid)));
+  let answer: AnswerRequest = async () => '';
+  const callers = new Set<Socket>();
+  const server = createServer({ allowHalfOpen: true }, (socket) => {
+    callers.add(socket);
+    socket.once('close', () => callers.delete(socket));
+    serve(socket, (request) => answer(request));
+  });
   await new Promise<void>((resolve, reject) => server.once('error', reject).listen(own, resolve));
   server.unref();
-  const release = () => new Promise<void>((resolve) => server.close(() => resolve()));
+  const release = () =>
+    new Promise<void>((resolve) => {
+      server.close(() => resolve());
+      for (const caller of callers) caller.destroy();
+    });
   try {
     while (!(await takeNumber(folder, own))) {
       // Another process took the number between our look and our try: look again.
@@ -56,7 +74,52 @@ export async function lockFolder(folder: string): Promise<FolderLock> {
   } finally {
     rmSync(own, { force: true });
   }
-  return { release };
+  return {
+    answerWith: (given) => {
+      answer = given;
+    },
+    release,
+  };
+}
+
+/** Asks the process that holds a folder for something; undefined when nobody holds it, or it does not answer such requests. */
+export async function askFolder(folder: string, request: string): Promise<string | undefined> {
+  const number = numbersAt(folder).at(-1);
+  if (number === undefined) return undefined;
+  return new Promise((resolve) => {
+    let said = '';
+    const socket = connect(socketPath(folder, number), () => socket.write(`${request}\n`));
+    socket.setEncoding('utf8');
+    socket.on('data', (part: string) => {
+      said += part;
+    });
+    socket.on('error', () => resolve(undefined));
+    socket.on('end', () => {
+      socket.end();
+      // The first line is the holder's name.
+      resolve(said.split('\n')[1] || undefined);
+    });
+  });
+}
+
+/** Says who holds the folder, and answers the one line that may come. */
+function serve(socket: Socket, answer: AnswerRequest): void {
+  let heard = '';
+  socket.setEncoding('utf8');
+  // Whoever asked may be gone before the answer.
+  socket.on('error', () => undefined);
+  socket.on('end', () => socket.end());
+  socket.on('data', (part: string) => {
+    if (heard.includes('\n')) return;
+    heard = (heard + part).slice(0, REQUEST_LENGTH_MAX);
+    const end = heard.indexOf('\n');
+    if (end < 0) return;
+    answer(heard.slice(0, end)).then(
+      (line) => socket.end(`${line}\n`),
+      () => socket.end(),
+    );
+  });
+  socket.write(`${process.pid}\n`);
 }
 
 /** One try. False when another one was quicker; throws when the folder is held. */
@@ -111,12 +174,14 @@ function askHolder(path: string): Promise<'dead' | { readonly pid: number | unde
     const socket = connect(path);
     const named = () => {
       socket.destroy();
-      resolve({ pid: /^\d+$/.test(said) ? Number(said) : undefined });
+      const pid = /^\d+/.exec(said)?.[0];
+      resolve({ pid: pid === undefined ? undefined : Number(pid) });
     };
     socket.setTimeout(NAME_TIMEOUT_MS, named);
     socket.setEncoding('utf8');
     socket.on('data', (part: string) => {
       said += part;
+      if (said.includes('\n')) named();
     });
     socket.on('end', named);
     socket.on('error', (error: NodeJS.ErrnoException) => {

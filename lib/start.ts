@@ -1,6 +1,7 @@
 /** The server's beginning and its graceful end. */
 import { subscribe } from 'node:diagnostics_channel';
 import type { Server } from 'node:http';
+import { answerRequest } from '@/lib/backup';
 import { markAddresses } from '@/lib/address';
 import { computing } from '@/lib/compute/computing';
 import { closeDatabase, openDb, openedDatabase } from '@/lib/database';
@@ -24,7 +25,8 @@ function beforeStop(step: () => Promise<void>): void {
 /** Opens the database and arranges the end. Ends the process when the database cannot be opened: it could answer nothing right. */
 export async function startServer(): Promise<void> {
   try {
-    await openedDatabase();
+    const { db, answerWith } = await openedDatabase();
+    answerWith?.((request) => answerRequest(db, request));
   } catch (error) {
     log.fatal({ err: error }, 'the database could not be opened');
     console.error(error instanceof Error ? error.message : error);

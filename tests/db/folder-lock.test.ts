@@ -1,11 +1,11 @@
 /** One process at a time on the embedded folder. */
 import { type ChildProcess, spawn } from 'node:child_process';
 import { mkdtempSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
-import { createServer } from 'node:net';
+import { connect, createServer } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, describe, expect, it } from 'vitest';
-import { FolderHeld, lockFolder } from '@/db/folder-lock';
+import { askFolder, FolderHeld, lockFolder } from '@/db/folder-lock';
 
 const parent = mkdtempSync(join(tmpdir(), 'waypost-lock-'));
 afterAll(() => rmSync(parent, { recursive: true, force: true }));
@@ -123,6 +123,32 @@ describe('the lock of the data folder', () => {
     await new Promise<void>((resolve) => silent.listen(`${folder}.lock-3`, resolve));
     await expect(lockFolder(folder)).rejects.toThrow(`${folder} is in use by another process`);
     silent.close();
+  });
+
+  it('lets others ask its holder, who answers when it wants to', async () => {
+    const folder = newFolder();
+    expect(await askFolder(folder, 'anything')).toBeUndefined();
+    const lock = await lockFolder(folder);
+    expect(await askFolder(folder, 'too early')).toBeUndefined();
+    lock.answerWith(async (request) => `heard ${request}`);
+    const asked = ['a', 'päth/with "signs"', 'c'];
+    const answers = await Promise.all(asked.map((request) => askFolder(folder, request)));
+    expect(answers).toEqual(asked.map((request) => `heard ${request}`));
+    lock.answerWith(async () => {
+      throw new Error('a mistake');
+    });
+    expect(await askFolder(folder, 'x')).toBeUndefined();
+    await lock.release();
+    expect(await askFolder(folder, 'too late')).toBeUndefined();
+  });
+
+  it('is given back though somebody is connected and says nothing', async () => {
+    const folder = newFolder();
+    const lock = await lockFolder(folder);
+    const silent = connect(`${folder}.lock-1`);
+    await new Promise((resolve) => silent.once('data', resolve));
+    await lock.release();
+    await (await lockFolder(folder)).release();
   });
 
   it('refuses a path that no socket can have', async () => {

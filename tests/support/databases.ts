@@ -21,7 +21,7 @@ export function describeOnBoth(name: string, promises: (databases: Databases) =>
       postgres = await startPostgres();
     }, 60_000);
     // Registered before the closing of databases, and so run after it: vitest runs what was registered last first.
-    afterAll(() => postgres?.stop());
+    afterAll(() => postgres?.stop(), 60_000);
     const fresh = closedAfter(async () => {
       if (postgres === undefined) throw new Error('the server has not been started');
       const database = await openDatabase({ url: await postgres.newDatabase() });

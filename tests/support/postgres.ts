@@ -75,12 +75,12 @@ function serverOwner(): Owner {
   return { uid: ask('-u'), gid: ask('-g') };
 }
 
-/** The server ends when its standard input does, so it never outlives the tests, however those end. */
+/** The server ends when its standard input does, so it never outlives the tests, however those end; without tidying what is thrown away. */
 const WHILE_INPUT_LASTS = `
   "$0" "$@" </dev/null &
   server=$!
   exec 3<&0
-  (cat <&3 >/dev/null; kill -INT "$server" 2>/dev/null) &
+  (cat <&3 >/dev/null; kill -QUIT "$server" 2>/dev/null) &
   wait "$server"`;
 
 interface Start {
