@@ -42,6 +42,7 @@ export function apiDocument(): ApiDocument {
       { name: 'Readings', description: 'Positions to readings.' },
       { name: 'Routes', description: 'Where men belong and how they get there.' },
       { name: 'Comparisons', description: 'Positions, placements and trades held against each other.' },
+      { name: 'Games', description: 'Whole games: timeline, journeys, commitments.' },
       { name: 'Plates', description: 'Positions to figures.' },
       { name: 'Studies', description: 'What a workspace keeps.' },
       { name: 'Jobs', description: 'Long work.' },

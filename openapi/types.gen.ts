@@ -124,6 +124,26 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/api/v1/games": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly get?: never;
+        readonly put?: never;
+        /**
+         * Read games
+         * @description PGN to a compact reading of every position, the journey of every man, the moves that changed something for good, and the origin of every lasting feature. Up to 20 games; a bad game is named in "faults" with its line and move, and the good ones are answered.
+         */
+        readonly post: operations["createGames"];
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/api/v1/plates.svg": {
         readonly parameters: {
             readonly query?: never;
@@ -910,6 +930,26 @@ export interface components {
          * @enum {string}
          */
         readonly Colour: "light" | "dark";
+        /** @description A move that cannot be taken back, and what it changed for good. */
+        readonly Commitment: {
+            /** @description Half-moves played. */
+            readonly ply: number;
+            /** @description With its number, as "12. Nf3" or "12... c5". */
+            readonly move: string;
+            readonly side: components["schemas"]["Side"];
+            /** @enum {string} */
+            readonly act: "pawn-move" | "capture" | "promotion";
+            readonly changes: readonly {
+                readonly kind: components["schemas"]["FeatureKind"];
+                /** @description Whose it is: who suffers from a weakness, who has the rest; null: both. */
+                readonly side: components["schemas"]["Side"] | null;
+                readonly squares: readonly components["schemas"]["Square"][];
+                readonly text: string;
+                /** @description Made by the move; else ended. */
+                readonly made: boolean;
+            }[];
+            readonly text: string;
+        };
         /** @description Two to four positions or placements side by side. */
         readonly Comparison: {
             readonly engine: string;
@@ -1049,6 +1089,11 @@ export interface components {
             /** @description The square at fault, where there is one. */
             readonly square?: components["schemas"]["Square"];
         };
+        /**
+         * @description A kind of lasting feature.
+         * @enum {string}
+         */
+        readonly FeatureKind: "structure" | "weak-square" | "outpost" | "open-file" | "half-open-file" | "bishop-pair" | "passed-pawn" | "isolated-pawn" | "backward-pawn" | "doubled-pawn" | "weak-complex" | "ram";
         /** @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four. */
         readonly Fen: string;
         /**
@@ -1078,6 +1123,42 @@ export interface components {
                 readonly square: components["schemas"]["Square"];
                 readonly side: components["schemas"]["Side"];
             }[];
+        };
+        /** @description Why a game was not kept, and where. */
+        readonly GameFault: {
+            /** @description Its number in the text. */
+            readonly game: number;
+            /** @description Line of the text, from 1. */
+            readonly line: number;
+            readonly move: string | null;
+            readonly code: string;
+            readonly message: string;
+        };
+        /** @description A game: timeline, journeys, commitments, origins. */
+        readonly GameReading: {
+            /** @description Its number in the text. */
+            readonly game: number;
+            readonly tags: {
+                readonly [key: string]: string;
+            };
+            /** @enum {string} */
+            readonly result: "1-0" | "0-1" | "1/2-1/2" | "*";
+            readonly plies: number;
+            readonly timeline: readonly components["schemas"]["TimelinePly"][];
+            readonly journeys: readonly components["schemas"]["Journey"][];
+            readonly commitments: readonly components["schemas"]["Commitment"][];
+            readonly origins: readonly components["schemas"]["Origin"][];
+        };
+        /** @description The games that could be read, and why the others could not. */
+        readonly GamesAnswer: {
+            readonly engine: string;
+            readonly games: readonly components["schemas"]["GameReading"][];
+            readonly faults: readonly components["schemas"]["GameFault"][];
+        };
+        /** @description Games to be read. */
+        readonly GamesRequest: {
+            /** @description One game or several, with comments, variations and glyphs. */
+            readonly pgn: string;
         };
         readonly Health: {
             /** @enum {string} */
@@ -1149,6 +1230,26 @@ export interface components {
             readonly kind: "recompute";
             /** @description Readings and results of this study that an older engine made are made anew. */
             readonly study: components["schemas"]["Id"];
+        };
+        /** @description One man’s way through the game. */
+        readonly Journey: {
+            readonly side: components["schemas"]["Side"];
+            /** @description The kind it began as. */
+            readonly kind: components["schemas"]["Kind"];
+            readonly start: components["schemas"]["Square"];
+            /** @description Where it stood, how long. */
+            readonly stays: readonly {
+                readonly square: components["schemas"]["Square"];
+                /** @description Half-moves played. */
+                readonly from: number;
+                readonly plies: number;
+            }[];
+            /** @description The half-move that took it; null: it is there at the end. */
+            readonly takenAt: number | null;
+            readonly promoted: {
+                readonly kind: components["schemas"]["Kind"];
+                readonly at: number;
+            } | null;
         };
         /** @description A key, without the secret: that is shown once, when it is made. */
         readonly Key: {
@@ -1312,6 +1413,17 @@ export interface components {
             readonly key: components["schemas"]["Key"];
             /** @description The key itself. It is shown this once and never stored. */
             readonly secret: string;
+        };
+        /** @description A lasting feature of the last position, and the move since which it stands. */
+        readonly Origin: {
+            readonly kind: components["schemas"]["FeatureKind"];
+            /** @description Whose it is: who suffers from a weakness, who has the rest; null: both. */
+            readonly side: components["schemas"]["Side"] | null;
+            readonly squares: readonly components["schemas"]["Square"][];
+            readonly text: string;
+            /** @description 0: there from the beginning. */
+            readonly ply: number;
+            readonly move: string | null;
         };
         /** @description An outpost or advanced post. */
         readonly Outpost: {
@@ -1987,6 +2099,70 @@ export interface components {
             readonly note?: string;
             /** @description The request of the computing call; its answer is kept. */
             readonly request: components["schemas"]["RoutesRequest"];
+        };
+        /** @description A compact reading of one position of a game. */
+        readonly TimelinePly: {
+            /** @description Half-moves played. */
+            readonly ply: number;
+            /** @description The move that led here; null at the beginning. */
+            readonly move: string | null;
+            readonly fen: string;
+            readonly structure: {
+                readonly id: string;
+                readonly name: string;
+                readonly side: components["schemas"]["Side"];
+            } | null;
+            /** @description Squares commanded: c3 to f6; files a to c; files f to h; ranks 1 to 3; ranks 6 to 8. */
+            readonly command: {
+                readonly centre: {
+                    readonly white: number;
+                    readonly black: number;
+                };
+                readonly queenside: {
+                    readonly white: number;
+                    readonly black: number;
+                };
+                readonly kingside: {
+                    readonly white: number;
+                    readonly black: number;
+                };
+                readonly whiteCamp: {
+                    readonly white: number;
+                    readonly black: number;
+                };
+                readonly blackCamp: {
+                    readonly white: number;
+                    readonly black: number;
+                };
+            };
+            readonly white: {
+                /** @description Weak squares of the side itself. */
+                readonly weakSquares: number;
+                readonly outposts: number;
+                /** @description Files it controls. */
+                readonly files: number;
+                readonly safeMoves: number;
+                /** @description Flight squares of its king. */
+                readonly flights: number;
+                /** @description Enemy men that attack the zone of its king. */
+                readonly kingAttackers: number;
+                /** @description Worth of its men in pawns, the king left out. */
+                readonly material: number;
+            };
+            readonly black: {
+                /** @description Weak squares of the side itself. */
+                readonly weakSquares: number;
+                readonly outposts: number;
+                /** @description Files it controls. */
+                readonly files: number;
+                readonly safeMoves: number;
+                /** @description Flight squares of its king. */
+                readonly flights: number;
+                /** @description Enemy men that attack the zone of its king. */
+                readonly kingAttackers: number;
+                /** @description Worth of its men in pawns, the king left out. */
+                readonly material: number;
+            };
         };
         /** @description Counts of one side over the whole board. */
         readonly Totals: {
@@ -2891,6 +3067,130 @@ export interface operations {
                 };
             };
             /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly createGames: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /** @description At most 400000 bytes. */
+        readonly requestBody: {
+            readonly content: {
+                /**
+                 * @example {
+                 *       "pgn": "1. d4 d5 2. c4 e6 3. Nc3 Nf6 4. cxd5 exd5 5. Bg5 Be7 6. e3 O-O 7. Bd3 Nbd7 8. Qc2 c6 *"
+                 *     }
+                 */
+                readonly "application/json": components["schemas"]["GamesRequest"];
+            };
+        };
+        readonly responses: {
+            /** @description Read games */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["GamesAnswer"];
+                };
+            };
+            /** @description not-json: The body is not JSON. */
+            readonly 400: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description body-too-large: The body is larger than this call takes. */
+            readonly 413: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description unsupported-media-type: The body is of a type that this call does not take. */
+            readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. pgn-refused: The text holds no game that can be read. */
             readonly 422: {
                 headers: {
                     /** @description The id of this request. */

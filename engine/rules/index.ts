@@ -1,2 +1,3 @@
 export * from './move';
 export * from './legal';
+export * from './replay';

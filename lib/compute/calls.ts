@@ -4,6 +4,7 @@ import { replyText } from '@/lib/api/reply';
 import { AppError, type InputFault } from '@/lib/errors';
 import { compareSubjects } from '@/lib/services/compare/compare-subjects';
 import { testExchanges } from '@/lib/services/compare/test-exchanges';
+import { readGames } from '@/lib/services/games/read-games';
 import { checkGivenRoute } from '@/lib/services/routes/check-given-route';
 import { findRoutes } from '@/lib/services/routes/find-routes';
 import { contracts } from '@/openapi/contracts';
@@ -21,6 +22,7 @@ function computed<I, S extends z.ZodType>(compute: (input: I) => z.output<S>, re
 const CALLS = {
   createRoutes: computed(findRoutes, contracts.createRoutes.reply),
   createComparison: computed(compareSubjects, contracts.createComparison.reply),
+  createGames: computed(readGames, contracts.createGames.reply),
   createExchanges: computed(testExchanges, contracts.createExchanges.reply),
   createRouteCheck: computed(checkGivenRoute, contracts.createRouteCheck.reply),
 } as const;

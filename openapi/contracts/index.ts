@@ -3,6 +3,7 @@ import type { Contract } from '../contract';
 import { createReadings } from './batch';
 import { createComparison, createExchanges } from './compare';
 import { getDocument, getIndex, getProblem } from './document';
+import { createGames } from './games';
 import { getHealth } from './health';
 import { cancelJob, createJob, getJob, listJobItems, listJobs, retryJob, watchJob } from './jobs';
 import { createKey, getUsage, listKeys, revokeKey } from './keys';
@@ -38,6 +39,7 @@ export const contracts = {
   createRouteCheck,
   createComparison,
   createExchanges,
+  createGames,
   getPlateSvg,
   getPlatePng,
   listStudies,

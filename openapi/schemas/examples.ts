@@ -17,3 +17,6 @@ export const EXAMPLE_IDS = {
   game: '00000000-0000-4000-8000-0000000000e1',
   job: '00000000-0000-4000-8000-0000000000f1',
 } as const;
+
+/** The first moves of an exchange variation, from opening theory. */
+export const EXAMPLE_PGN = '1. d4 d5 2. c4 e6 3. Nc3 Nf6 4. cxd5 exd5 5. Bg5 Be7 6. e3 O-O 7. Bd3 Nbd7 8. Qc2 c6 *';

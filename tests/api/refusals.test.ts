@@ -43,6 +43,8 @@ async function faultyRequest(contract: Contract, code: ProblemCode, example: Exa
       return body === undefined
         ? { ...good, query: { ...query, fen: BAD_FEN } }
         : { ...good, body: withBadFen(body as Record<string, unknown>) };
+    case 'pgn-refused':
+      return { ...good, body: { pgn: '1. e4 e5 2. Ke3' } };
     case 'not-found':
       if (contract.id === 'createJob') return { ...good, body: { kind: 'recompute', study: NOWHERE } };
       return {

@@ -1,0 +1,7 @@
+export * from './pgn';
+export * from './replay';
+export * from './compact';
+export * from './features';
+export * from './journeys';
+export * from './read-game';
+export * from './write-pgn';
