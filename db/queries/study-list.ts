@@ -1,7 +1,7 @@
 /** Pages of studies, and their changes in place: every change asks for the version it starts from. */
 import { and, desc, eq, exists, isNotNull, isNull, lt, or, sql } from 'drizzle-orm';
 import type { Db } from '@/db/client';
-import { positions, studies, studyShares } from '@/db/schema';
+import { studies, studyShares } from '@/db/schema';
 import type { StudyRow } from './studies';
 
 /** A study with the number of its positions. */
@@ -13,7 +13,8 @@ export interface After {
   readonly id: string;
 }
 
-const counted = sql<number>`(select count(*)::int from ${positions} where ${positions.studyId} = ${studies.id} and ${positions.deletedAt} is null)`;
+// Names in full: among the columns of one table drizzle leaves the table's name away, and `id` would be the position's own.
+const counted = sql<number>`(select count(*)::int from positions p where p.study_id = studies.id and p.deleted_at is null)`;
 
 const columns = { study: studies, positions: counted };
 

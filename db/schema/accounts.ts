@@ -1,7 +1,7 @@
 /** People and how they sign in. Users, accounts and verification tokens have the shape that next-auth's adapter asks for. */
 import { sql } from 'drizzle-orm';
 import { check, index, integer, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
-import { createdAt, deletedAt, id, moment } from './columns';
+import { createdAt, deletedAt, id, moment, newestFirst } from './columns';
 
 /** A person. One who left stays as a row without address, name or password, so that histories keep their 'who'. */
 export const users = pgTable(
@@ -82,5 +82,5 @@ export const signIns = pgTable(
     endedAt: moment('ended_at'),
   },
   // A person's list, the newest first.
-  (table) => [index('sign_ins_user').on(table.userId, table.createdAt.desc())],
+  (table) => [index('sign_ins_user').on(table.userId, newestFirst(table.createdAt))],
 );

@@ -1,5 +1,5 @@
 /** Columns that many tables have, each with one meaning everywhere. */
-import { integer, timestamp, uuid } from 'drizzle-orm/pg-core';
+import { type ExtraConfigColumn, integer, timestamp, uuid } from 'drizzle-orm/pg-core';
 
 /** A moment, in whole milliseconds as a Date has them, so that what was read compares equal with what was written. */
 export function moment(name: string) {
@@ -29,4 +29,12 @@ export function deletedAt() {
 /** 1 when made, one more with each change: what If-Match is compared with. */
 export function version() {
   return integer('version').notNull().default(1);
+}
+
+/**
+ * A column of an index in the order of `order by … desc`. That order has nulls first, and drizzle's `desc()` alone makes an
+ * index with nulls last, which PostgreSQL then cannot walk through, not even over a column without nulls.
+ */
+export function newestFirst(column: ExtraConfigColumn) {
+  return column.desc().nullsFirst();
 }

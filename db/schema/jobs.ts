@@ -2,7 +2,7 @@
 import { sql } from 'drizzle-orm';
 import { check, index, integer, jsonb, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
 import { users } from './accounts';
-import { createdAt, id, moment } from './columns';
+import { createdAt, id, moment, newestFirst } from './columns';
 import { workspaces } from './workspaces';
 
 /** States of a job. The last three are ends. */
@@ -44,7 +44,7 @@ export const jobs = pgTable(
     // Workers look for the oldest that is free, many times a minute; ended jobs, the most, are not in the way.
     index('jobs_open').on(table.createdAt).where(sql`${table.state} in ('queued', 'running')`),
     // A workspace's jobs, the newest first.
-    index('jobs_workspace').on(table.workspaceId, table.createdAt.desc()),
+    index('jobs_workspace').on(table.workspaceId, newestFirst(table.createdAt), newestFirst(table.id)),
     check('jobs_state', sql`${table.state} in ('queued', 'running', 'done', 'failed', 'cancelled')`),
   ],
 );

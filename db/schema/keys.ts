@@ -2,7 +2,7 @@
 import { sql } from 'drizzle-orm';
 import { date, index, integer, jsonb, pgTable, primaryKey, text, timestamp, uuid } from 'drizzle-orm/pg-core';
 import { users } from './accounts';
-import { createdAt, id, moment } from './columns';
+import { createdAt, id, moment, newestFirst } from './columns';
 import { workspaces } from './workspaces';
 
 /** A key of a workspace. The key itself is shown once and never stored. */
@@ -26,7 +26,7 @@ export const apiKeys = pgTable(
     usedAt: moment('used_at'),
   },
   // The keys page: a workspace's keys, the newest first.
-  (table) => [index('api_keys_workspace').on(table.workspaceId, table.createdAt.desc())],
+  (table) => [index('api_keys_workspace').on(table.workspaceId, newestFirst(table.createdAt))],
 );
 
 /** How often a key made a call on a day (UTC). */

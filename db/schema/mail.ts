@@ -1,6 +1,6 @@
 /** The local mailbox: messages that would have been sent, where no mail server is set. */
 import { index, pgTable, text } from 'drizzle-orm/pg-core';
-import { id, moment } from './columns';
+import { id, moment, newestFirst } from './columns';
 
 /** A message. The text and the HTML say the same. */
 export const mail = pgTable(
@@ -14,5 +14,5 @@ export const mail = pgTable(
     at: moment('at').notNull().defaultNow(),
   },
   // The mailbox shows the newest first.
-  (table) => [index('mail_at').on(table.at.desc())],
+  (table) => [index('mail_at').on(newestFirst(table.at))],
 );

@@ -13,7 +13,7 @@ import {
   uuid,
 } from 'drizzle-orm/pg-core';
 import { users } from './accounts';
-import { createdAt, deletedAt, id, moment, updatedAt, version } from './columns';
+import { createdAt, deletedAt, id, moment, newestFirst, updatedAt, version } from './columns';
 import { workspaces } from './workspaces';
 
 /** A folder of positions, games and results on one subject. */
@@ -35,7 +35,7 @@ export const studies = pgTable(
   (table) => [
     // The list of studies, last changed first, by cursor.
     index('studies_list')
-      .on(table.workspaceId, table.updatedAt.desc(), table.id)
+      .on(table.workspaceId, newestFirst(table.updatedAt), newestFirst(table.id))
       .where(sql`${table.deletedAt} is null`),
     // The trash, and its emptying.
     index('studies_trash').on(table.workspaceId, table.deletedAt).where(sql`${table.deletedAt} is not null`),
@@ -127,9 +127,9 @@ export const changes = pgTable(
     // One change makes one version: two editors who both believed to have made version 5 cannot both be kept.
     uniqueIndex('changes_version').on(table.entityId, table.version),
     // Deleting a workspace asks for its changes; what was last done in a workspace.
-    index('changes_workspace').on(table.workspaceId, table.at.desc()),
+    index('changes_workspace').on(table.workspaceId, newestFirst(table.at)),
     // A study's history, the newest first, by cursor.
-    index('changes_study').on(table.studyId, table.at.desc(), table.id),
+    index('changes_study').on(table.studyId, newestFirst(table.at), newestFirst(table.id)),
     check('changes_entity', sql`${table.entity} in ('study', 'position', 'result', 'game')`),
     check('changes_kind', sql`${table.kind} in ('create', 'update', 'delete', 'restore')`),
   ],

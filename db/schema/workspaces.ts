@@ -2,7 +2,7 @@
 import { sql } from 'drizzle-orm';
 import { check, index, jsonb, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
 import { users } from './accounts';
-import { createdAt, id, moment } from './columns';
+import { createdAt, id, moment, newestFirst } from './columns';
 
 /** Roles of a person in a workspace, from the one who may most. What each may do is lib's table. */
 export const ROLES = ['owner', 'coach', 'writer', 'student'] as const;
@@ -87,5 +87,5 @@ export const auditLog = pgTable(
     detail: jsonb('detail').$type<Readonly<Record<string, unknown>>>().notNull().default({}),
   },
   // The audit page: a workspace's log, the newest first, by cursor.
-  (table) => [index('audit_log_workspace').on(table.workspaceId, table.at.desc(), table.id)],
+  (table) => [index('audit_log_workspace').on(table.workspaceId, newestFirst(table.at), newestFirst(table.id))],
 );
