@@ -1,4 +1,5 @@
 export * from './pgn';
+export * from './pgn-stream';
 export * from './replay';
 export * from './compact';
 export * from './features';

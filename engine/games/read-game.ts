@@ -71,8 +71,8 @@ export function readGame({ start, steps, game }: ReplayedGame): GameReading {
   const walk = new Walk(start);
   for (const [place, { text }] of game.moves.entries()) {
     const { fullmove, side } = walk.turn;
-    const step = walk.step(text)!;
-    look(walk.position(), place + 1, `${fullmove}${side === 'white' ? '.' : '...'} ${step.san}`);
+    walk.step(text);
+    look(walk.position(), place + 1, `${fullmove}${side === 'white' ? '.' : '...'} ${steps[place]!.san}`);
   }
   return {
     timeline,

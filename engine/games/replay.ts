@@ -1,10 +1,10 @@
 /** A game held against the board: every move of it and of its variations is legal, or the first that is not is named. */
 import { type Fault, parseFen, type Position } from '../board';
 import { fail, ok, type Result } from '../result';
-import { type Step, Walk } from '../rules';
+import { type Step, type StepRefusal, Walk } from '../rules';
 import { type PgnGame, type PgnMove } from './pgn';
 
-const START = 'rnbqkbnr/pppppppp/8/8/8/8/PPPPPPPP/RNBQKBNR w KQkq - 0 1';
+const FIRST_POSITION = parseFen('rnbqkbnr/pppppppp/8/8/8/8/PPPPPPPP/RNBQKBNR w KQkq - 0 1');
 
 /** Why a game was not kept, and where. */
 export interface GameFault {
@@ -33,7 +33,7 @@ export const GAME_PLIES_MAX = 1000;
 export function replayGame(game: PgnGame): Result<ReplayedGame, GameFault> {
   const { number, fault } = game;
   if (fault) return fail({ game: number, line: fault.line, move: null, code: fault.code, message: fault.message });
-  const start = parseFen(game.tags.FEN ?? START);
+  const start = game.tags.FEN === undefined ? FIRST_POSITION : parseFen(game.tags.FEN);
   if (!start.ok) return fail(badStart(game, start.fault[0]));
   if (game.moves.length > GAME_PLIES_MAX) {
     const message = `The game has ${game.moves.length} half-moves; up to ${GAME_PLIES_MAX} are read.`;
@@ -48,7 +48,10 @@ function badStart({ number, line }: PgnGame, fault: Fault): GameFault {
   return { game: number, line, move: null, code: fault.code, message: `The FEN tag cannot be read: ${fault.message}` };
 }
 
-/** Walks a line; the first move that cannot be made is the fault. Steps are kept only where they are asked for. */
+/**
+ * Walks a line; the first move that cannot be made is the fault. Steps are kept of the main line only; variations may
+ * hold moves that pass.
+ */
 function walked(walk: Walk, moves: readonly PgnMove[], game: number, steps?: Step[]): GameFault | null {
   for (const move of moves) {
     for (const variation of move.variations) {
@@ -57,12 +60,19 @@ function walked(walk: Walk, moves: readonly PgnMove[], game: number, steps?: Ste
     }
     const { fullmove, side } = walk.turn;
     const step = walk.step(move.text);
-    if (!step) {
+    if (typeof step !== 'string') {
+      steps?.push(step);
+    } else if (steps || !walk.pass(move.text)) {
       const name = `${fullmove}${side === 'white' ? '.' : '...'} ${move.text.slice(0, 20)}`;
-      const message = `"${name}" is no legal move there, or can mean several.`;
-      return { game, line: move.line, move: name, code: 'illegal-move', message };
+      return { game, line: move.line, move: name, code: step, message: REFUSALS[step](name) };
     }
-    steps?.push(step);
   }
   return null;
 }
+
+const REFUSALS: Readonly<Record<StepRefusal, (move: string) => string>> = {
+  'unreadable-move': (move) => `"${move}" is not how a move is written.`,
+  'illegal-move': (move) => `"${move}" is no legal move there.`,
+  'ambiguous-move': (move) => `"${move}" can mean several moves there.`,
+  'null-move': (move) => `"${move}" passes, which no move may.`,
+};

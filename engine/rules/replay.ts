@@ -1,8 +1,8 @@
 /** A game walked on one board: moves by SAN, positions when they are asked for. */
 import type { Position } from '../board';
 import type { Square } from '../types';
-import { findSan, sanOf } from './san';
-import { make, newUndo, type ScratchBoard, scratchBoard } from './scratch-board';
+import { AMBIGUOUS, findSan, sanOf, UNREADABLE } from './san';
+import { inCheck, make, newUndo, type ScratchBoard, scratchBoard } from './scratch-board';
 
 /** A move that was made, packed as the scratch board packs moves. */
 export interface Step {
@@ -19,10 +19,17 @@ export interface Step {
   readonly san: string;
 }
 
+/** Why a text names no move: it is no move at all, none like it is legal, several are, or it passes where one cannot. */
+export type StepRefusal = 'unreadable-move' | 'illegal-move' | 'ambiguous-move' | 'null-move';
+
+/** How programs write that a side passes: no move of the standard, but often seen in variations. */
+const NULL_MOVES: ReadonlySet<string> = new Set(['--', 'Z0', 'null', '0000', '@@@@']);
+
 /** A board that moves forward. */
 export class Walk {
   readonly #board: ScratchBoard;
   readonly #mode: Position['mode'];
+  readonly #undo = newUndo();
   #halfmoves: number;
   #fullmove: number;
 
@@ -38,16 +45,30 @@ export class Walk {
     return { fullmove: this.#fullmove, side: this.#board.side === 0 ? 'white' : 'black' };
   }
 
-  /** Makes the move that a text names; null where it names none, or can mean several. */
-  step(text: string): Step | null {
+  /** Lets the side to move pass, where the text says so and it is not in check. */
+  pass(text: string): boolean {
+    const board = this.#board;
+    if (!NULL_MOVES.has(text) || inCheck(board, board.side)) return false;
+    board.side ^= 1;
+    board.passing = -1;
+    this.#halfmoves++;
+    if (board.side === 0) this.#fullmove++;
+    return true;
+  }
+
+  /** Makes the move that a text names, or says why there is none. */
+  step(text: string): Step | StepRefusal {
     const board = this.#board;
     const move = findSan(board, text);
-    if (move < 0) return null;
+    if (move < 0) {
+      if (NULL_MOVES.has(text)) return 'null-move';
+      return move === UNREADABLE ? 'unreadable-move' : move === AMBIGUOUS ? 'ambiguous-move' : 'illegal-move';
+    }
     const san = sanOf(board, move);
     const from = (move & 63) as Square;
     const special = move >> 16;
     const man = board.men[from]!;
-    const undo = newUndo();
+    const undo = this.#undo;
     make(board, move, undo);
     this.#halfmoves = (man & 7) === 1 || undo.captured !== 0 ? 0 : this.#halfmoves + 1;
     if (board.side === 0) this.#fullmove++;
