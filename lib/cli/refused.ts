@@ -1,5 +1,6 @@
 /** A command whose request the services may refuse: the refusal goes to standard error, in words. */
 import { AppError } from '@/lib/errors';
+import type { Answer } from './lines';
 import { EXIT, type ExitCode, type Terminal, written } from './terminal';
 import { item } from './wrap';
 
@@ -13,5 +14,15 @@ export async function refused(terminal: Terminal, run: () => Promise<ExitCode>):
     const lines = faults.flatMap(({ field, message }) => item(field ? `  ${field}: ` : '  ', message));
     await written(terminal.errors, `${['This was refused.', ...lines].join('\n')}\n`);
     return EXIT.fault;
+  }
+}
+
+/** What a line of a stream is answered: the value, or the first of the faults that refused it. */
+export function answered<V>(compute: () => V): Answer<V> {
+  try {
+    return { ok: true, value: compute() };
+  } catch (error) {
+    if (!(error instanceof AppError)) throw error;
+    return { ok: false, fault: error.faults[0] ?? { code: error.code, message: error.message } };
   }
 }

@@ -2,15 +2,14 @@
 import { routeCheckSchema, routesAnswerSchema } from '@/engine/reading/schema/routes';
 import { SIDES } from '@/engine/types';
 import { jsonWriter } from '@/lib/api/writer';
-import { AppError } from '@/lib/errors';
 import { checkGivenRoute } from '@/lib/services/routes/check-given-route';
 import { findRoutes } from '@/lib/services/routes/find-routes';
 import { ROUTE_CHOICES_MAX, ROUTE_MOVES_MAX, routesRequestSchema } from '@/openapi/schemas/routes';
 import { choiceOf, commandArguments, countOf, fenOf } from './arguments';
 import { inkFor } from './ink';
-import { answerLines, type Answer, type BadAnswer } from './lines';
+import { answerLines, type BadAnswer } from './lines';
 import { checkText, routesText } from './routes-text';
-import { refused } from './refused';
+import { answered, refused } from './refused';
 import { EXIT, type ExitCode, type Terminal, written } from './terminal';
 import { UsageError } from './usage-error';
 
@@ -60,7 +59,7 @@ export async function runRoutes(args: readonly string[], terminal: Terminal): Pr
   };
   const fen = fenOf(positionals);
   const request = (text: string) => requestOf({ fen: text, ...choices });
-  if (fen === '-') return answerLines(terminal, (text) => answerOf(() => findRoutes(request(text))), lineJson);
+  if (fen === '-') return answerLines(terminal, (text) => answered(() => findRoutes(request(text))), lineJson);
   const ink = inkFor(terminal.colour);
   return refused(terminal, async () => {
     if (values.check === undefined) {
@@ -79,16 +78,6 @@ function requestOf(given: { readonly [field: string]: unknown }) {
   if (parsed.success) return parsed.data;
   const [issue] = parsed.error.issues;
   throw new UsageError(`--${String(issue?.path[0] ?? 'fen')}: ${issue?.message ?? 'not understood'}`);
-}
-
-function answerOf<V>(compute: () => V): Answer<V> {
-  try {
-    return { ok: true, value: compute() };
-  } catch (error) {
-    if (!(error instanceof AppError)) throw error;
-    const [first] = error.faults;
-    return { ok: false, fault: first ?? { code: error.code, message: error.message } };
-  }
 }
 
 function lineJson(value: ReturnType<typeof findRoutes> | BadAnswer): string {

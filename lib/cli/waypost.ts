@@ -1,6 +1,8 @@
 /** The terminal command: `npm run waypost -- read "<FEN>"`. What computes needs no server and no database. */
 import { fileURLToPath } from 'node:url';
 import { env } from '@/lib/env';
+import { COMPARE_HELP, runCompare, runExchanges } from './compare';
+import { GAME_HELP, runGame } from './game';
 import { READ_HELP, runRead } from './read';
 import { ROUTES_HELP, runRoutes } from './routes';
 import { EXIT, type ExitCode, ownTerminal, type Terminal, written } from './terminal';
@@ -11,6 +13,9 @@ const HELP = `waypost: where the pieces belong
 Commands
   read "<FEN>"      read a position
   routes "<FEN>"    where men belong and how they get there; a route checked
+  compare "<FEN>"…  two to four positions, or a man here and there
+  exchanges "<FEN>" every trade, and what it changes
+  game FILE.pgn     what changed for good, move by move
   migrate           make the database, or bring it up to date
   seed              the demo workspace, once
   dump FILE         everything that is kept into one file
@@ -27,6 +32,12 @@ export async function runWaypost(args: readonly string[], terminal: Terminal): P
     switch (command) {
       case 'read':
         return await runRead(rest, terminal);
+      case 'compare':
+        return await runCompare(rest, terminal);
+      case 'exchanges':
+        return await runExchanges(rest, terminal);
+      case 'game':
+        return await runGame(rest, terminal);
       case 'routes':
         return await runRoutes(rest, terminal);
       // Loaded only when asked for: the others start faster without a database.
@@ -41,7 +52,7 @@ export async function runWaypost(args: readonly string[], terminal: Terminal): P
       case '--help':
       case '-h':
       case 'help':
-        await written(terminal.output, [HELP, READ_HELP, ROUTES_HELP].join('\n'));
+        await written(terminal.output, [HELP, READ_HELP, ROUTES_HELP, COMPARE_HELP, GAME_HELP].join('\n'));
         return EXIT.good;
       case undefined:
         throw new UsageError('A command is missing.');
