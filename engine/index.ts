@@ -19,12 +19,12 @@ export {
   heatMapOf,
   newDesk,
   readFen,
-  readFenText,
   readPosition,
   readValues,
   type Reading,
-  type ReadingText,
+  type ReadingBytes,
   type Statement,
+  writeFen,
 } from './reading';
 export { checkRoute, routes } from './routes';
 export { encodeCheck, encodeRoutes } from './reading/encode-routes';

@@ -21,22 +21,22 @@ export function readPosition(position: Position, warnings: readonly Fault[] = []
   return encodeReading(values, statements, lead, warnings);
 }
 
-/** A reading as text, and what says which reading it is. */
-export interface ReadingText {
+/** A reading as JSON, and what says which reading it is. */
+export interface ReadingBytes {
   /** Six fields, normalised. */
   readonly fen: string;
   readonly warnings: readonly Fault[];
-  /** The JSON: the whole reading, or the parts asked for. */
-  readonly json: string;
+  /** The JSON in UTF-8: the whole reading, or the parts asked for. */
+  readonly json: Uint8Array<ArrayBuffer>;
 }
 
-/** Reads a FEN to the text of its reading's JSON: the same as `readFen` gives as a value, at half the time. */
-export function readFenText(
+/** Reads a FEN to the JSON of its reading: the same as `readFen` gives as a value, at half the time. */
+export function writeFen(
   text: string,
   mode: Mode = 'strict',
   include?: readonly ReadingPart[],
   desk: Desk = newDesk(),
-): Result<ReadingText, Faults> {
+): Result<ReadingBytes, Faults> {
   const admitted = parseFen(text, mode);
   if (!admitted.ok) return admitted;
   const { position, warnings } = admitted.value;

@@ -1,96 +1,110 @@
-/** Men, kings, files, diagonals and totals as the text of their JSON. */
+/** Men, kings, files, diagonals and totals as JSON on a page. */
 import type { DiagonalValue, FileValue } from '../files';
 import type { Duty, KingValue, ManValue } from '../men';
 import type { SquareTotals } from '../squares';
-import type { Square } from '../types';
 import type { Reading } from './schema';
 import {
-  fileText,
-  listText,
-  maskText,
-  objectText,
-  sidesText,
-  squaresText,
-  squareText,
+  objectWriter,
+  putFile,
+  putFlag,
+  putList,
+  putMask,
+  putNumber,
+  putSides,
+  putSquare,
+  putSquares,
+  putText,
+  putTexts,
   type Write,
-  wordsText,
-  wordText,
-} from './text';
+} from './page';
 
 /** The row of a side's own men, or of the enemy's, in a map's list of squares. */
 const rowOf = (side: 'white' | 'black') => (side === 'white' ? 0 : 32);
 
-const dutyJson: Write<Duty> = ({ square, loses, by }) =>
-  `{"square":${squareText(square)},"loses":${loses},"by":"${by}"}`;
-
-/** A man. */
-export const manJson = objectText<ManValue, Reading['men'][number]>({
-  square: ({ square }) => squareText(square),
-  side: ({ side }) => wordText(side),
-  kind: ({ kind }) => wordText(kind),
-  moves: ({ moves }) => squaresText(moves),
-  safeMoves: ({ safeMoves }) => squaresText(safeMoves),
-  sees: ({ sees }) => `${sees}`,
-  seesAhead: ({ seesAhead }) => `${seesAhead}`,
-  pinned: ({ pinned }) => `${pinned}`,
-  enPrise: ({ enPrise }) => `${enPrise}`,
-  attackers: ({ side, attackers }, map) => maskText(map, rowOf(side) ^ 32, attackers),
-  defenders: ({ side, defenders }, map) => maskText(map, rowOf(side), defenders),
-  duties: ({ duties }, map) => listText(duties, map, dutyJson),
-  trapped: ({ trapped }) => `${trapped}`,
-  notes: ({ notes }) => wordsText(notes),
+const dutyJson = objectWriter<Duty, Reading['men'][number]['duties'][number]>({
+  square: (page, { square }) => putSquare(page, square),
+  loses: (page, { loses }) => putNumber(page, loses),
+  by: (page, { by }) => putText(page, by),
 });
 
-const bothSquares: Write<readonly Square[]> = (squares) => squaresText(squares);
+/** A man. */
+export const manJson = objectWriter<ManValue, Reading['men'][number]>({
+  square: (page, { square }) => putSquare(page, square),
+  side: (page, { side }) => putText(page, side),
+  kind: (page, { kind }) => putText(page, kind),
+  moves: (page, { moves }, map) => putSquares(page, moves, map),
+  safeMoves: (page, { safeMoves }, map) => putSquares(page, safeMoves, map),
+  sees: (page, { sees }) => putNumber(page, sees),
+  seesAhead: (page, { seesAhead }) => putNumber(page, seesAhead),
+  pinned: (page, { pinned }) => putFlag(page, pinned),
+  enPrise: (page, { enPrise }) => putNumber(page, enPrise),
+  attackers: (page, { side, attackers }, map) => putMask(page, map, rowOf(side) ^ 32, attackers),
+  defenders: (page, { side, defenders }, map) => putMask(page, map, rowOf(side), defenders),
+  duties: (page, { duties }, map) => putList(page, duties, map, dutyJson),
+  trapped: (page, { trapped }) => putFlag(page, trapped),
+  notes: (page, { notes }) => putTexts(page, notes),
+});
+
+const targetJson = objectWriter<FileValue['targets'][number], Reading['files'][number]['targets'][number]>({
+  square: (page, { square }) => putSquare(page, square),
+  side: (page, { side }) => putText(page, side),
+});
 
 /** A file. */
-export const fileJson = objectText<FileValue, Reading['files'][number]>({
-  file: ({ file }) => fileText(file),
-  status: ({ status }) => wordText(status),
-  halfOpenFor: ({ halfOpenFor }) => wordText(halfOpenFor),
-  heavy: ({ heavy }, map) => sidesText(heavy, map, bothSquares),
-  control: ({ control }) => wordText(control),
-  entries: ({ entries }, map) => sidesText(entries, map, bothSquares),
-  targets: ({ targets }, map) =>
-    listText(targets, map, ({ square, side }) => `{"square":${squareText(square)},"side":"${side}"}`),
+export const fileJson = objectWriter<FileValue, Reading['files'][number]>({
+  file: (page, { file }, map) => putFile(page, file, map),
+  status: (page, { status }) => putText(page, status),
+  halfOpenFor: (page, { halfOpenFor }) => putText(page, halfOpenFor),
+  heavy: (page, { heavy }, map) => putSides(page, heavy, map, putSquares),
+  control: (page, { control }) => putText(page, control),
+  entries: (page, { entries }, map) => putSides(page, entries, map, putSquares),
+  targets: (page, { targets }, map) => putList(page, targets, map, targetJson),
 });
 
 /** A diagonal. */
-export const diagonalJson = objectText<DiagonalValue, Reading['diagonals'][number]>({
-  from: ({ from }) => squareText(from),
-  direction: ({ direction }) => wordText(direction),
-  squares: ({ squares }) => squaresText(squares),
-  stoppedBy: ({ stoppedBy }) => squareText(stoppedBy),
-  stopperFixed: ({ stopperFixed }) => `${stopperFixed}`,
+export const diagonalJson = objectWriter<DiagonalValue, Reading['diagonals'][number]>({
+  from: (page, { from }) => putSquare(page, from),
+  direction: (page, { direction }) => putText(page, direction),
+  squares: (page, { squares }, map) => putSquares(page, squares, map),
+  stoppedBy: (page, { stoppedBy }) => putSquare(page, stoppedBy),
+  stopperFixed: (page, { stopperFixed }) => putFlag(page, stopperFixed),
 });
 
-const presentKing = objectText<KingValue, NonNullable<Reading['kings']['white']>>({
-  square: ({ square }) => squareText(square),
-  shelter: ({ shelter }, map) =>
-    listText(
-      shelter,
-      map,
-      ({ file, pawn, advanced }) => `{"file":${fileText(file)},"pawn":${squareText(pawn)},"advanced":${advanced}}`,
-    ),
-  openBeside: ({ openBeside }, map) => listText(openBeside, map, fileText),
-  reachedBy: ({ reachedBy }) => squaresText(reachedBy),
-  guardedBy: ({ guardedBy }) => squaresText(guardedBy),
-  flights: ({ flights }) => squaresText(flights),
-  luft: ({ luft }) => squaresText(luft),
-  luftMoves: ({ luftMoves }, map) =>
-    listText(luftMoves, map, ({ from, to }) => `{"from":${squareText(from)},"to":${squareText(to)}}`),
-  weakBackRank: ({ weakBackRank }) => `${weakBackRank}`,
+type King = NonNullable<Reading['kings']['white']>;
+
+const shelterJson = objectWriter<KingValue['shelter'][number], King['shelter'][number]>({
+  file: (page, { file }, map) => putFile(page, file, map),
+  pawn: (page, { pawn }) => putSquare(page, pawn),
+  advanced: (page, { advanced }) => putNumber(page, advanced),
+});
+
+const moveJson = objectWriter<KingValue['luftMoves'][number], King['luftMoves'][number]>({
+  from: (page, { from }) => putSquare(page, from),
+  to: (page, { to }) => putSquare(page, to),
+});
+
+const presentKing = objectWriter<KingValue, King>({
+  square: (page, { square }) => putSquare(page, square),
+  shelter: (page, { shelter }, map) => putList(page, shelter, map, shelterJson),
+  openBeside: (page, { openBeside }, map) => putList(page, openBeside, map, putFile),
+  reachedBy: (page, { reachedBy }, map) => putSquares(page, reachedBy, map),
+  guardedBy: (page, { guardedBy }, map) => putSquares(page, guardedBy, map),
+  flights: (page, { flights }, map) => putSquares(page, flights, map),
+  luft: (page, { luft }, map) => putSquares(page, luft, map),
+  luftMoves: (page, { luftMoves }, map) => putList(page, luftMoves, map, moveJson),
+  weakBackRank: (page, { weakBackRank }) => putFlag(page, weakBackRank),
 });
 
 /** A king, null where a diagram has none. */
-export const kingJson: Write<KingValue | null> = (king, map) => (king ? presentKing(king, map) : 'null');
+export const kingJson: Write<KingValue | null> = (page, king, map) =>
+  king ? presentKing(page, king, map) : putText(page, null);
 
 /** The counts of a side. */
-export const totalsJson = objectText<SquareTotals, Reading['totals']['white']>({
-  controlled: ({ controlled }) => `${controlled}`,
-  commanded: ({ commanded }) => `${commanded}`,
-  enemyHalf: ({ enemyHalf }) => `${enemyHalf}`,
-  centre: ({ centre }) => `${centre}`,
-  extendedCentre: ({ extendedCentre }) => `${extendedCentre}`,
-  safeMoves: ({ safeMoves }) => `${safeMoves}`,
+export const totalsJson = objectWriter<SquareTotals, Reading['totals']['white']>({
+  controlled: (page, { controlled }) => putNumber(page, controlled),
+  commanded: (page, { commanded }) => putNumber(page, commanded),
+  enemyHalf: (page, { enemyHalf }) => putNumber(page, enemyHalf),
+  centre: (page, { centre }) => putNumber(page, centre),
+  extendedCentre: (page, { extendedCentre }) => putNumber(page, extendedCentre),
+  safeMoves: (page, { safeMoves }) => putNumber(page, safeMoves),
 });

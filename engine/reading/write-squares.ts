@@ -1,155 +1,173 @@
-/** Squares, weak squares, outposts and pawns as the text of their JSON. */
+/** Squares, weak squares, outposts and pawns as JSON on a page. */
 import { type AttackMap, heldFrom, kindOn, pinnedMask } from '../attacks';
-import { SQUARES } from '../board';
+import { manOf, SQUARES, squareName } from '../board';
 import type { ReadingValues } from '../explain';
-import type { Lever, PawnSideValue, Ram } from '../pawns';
+import type { Lever, PawnSideValue, PawnValues, Ram } from '../pawns';
 import type { User } from '../reach';
-import {
-  type ColourComplex,
-  COMMANDS,
-  NO_EXCHANGE,
-  type OutpostValue,
-  type SquareTable,
-  type WeakSquareValue,
-} from '../squares';
+import { type ColourComplex, COMMANDS, exchangeGain, type OutpostValue, type WeakSquareValue } from '../squares';
 import type { StructureMatch } from '../structures';
 import type { Square } from '../types';
 import type { Reading } from './schema';
 import {
-  listText,
-  MAN_TEXTS,
-  maskText,
-  objectText,
-  squaresText,
-  squareText,
-  textOf,
-  type Write,
-  wordsText,
-  wordText,
-} from './text';
+  fragment,
+  objectWriter,
+  type Page,
+  put,
+  putFlag,
+  putList,
+  putMask,
+  putNumber,
+  putSquare,
+  putSquares,
+  putText,
+  putTexts,
+} from './page';
 
-/** What stands before a square's occupant, and between its behind-men and its exchanges. */
-const BEGINNINGS: readonly string[] = SQUARES.map((square) => `{"square":${squareText(square)},"occupant":`);
-const COMMAND_TEXTS: readonly string[] = COMMANDS.map((command) => `"command":"${command}","exchange":{"white":`);
+/** Squares are nearly half of a reading, so they are put down by hand; what each begins with is made beforehand. */
+const BEGINNINGS = SQUARES.map((square) => fragment(`${square === 0 ? '[' : ','}{"square":"${squareName(square)}"`));
+/** Men by their code in the mailbox, and what follows them. */
+const OCCUPANTS = Array.from({ length: 16 }, (_, code) =>
+  fragment(`,"occupant":${JSON.stringify(manOf(code))},"attackers":{"white":`),
+);
+const BLACK = fragment(',"black":');
+const HELD = fragment('},"held":{"white":');
+const BEHIND = fragment('},"behind":{"white":');
+const NOBODY_HELD = fragment('},"held":{"white":[],"black":[]},"behind":{"white":');
+const COMMANDED = COMMANDS.map((command) => fragment(`},"command":"${command}","exchange":{"white":`));
+const SQUARE_END = fragment('}}');
+const END = fragment(']');
 
-/**
- * The 64 squares, a1 first: nearly half of a reading, so they are written out by hand. Most lines of most squares are
- * the same few texts.
- */
-export function squaresJson({ map, table }: ReadingValues): string {
+/** The 64 squares, a1 first. */
+export function putBoard(page: Page, { map, table }: ReadingValues): void {
+  const { attackers, board } = map;
   const anyPinned = pinnedMask(map, 0) !== 0 || pinnedMask(map, 1) !== 0;
-  let text = '[';
   for (const square of SQUARES) {
-    text +=
-      (square === 0 ? '' : ',') +
-      BEGINNINGS[square]! +
-      MAN_TEXTS[map.board[square]!]! +
-      masksJson(',"attackers":{"white":', map, map.attackers, square) +
-      (anyPinned ? heldJson(map, square) : ',"held":{"white":[],"black":[]}') +
-      masksJson(',"behind":{"white":', map, table.behind, square) +
-      ',' +
-      COMMAND_TEXTS[table.commands[square]!]! +
-      gainText(table, square) +
-      ',"black":' +
-      gainText(table, 64 | square) +
-      '}}';
+    put(page, BEGINNINGS[square]!);
+    put(page, OCCUPANTS[board[square]!]!);
+    putMasks(page, map, attackers, square);
+    if (anyPinned) putHeld(page, map, square);
+    else put(page, NOBODY_HELD);
+    putMasks(page, map, table.behind, square);
+    put(page, COMMANDED[table.commands[square]!]!);
+    putNumber(page, exchangeGain(table, 'white', square));
+    put(page, BLACK);
+    putNumber(page, exchangeGain(table, 'black', square));
+    put(page, SQUARE_END);
   }
-  return `${text}]`;
+  put(page, END);
 }
 
-/** The men of both sides' masks; `before` is the field's name and all up to White's list. */
-function masksJson(before: string, map: AttackMap, masks: Readonly<Int32Array>, square: Square): string {
-  return `${before}${maskText(map, 0, masks[square]!)},"black":${maskText(map, 32, masks[64 | square]!)}}`;
+/** The men of both sides' masks, from White's list on. */
+function putMasks(page: Page, map: AttackMap, masks: Readonly<Int32Array>, square: Square): void {
+  putMask(page, map, 0, masks[square]!);
+  put(page, BLACK);
+  putMask(page, map, 32, masks[64 | square]!);
 }
 
-function heldJson(map: AttackMap, square: Square): string {
-  return `,"held":{"white":${squaresText(heldFrom(map, 'white', square))},"black":${squaresText(heldFrom(map, 'black', square))}}`;
+function putHeld(page: Page, map: AttackMap, square: Square): void {
+  put(page, HELD);
+  putSquares(page, heldFrom(map, 'white', square), map);
+  put(page, BLACK);
+  putSquares(page, heldFrom(map, 'black', square), map);
+  put(page, BEHIND);
 }
 
-/** `entry` is (side << 6 | square). */
-function gainText({ exchanges }: SquareTable, entry: number): string {
-  const gain = exchanges[entry]!;
-  return gain === NO_EXCHANGE ? 'null' : `${gain}`;
-}
-
-const usersText: Write<readonly User[]> = (users, map) =>
-  listText(
-    users,
-    map,
-    ({ from, moves }) => `{"from":${squareText(from)},"kind":"${kindOn(map, from)}","moves":${moves}}`,
-  );
+const userJson = objectWriter<User, Reading['weakSquares'][number]['users'][number]>({
+  from: (page, { from }) => putSquare(page, from),
+  kind: (page, { from }, map) => putText(page, kindOn(map, from)),
+  moves: (page, { moves }) => putNumber(page, moves),
+});
 
 /** A weak square. */
-export const weakSquareJson = objectText<WeakSquareValue, Reading['weakSquares'][number]>({
-  square: ({ square }) => squareText(square),
-  side: ({ side }) => wordText(side),
-  hold: ({ hold }) => wordText(hold),
-  matters: ({ matters }) => `${matters}`,
-  commandedByEnemy: ({ commandedByEnemy }) => `${commandedByEnemy}`,
-  users: ({ users }, map) => usersText(users, map),
-  complex: ({ complex }) => wordText(complex),
+export const weakSquareJson = objectWriter<WeakSquareValue, Reading['weakSquares'][number]>({
+  square: (page, { square }) => putSquare(page, square),
+  side: (page, { side }) => putText(page, side),
+  hold: (page, { hold }) => putText(page, hold),
+  matters: (page, { matters }) => putFlag(page, matters),
+  commandedByEnemy: (page, { commandedByEnemy }) => putFlag(page, commandedByEnemy),
+  users: (page, { users }, map) => putList(page, users, map, userJson),
+  complex: (page, { complex }) => putText(page, complex),
+});
+
+type Post = Reading['outposts'][number];
+
+const challengeJson = objectWriter<NonNullable<OutpostValue['challenge']>, NonNullable<Post['challenge']>>({
+  from: (page, { from }) => putSquare(page, from),
+  moves: (page, { moves }) => putNumber(page, moves),
+});
+
+const supportJson = objectWriter<NonNullable<OutpostValue['support']>, NonNullable<Post['support']>>({
+  pawn: (page, { pawn }) => putSquare(page, pawn),
+  moves: (page, { moves }) => putNumber(page, moves),
 });
 
 /** An outpost or advanced post. */
-export const outpostJson = objectText<OutpostValue, Reading['outposts'][number]>({
-  square: ({ square }) => squareText(square),
-  side: ({ side }) => wordText(side),
-  rank: ({ rank }) => wordText(rank),
-  deep: ({ deep }) => `${deep}`,
-  hold: ({ hold }) => wordText(hold),
-  challenge: ({ challenge }) =>
-    challenge ? `{"from":${squareText(challenge.from)},"moves":${challenge.moves}}` : 'null',
-  support: ({ support }) => (support ? `{"pawn":${squareText(support.pawn)},"moves":${support.moves}}` : 'null'),
-  occupant: ({ occupant }) => squareText(occupant),
-  users: ({ users }, map) => usersText(users, map),
-  tradable: ({ tradable }) => `${tradable}`,
+export const outpostJson = objectWriter<OutpostValue, Post>({
+  square: (page, { square }) => putSquare(page, square),
+  side: (page, { side }) => putText(page, side),
+  rank: (page, { rank }) => putText(page, rank),
+  deep: (page, { deep }) => putFlag(page, deep),
+  hold: (page, { hold }) => putText(page, hold),
+  challenge: (page, { challenge }, map) => (challenge ? challengeJson(page, challenge, map) : putText(page, null)),
+  support: (page, { support }, map) => (support ? supportJson(page, support, map) : putText(page, null)),
+  occupant: (page, { occupant }) => putSquare(page, occupant),
+  users: (page, { users }, map) => putList(page, users, map, userJson),
+  tradable: (page, { tradable }) => putFlag(page, tradable),
 });
 
 /** A colour complex. */
-export const complexJson = objectText<ColourComplex, Reading['colourComplexes'][number]>({
-  side: ({ side }) => wordText(side),
-  colour: ({ colour }) => wordText(colour),
-  squares: ({ squares }) => squaresText(squares),
-  ownBishop: ({ ownBishop }) => `${ownBishop}`,
-  enemyBishop: ({ enemyBishop }) => `${enemyBishop}`,
+export const complexJson = objectWriter<ColourComplex, Reading['colourComplexes'][number]>({
+  side: (page, { side }) => putText(page, side),
+  colour: (page, { colour }) => putText(page, colour),
+  squares: (page, { squares }, map) => putSquares(page, squares, map),
+  ownBishop: (page, { ownBishop }) => putFlag(page, ownBishop),
+  enemyBishop: (page, { enemyBishop }) => putFlag(page, enemyBishop),
 });
 
-const pawnSideJson = objectText<PawnSideValue, Reading['pawns']['white']>({
-  islands: ({ islands }) => `${islands.length}`,
-  isolated: ({ isolated }) => squaresText(isolated),
-  doubled: ({ doubled }) => squaresText(doubled),
-  backward: ({ backward }) => squaresText(backward),
-  passed: ({ passed }) => squaresText(passed),
-  protectedPassed: ({ protectedPassed }) => squaresText(protectedPassed),
-  candidates: ({ candidates }) => squaresText(candidates),
-  onLight: ({ onLight }) => `${onLight}`,
-  onDark: ({ onDark }) => `${onDark}`,
-  majorities: ({ majorities }) => wordsText(majorities),
+const pawnSideJson = objectWriter<PawnSideValue, Reading['pawns']['white']>({
+  islands: (page, { islands }) => putNumber(page, islands.length),
+  isolated: (page, { isolated }, map) => putSquares(page, isolated, map),
+  doubled: (page, { doubled }, map) => putSquares(page, doubled, map),
+  backward: (page, { backward }, map) => putSquares(page, backward, map),
+  passed: (page, { passed }, map) => putSquares(page, passed, map),
+  protectedPassed: (page, { protectedPassed }, map) => putSquares(page, protectedPassed, map),
+  candidates: (page, { candidates }, map) => putSquares(page, candidates, map),
+  onLight: (page, { onLight }) => putNumber(page, onLight),
+  onDark: (page, { onDark }) => putNumber(page, onDark),
+  majorities: (page, { majorities }) => putTexts(page, majorities),
 });
 
-const ramJson: Write<Ram> = ({ white, black }) => `{"white":${squareText(white)},"black":${squareText(black)}}`;
-
-const leverJson = objectText<Lever, Reading['pawns']['levers'][number]>({
-  from: ({ from }) => squareText(from),
-  against: ({ against }) => squareText(against),
-  side: ({ side }) => wordText(side),
-  moves: ({ moves }) => `${moves}`,
-  supported: ({ supported }) => `${supported}`,
+const ramJson = objectWriter<Ram, Reading['pawns']['rams'][number]>({
+  white: (page, { white }) => putSquare(page, white),
+  black: (page, { black }) => putSquare(page, black),
 });
 
-const structureJson = objectText<StructureMatch, NonNullable<Reading['pawns']['structure']>>({
-  id: ({ id }) => textOf(id),
-  name: ({ name }) => textOf(name),
-  side: ({ side }) => wordText(side),
-  differs: ({ differs }) => `${differs}`,
+const leverJson = objectWriter<Lever, Reading['pawns']['levers'][number]>({
+  from: (page, { from }) => putSquare(page, from),
+  against: (page, { against }) => putSquare(page, against),
+  side: (page, { side }) => putText(page, side),
+  moves: (page, { moves }) => putNumber(page, moves),
+  supported: (page, { supported }) => putFlag(page, supported),
+});
+
+const structureJson = objectWriter<StructureMatch, NonNullable<Reading['pawns']['structure']>>({
+  id: (page, { id }) => putText(page, id),
+  name: (page, { name }) => putText(page, name),
+  side: (page, { side }) => putText(page, side),
+  differs: (page, { differs }) => putNumber(page, differs),
+});
+
+const fixednessJson = objectWriter<PawnValues['fixedness'], Reading['pawns']['fixedness']>({
+  all: (page, { all }) => putNumber(page, all),
+  centre: (page, { centre }) => putNumber(page, centre),
 });
 
 /** The pawns of both sides, what holds between them, and the named structure. */
-export const pawnsJson = objectText<Pick<ReadingValues, 'pawns' | 'structure'>, Reading['pawns']>({
-  white: ({ pawns }, map) => pawnSideJson(pawns.white, map),
-  black: ({ pawns }, map) => pawnSideJson(pawns.black, map),
-  rams: ({ pawns }, map) => listText(pawns.rams, map, ramJson),
-  levers: ({ pawns }, map) => listText(pawns.levers, map, leverJson),
-  fixedness: ({ pawns: { fixedness } }) => `{"all":${fixedness.all},"centre":${fixedness.centre}}`,
-  structure: ({ structure }, map) => (structure ? structureJson(structure, map) : 'null'),
+export const pawnsJson = objectWriter<Pick<ReadingValues, 'pawns' | 'structure'>, Reading['pawns']>({
+  white: (page, { pawns }, map) => pawnSideJson(page, pawns.white, map),
+  black: (page, { pawns }, map) => pawnSideJson(page, pawns.black, map),
+  rams: (page, { pawns }, map) => putList(page, pawns.rams, map, ramJson),
+  levers: (page, { pawns }, map) => putList(page, pawns.levers, map, leverJson),
+  fixedness: (page, { pawns }, map) => fixednessJson(page, pawns.fixedness, map),
+  structure: (page, { structure }, map) => (structure ? structureJson(page, structure, map) : putText(page, null)),
 });

@@ -1,50 +1,64 @@
 /**
- * A reading as the text of its JSON, written straight from engine values: what is sent and stored. `encode.ts` makes the
+ * A reading as JSON, written straight from engine values: what is sent and stored. `encode.ts` makes the
  * same reading as a value, for what is drawn from it; tests hold the two to each other and to the schema, character by
  * character.
  */
 import { type Fault, formatFen } from '../board';
 import { explain, type Explanation, type ReadingValues } from '../explain';
+import { fragment, newPage, type Page, put, putList, putSides, putTexts, torn } from './page';
 import type { Reading } from './schema';
-import { listText, sidesText, textOf, wordsText, wordText } from './text';
+
 import { ENGINE_VERSION } from './version';
 import { diagonalJson, fileJson, kingJson, manJson, totalsJson } from './write-men';
-import { complexJson, outpostJson, pawnsJson, squaresJson, weakSquareJson } from './write-squares';
+import { complexJson, outpostJson, pawnsJson, putBoard, weakSquareJson } from './write-squares';
 import { statementJson } from './write-statements';
 
 /** The parts of a reading that may be left out; the others say which position it is. */
 export type ReadingPart = Exclude<keyof Reading, 'engine' | 'fen' | 'mode' | 'warnings' | 'sideToMove'>;
 
 /** Each part from the values; sentences are worked out only where they are asked for. */
-const PARTS: { readonly [Part in ReadingPart]: (values: ReadingValues, said: () => Explanation) => string } = {
-  squares: squaresJson,
-  men: ({ men, map }) => listText(men, map, manJson),
-  pawns: ({ pawns, structure, map }) => pawnsJson({ pawns, structure }, map),
-  weakSquares: ({ weakSquares, map }) => listText(weakSquares, map, weakSquareJson),
-  outposts: ({ outposts, map }) => listText(outposts, map, outpostJson),
-  files: ({ files, map }) => listText(files, map, fileJson),
-  diagonals: ({ diagonals, map }) => listText(diagonals, map, diagonalJson),
-  colourComplexes: ({ complexes, map }) => listText(complexes, map, complexJson),
-  kings: ({ kings, map }) => sidesText(kings, map, kingJson),
-  totals: ({ totals, map }) => sidesText(totals, map, totalsJson),
-  statements: ({ map }, said) => listText(said().statements, map, statementJson),
-  lead: (_, said) => wordsText(said().lead),
-};
+const PARTS: { readonly [Part in ReadingPart]: (page: Page, values: ReadingValues, said: () => Explanation) => void } =
+  {
+    squares: putBoard,
+    men: (page, { men, map }) => putList(page, men, map, manJson),
+    pawns: (page, values) => pawnsJson(page, values, values.map),
+    weakSquares: (page, { weakSquares, map }) => putList(page, weakSquares, map, weakSquareJson),
+    outposts: (page, { outposts, map }) => putList(page, outposts, map, outpostJson),
+    files: (page, { files, map }) => putList(page, files, map, fileJson),
+    diagonals: (page, { diagonals, map }) => putList(page, diagonals, map, diagonalJson),
+    colourComplexes: (page, { complexes, map }) => putList(page, complexes, map, complexJson),
+    kings: (page, { kings, map }) => putSides(page, kings, map, kingJson),
+    totals: (page, { totals, map }) => putSides(page, totals, map, totalsJson),
+    statements: (page, { map }, said) => putList(page, said().statements, map, statementJson),
+    lead: (page, _, said) => putTexts(page, said().lead),
+  };
 
 const NAMES = Object.keys(PARTS) as ReadingPart[];
+const BEFORE = NAMES.map((name) => fragment(`,"${name}":`));
+const END = fragment('}');
 
-/** The JSON of a reading, its parts in the order of the schema; `include` picks some of them. */
+/** One page serves all readings: each is torn off before the next begins. */
+const page = newPage();
+
+/** The JSON of a reading in UTF-8, its parts in the order of the schema; `include` picks some of them. */
 export function writeReading(
   values: ReadingValues,
   warnings: readonly Fault[],
   include: readonly ReadingPart[] = NAMES,
-): string {
+): Uint8Array<ArrayBuffer> {
   const { position } = values;
   let made: Explanation | undefined;
   const said = () => (made ??= explain(values));
-  let text =
-    `{"engine":${textOf(ENGINE_VERSION)},"fen":${textOf(formatFen(position))},"mode":${wordText(position.mode)}` +
-    `,"warnings":${JSON.stringify(warnings)},"sideToMove":${wordText(position.sideToMove)}`;
-  for (const name of NAMES) if (include.includes(name)) text += `,"${name}":${PARTS[name](values, said)}`;
-  return `${text}}`;
+  const { mode, sideToMove } = position;
+  const first = JSON.stringify({ engine: ENGINE_VERSION, fen: formatFen(position), mode, warnings, sideToMove });
+  page.length = 0;
+  put(page, fragment(first.slice(0, -1)));
+  for (let index = 0; index < NAMES.length; index++) {
+    const name = NAMES[index]!;
+    if (!include.includes(name)) continue;
+    put(page, BEFORE[index]!);
+    PARTS[name](page, values, said);
+  }
+  put(page, END);
+  return torn(page);
 }

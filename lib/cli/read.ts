@@ -1,5 +1,5 @@
 /** `waypost read`: a FEN to a page of text or to JSON. */
-import type { ReadingText } from '@/engine';
+import type { ReadingBytes } from '@/engine';
 import type { Fault } from '@/engine/reading/schema';
 import { computeReading, writeReading } from '@/lib/services/readings/engine';
 import { MODES, type Mode } from '@/openapi/schemas/ids';
@@ -56,7 +56,7 @@ export async function runRead(args: readonly string[], terminal: Terminal): Prom
   return EXIT.good;
 }
 
-function readingOf(text: string, mode: Mode): Answer<ReadingText, Fault> {
+function readingOf(text: string, mode: Mode): Answer<ReadingBytes, Fault> {
   const result = writeReading(text, mode);
   return result.ok ? { ok: true, value: result.value } : { ok: false, fault: result.fault[0] };
 }

@@ -69,7 +69,7 @@ function doReading({ fen, mode, include }: ReadingJob): ReadingOutcome {
   const { fen: normalised, warnings, json } = result.value;
   // The warnings take part: a diagram's say what its FEN claimed before it was normalised.
   const identity = JSON.stringify([engineVersion, mode, normalised, warnings, include]);
-  return { ok: true, json: encoder.encode(checkedReading(json)), identity };
+  return { ok: true, json: checkedReading(json), identity };
 }
 
 function doLines({ fens, firstLine, mode, include }: LinesJob): LinesOutcome {
@@ -78,14 +78,28 @@ function doLines({ fens, firstLine, mode, include }: LinesJob): LinesOutcome {
     const line = firstLine + index;
     try {
       const result = writeReading(fen, mode, include);
-      return result.ok ? checkedLine(result.value.json) : badLine({ error: result.fault[0], line });
+      return result.ok ? checkedLine(result.value.json) : encoder.encode(badLine({ error: result.fault[0], line }));
     } catch (error) {
       mistakes.push({ line, reason: error instanceof Error ? (error.stack ?? error.message) : String(error) });
-      return badLine({ error: OUR_MISTAKE, line });
+      return encoder.encode(badLine({ error: OUR_MISTAKE, line }));
     }
   });
-  return { ndjson: encoder.encode(lines.map((line) => `${line}\n`).join('')), mistakes };
+  return { ndjson: joined(lines), mistakes };
 }
+
+/** Lines one after the other, each with its end. */
+function joined(lines: readonly Uint8Array[]): Uint8Array {
+  const all = new Uint8Array(lines.reduce((sum, line) => sum + line.length + 1, 0));
+  let at = 0;
+  for (const line of lines) {
+    all.set(line, at);
+    at += line.length + 1;
+    all[at - 1] = LINE_END;
+  }
+  return all;
+}
+
+const LINE_END = 0x0a;
 
 const OUR_MISTAKE: Fault = {
   code: 'internal',

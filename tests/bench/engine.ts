@@ -2,7 +2,7 @@
 import { attacks, type Color, makeSquare, SquareSet } from 'chessops';
 import { parseFen as chessopsFen } from 'chessops/fen';
 import { Chess, SQUARES } from 'chess.js';
-import { newDesk, parseFen, type Position, readFenText, readValues } from '@/engine';
+import { newDesk, parseFen, type Position, writeFen, readValues } from '@/engine';
 import { attackersOf, attackMap, newAttackMap } from '@/engine/attacks';
 import { squareName, squareNamed } from '@/engine/board';
 import type { Figure } from './figure';
@@ -112,9 +112,6 @@ function scatterAttacks(board: ReturnType<typeof boardOf>): SquareSet[] {
   return map;
 }
 
-const utf8 = new TextEncoder();
-const room = new Uint8Array(1 << 20);
-
 /** Readings a second: as engine values, and whole, from FEN to the bytes of the JSON that HTTP sends, sentences included. */
 export function readingFigures(fens: readonly string[]): Figure[] {
   const positions = positionsOf(fens);
@@ -132,8 +129,8 @@ export function readingFigures(fens: readonly string[]): Figure[] {
     whole.push(
       timed(fens.length, () => {
         for (const fen of fens) {
-          const reading = readFenText(fen, 'strict', undefined, desk);
-          if (reading.ok) bytes += utf8.encodeInto(reading.value.json, room).written;
+          const reading = writeFen(fen, 'strict', undefined, desk);
+          if (reading.ok) bytes += reading.value.json.length;
         }
       }),
     );

@@ -56,14 +56,19 @@ const featureKindSchema = z
     'doubled-pawn',
     'weak-complex',
     'ram',
+    'castling-lost',
   ])
   .meta({ id: 'FeatureKind', description: 'A kind of lasting feature.' });
 
 const featureFields = {
   kind: featureKindSchema,
   side: sideSchema.nullable().describe('Whose it is: who suffers from a weakness, who has the rest; null: both.'),
-  squares: squaresSchema,
-  text: z.string(),
+  squares: squaresSchema.describe('Its squares, those of pawns as they stand there.'),
+  hold: z
+    .enum(['permanent', 'fixed'])
+    .nullable()
+    .describe('Weak squares and outposts: for good, or while the pawns that could come are stopped; else null.'),
+  text: z.string().describe('The claim, without full stop.'),
 };
 
 export const commitmentSchema = z
@@ -71,7 +76,9 @@ export const commitmentSchema = z
     ply,
     move,
     side: sideSchema,
-    act: z.enum(['pawn-move', 'capture', 'promotion']),
+    act: z
+      .enum(['pawn-move', 'capture', 'promotion', 'king-move', 'rook-move'])
+      .describe('A king’s or rook’s move is one where it gives up castling.'),
     changes: z.array(z.object({ ...featureFields, made: z.boolean().describe('Made by the move; else ended.') })),
     text: z.string(),
   })

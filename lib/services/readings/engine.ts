@@ -1,5 +1,5 @@
 /** The only door of the services to the engine: what they need of it, by the names they use. */
-import { ENGINE_VERSION, newDesk, readFen, readFenText, type ReadingText } from '@/engine';
+import { ENGINE_VERSION, newDesk, readFen, writeFen, type ReadingBytes } from '@/engine';
 import type { Fault, Reading } from '@/engine/reading/schema';
 import type { Result } from '@/engine/result';
 import type { Mode, ReadingPart } from '@/openapi/schemas/ids';
@@ -19,6 +19,6 @@ export function writeReading(
   fen: string,
   mode: Mode,
   include?: readonly ReadingPart[],
-): Result<ReadingText, readonly [Fault, ...Fault[]]> {
-  return readFenText(fen, mode, include, desk);
+): Result<ReadingBytes, readonly [Fault, ...Fault[]]> {
+  return writeFen(fen, mode, include, desk);
 }
