@@ -937,13 +937,20 @@ export interface components {
             /** @description With its number, as "12. Nf3" or "12... c5". */
             readonly move: string;
             readonly side: components["schemas"]["Side"];
-            /** @enum {string} */
-            readonly act: "pawn-move" | "capture" | "promotion";
+            /**
+             * @description A king’s or rook’s move is one where it gives up castling.
+             * @enum {string}
+             */
+            readonly act: "pawn-move" | "capture" | "promotion" | "king-move" | "rook-move";
             readonly changes: readonly {
                 readonly kind: components["schemas"]["FeatureKind"];
                 /** @description Whose it is: who suffers from a weakness, who has the rest; null: both. */
                 readonly side: components["schemas"]["Side"] | null;
+                /** @description Its squares, those of pawns as they stand there. */
                 readonly squares: readonly components["schemas"]["Square"][];
+                /** @description Weak squares and outposts: for good, or while the pawns that could come are stopped; else null. */
+                readonly hold: ("permanent" | "fixed") | null;
+                /** @description The claim, without full stop. */
                 readonly text: string;
                 /** @description Made by the move; else ended. */
                 readonly made: boolean;
@@ -1093,7 +1100,7 @@ export interface components {
          * @description A kind of lasting feature.
          * @enum {string}
          */
-        readonly FeatureKind: "structure" | "weak-square" | "outpost" | "open-file" | "half-open-file" | "bishop-pair" | "passed-pawn" | "isolated-pawn" | "backward-pawn" | "doubled-pawn" | "weak-complex" | "ram";
+        readonly FeatureKind: "structure" | "weak-square" | "outpost" | "open-file" | "half-open-file" | "bishop-pair" | "passed-pawn" | "isolated-pawn" | "backward-pawn" | "doubled-pawn" | "weak-complex" | "ram" | "castling-lost";
         /** @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four. */
         readonly Fen: string;
         /**
@@ -1419,7 +1426,11 @@ export interface components {
             readonly kind: components["schemas"]["FeatureKind"];
             /** @description Whose it is: who suffers from a weakness, who has the rest; null: both. */
             readonly side: components["schemas"]["Side"] | null;
+            /** @description Its squares, those of pawns as they stand there. */
             readonly squares: readonly components["schemas"]["Square"][];
+            /** @description Weak squares and outposts: for good, or while the pawns that could come are stopped; else null. */
+            readonly hold: ("permanent" | "fixed") | null;
+            /** @description The claim, without full stop. */
             readonly text: string;
             /** @description 0: there from the beginning. */
             readonly ply: number;
