@@ -8,8 +8,8 @@ export const VARIATION_DEPTH_MAX = 40;
 const TAG = /\[\s*([^\s"\]]+)\s*"((?:\\.|[^"\\\n])*)"\s*\]/y;
 /** Tags as they should not be but are: quotes inside the value, the last quote missing. */
 const LOOSE_TAG = /\[\s*([^\s"\]]+)\s*"([^\n]*?)"?\s*\][^\S\n]*(?=\n|$)/y;
-/** A tag on a line of its own. Inside a comment it says that the comment was never ended. */
-const TAG_LINE = /\n[^\S\n]*\[\w+ "[^\n]*"\][^\S\n]*(?=\n|$)/g;
+/** A tag on a line of its own, at its beginning. Inside a comment it says that the comment was never ended. */
+const TAG_LINE = /\n\[\w+ "[^\n]*"\][^\S\n]*(?=\n|$)/g;
 const NOT_MOVES: ReadonlySet<string> = new Set(['ep', 'e.p.', 'e.p', 'ch', 'ch.', 'mate', 'dbl', 'dis', 'N', 'D']);
 
 const NEWLINE = 10;

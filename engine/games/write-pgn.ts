@@ -70,7 +70,8 @@ function filled(words: readonly string[]): string {
   for (const word of words) {
     if (line !== '' && line.length + 1 + word.length > LINE_LENGTH_MAX) {
       lines.push(line);
-      line = word;
+      // At the beginning of a line these two would be an escape and a tag, even inside a comment.
+      line = word.startsWith('%') || word.startsWith('[') ? ` ${word}` : word;
     } else line = line === '' ? word : `${line} ${word}`;
   }
   return [...lines, line].join('\n');
