@@ -1,10 +1,11 @@
 /**
  * `npm run bench`: prints figures from one run, asserts none. `--json` prints one object a line. Needs a build
- * (`npm run build`). `--only engine|http|page` runs a part. `judgement FILE` ranks the positions of a file instead.
+ * (`npm run build`). `--only engine|games|http|page` runs a part. `judgement FILE` ranks the positions of a file instead.
  */
 import { realPositions } from '../support/real-positions';
 import { attackMapFigures, readingFigures } from './engine';
 import type { Figure } from './figure';
+import { gameFigures, pgnFigures } from './games';
 import { httpFigures, startBuiltServer } from './http';
 import { judgement } from './judgement';
 import { pageFigures } from './page';
@@ -34,6 +35,10 @@ function print(figures: readonly Figure[]): void {
 if (wants('engine')) {
   print(attackMapFigures(realPositions(600)));
   print(readingFigures(realPositions(2500)));
+}
+if (wants('games')) {
+  print(gameFigures());
+  print(pgnFigures());
 }
 if (wants('http') || wants('page')) {
   const server = await startBuiltServer();
