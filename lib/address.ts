@@ -30,7 +30,7 @@ export function addressIn({ headers, socket }: Pick<IncomingMessage, 'headers' |
 }
 
 /** The address of a marked request; undefined where no server marked it (a handler called in a test). */
-export function addressOf(request: Request): string | undefined {
+export function addressOf(request: { readonly headers: Pick<Headers, 'get'> }): string | undefined {
   return request.headers.get(HEADER) ?? undefined;
 }
 

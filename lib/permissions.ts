@@ -4,8 +4,12 @@ import { KEY_SCOPES, type KeyScope } from '@/openapi/contract';
 import type { Actor } from './actor';
 import { AppError } from './errors';
 
-/** What can be permitted. `workspace`: members, roles, keys, usage, audit, deletion of the workspace. */
+/**
+ * What can be permitted. `account`: one's own name, address, password, sessions and data. `workspace`: members, roles,
+ * keys, usage, audit, deletion of the workspace.
+ */
 export const ACTS = [
+  'account',
   'workspace',
   'studies:write',
   'publish',
@@ -18,6 +22,7 @@ export type Act = (typeof ACTS)[number];
 
 /** The roles that may do each act; students read what is shared with them, which the services of studies see to. */
 export const PERMISSIONS: Readonly<Record<Act, readonly Role[]>> = {
+  account: ['owner', 'coach', 'writer', 'student'],
   workspace: ['owner'],
   'studies:write': ['owner', 'coach', 'writer'],
   publish: ['owner', 'coach', 'writer'],

@@ -52,7 +52,16 @@ export async function sessionActor(headers: Headers): Promise<Actor> {
 function cookiesOf(header: string | null): ReadonlyMap<string, string> {
   const pairs = (header ?? '').split(';').flatMap((part) => {
     const at = part.indexOf('=');
-    return at < 0 ? [] : [[part.slice(0, at).trim(), decodeURIComponent(part.slice(at + 1).trim())] as const];
+    return at < 0 ? [] : [[part.slice(0, at).trim(), decoded(part.slice(at + 1).trim())] as const];
   });
   return new Map(pairs);
+}
+
+/** A value that was tampered with may be no longer well-formed; it is then taken as it is, and opens nothing. */
+function decoded(value: string): string {
+  try {
+    return decodeURIComponent(value);
+  } catch {
+    return value;
+  }
 }
