@@ -300,6 +300,66 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/api/v1/studies/{id}/export.pgn": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Export a study as PGN
+         * @description Each position is a game without moves that begins there, its note a comment; then the games of the study.
+         */
+        readonly get: operations["exportStudyPgn"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/export.csv": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Export the positions of a study as CSV
+         * @description One line a position: place, title, FEN, layer, man, note (RFC 4180).
+         */
+        readonly get: operations["exportStudyCsv"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/studies/{id}/export.json": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Export a study as JSON
+         * @description Everything in a study, as the other calls answer it.
+         */
+        readonly get: operations["exportStudyJson"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/api/v1/studies/{id}/positions": {
         readonly parameters: {
             readonly query?: never;
@@ -942,6 +1002,7 @@ export interface components {
              * @enum {string}
              */
             readonly act: "pawn-move" | "capture" | "promotion" | "king-move" | "rook-move";
+            /** @description One a feature; it still stands two half-moves later, or the game is over. */
             readonly changes: readonly {
                 readonly kind: components["schemas"]["FeatureKind"];
                 /** @description Whose it is: who suffers from a weakness, who has the rest; null: both. */
@@ -955,6 +1016,7 @@ export interface components {
                 /** @description Made by the move; else ended. */
                 readonly made: boolean;
             }[];
+            /** @description The move and its changes in sentences, those of one kind together. */
             readonly text: string;
         };
         /** @description Two to four positions or placements side by side. */
@@ -1137,23 +1199,32 @@ export interface components {
             readonly game: number;
             /** @description Line of the text, from 1. */
             readonly line: number;
+            /** @description The move at fault with its number; null where no move is. */
             readonly move: string | null;
+            /** @description Stable within v1, as "illegal-move". */
             readonly code: string;
+            /** @description A sentence. */
             readonly message: string;
         };
         /** @description A game: timeline, journeys, commitments, origins. */
         readonly GameReading: {
             /** @description Its number in the text. */
             readonly game: number;
+            /** @description Its PGN tags by name. */
             readonly tags: {
                 readonly [key: string]: string;
             };
             /** @enum {string} */
             readonly result: "1-0" | "0-1" | "1/2-1/2" | "*";
+            /** @description Half-moves of the main line. */
             readonly plies: number;
+            /** @description One a position, the start first. */
             readonly timeline: readonly components["schemas"]["TimelinePly"][];
+            /** @description One a man, in square order of where they began. */
             readonly journeys: readonly components["schemas"]["Journey"][];
+            /** @description In the order of the game. */
             readonly commitments: readonly components["schemas"]["Commitment"][];
+            /** @description One a lasting feature of the last position. */
             readonly origins: readonly components["schemas"]["Origin"][];
         };
         /** @description The games that could be read, and why the others could not. */
@@ -1253,6 +1324,7 @@ export interface components {
             }[];
             /** @description The half-move that took it; null: it is there at the end. */
             readonly takenAt: number | null;
+            /** @description What it became, and at which half-move. */
             readonly promoted: {
                 readonly kind: components["schemas"]["Kind"];
                 readonly at: number;
@@ -1494,7 +1566,7 @@ export interface components {
             readonly note?: string;
             readonly marks?: readonly components["schemas"]["Mark"][];
             /** @description The layer its plate shows; null: the reader’s choice. */
-            readonly layer?: ("none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes") | null;
+            readonly layer?: ("position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes") | null;
             readonly man?: components["schemas"]["Square"] | null;
             readonly after?: components["schemas"]["Id"] | null;
         };
@@ -1517,7 +1589,7 @@ export interface components {
              * @description The layer its plate shows; null: the reader’s choice.
              * @default null
              */
-            readonly layer?: ("none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes") | null;
+            readonly layer?: ("position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes") | null;
             /**
              * @description The man whose layer is shown.
              * @default null
@@ -2047,6 +2119,13 @@ export interface components {
             /** @description The request of the computing call; its answer is kept. */
             readonly request: components["schemas"]["ExchangesRequest"];
         };
+        /** @description Everything in a study; games as PGN. */
+        readonly StudyExport: {
+            readonly study: components["schemas"]["Study"];
+            readonly positions: readonly components["schemas"]["StudyPosition"][];
+            readonly results: readonly components["schemas"]["StudyResult"][];
+            readonly games: readonly string[];
+        };
         /** @description A page of a list. */
         readonly StudyPage: {
             readonly items: readonly components["schemas"]["Study"][];
@@ -2061,7 +2140,7 @@ export interface components {
             readonly note: string;
             readonly marks: readonly components["schemas"]["Mark"][];
             /** @description The layer its plate shows; null: the reader’s choice. */
-            readonly layer: ("none" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes") | null;
+            readonly layer: ("position" | "control" | "command" | "weak" | "outposts" | "files" | "mobility" | "routes") | null;
             readonly man: components["schemas"]["Square"] | null;
             /** @description One more with each change; the ETag names it. */
             readonly version: number;
@@ -2117,7 +2196,9 @@ export interface components {
             readonly ply: number;
             /** @description The move that led here; null at the beginning. */
             readonly move: string | null;
+            /** @description The position, six fields. */
             readonly fen: string;
+            /** @description The named pawn structure; its side leads, or is to move where the structure is alike for both. */
             readonly structure: {
                 readonly id: string;
                 readonly name: string;
@@ -2149,12 +2230,16 @@ export interface components {
             readonly white: {
                 /** @description Weak squares of the side itself. */
                 readonly weakSquares: number;
+                /** @description Outposts of the side: no enemy pawn can come, a pawn guards them now or in one move. */
                 readonly outposts: number;
                 /** @description Files it controls. */
                 readonly files: number;
+                /** @description Safe moves of all its men. */
                 readonly safeMoves: number;
                 /** @description Flight squares of its king. */
                 readonly flights: number;
+                /** @description Own pawns before its king: on its file and the files beside, one a file at most. */
+                readonly shelter: number;
                 /** @description Enemy men that attack the zone of its king. */
                 readonly kingAttackers: number;
                 /** @description Worth of its men in pawns, the king left out. */
@@ -2163,12 +2248,16 @@ export interface components {
             readonly black: {
                 /** @description Weak squares of the side itself. */
                 readonly weakSquares: number;
+                /** @description Outposts of the side: no enemy pawn can come, a pawn guards them now or in one move. */
                 readonly outposts: number;
                 /** @description Files it controls. */
                 readonly files: number;
+                /** @description Safe moves of all its men. */
                 readonly safeMoves: number;
                 /** @description Flight squares of its king. */
                 readonly flights: number;
+                /** @description Own pawns before its king: on its file and the files beside, one a file at most. */
+                readonly shelter: number;
                 /** @description Enemy men that attack the zone of its king. */
                 readonly kingAttackers: number;
                 /** @description Worth of its men in pawns, the king left out. */
@@ -4520,6 +4609,300 @@ export interface operations {
             };
             /** @description unsupported-media-type: The body is of a type that this call does not take. */
             readonly 415: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly exportStudyPgn: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Export a study as PGN */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/vnd.chess-pgn": string;
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly exportStudyCsv: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Export the positions of a study as CSV */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "text/csv": string;
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly exportStudyJson: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /**
+                 * @description An id of something stored.
+                 * @example 00000000-0000-4000-8000-0000000000a1
+                 */
+                readonly id: components["schemas"]["Id"];
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Export a study as JSON */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StudyExport"];
+                };
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
                 headers: {
                     /** @description The id of this request. */
                     readonly "X-Request-Id"?: string;

@@ -20,7 +20,7 @@ export function SiteHeader() {
           <InteractiveSiteNav />
         </nav>
         <div className="-mr-1 ml-auto flex items-center gap-x-2 sm:gap-x-5">
-          <a href="/api/v1/openapi.json" className="flex min-h-11 items-center px-1 hover:underline">
+          <a href="/reference" className="flex min-h-11 items-center px-1 hover:underline">
             API
           </a>
           <InteractiveThemeSwitch />

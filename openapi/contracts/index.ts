@@ -3,6 +3,7 @@ import type { Contract } from '../contract';
 import { createReadings } from './batch';
 import { createComparison, createExchanges } from './compare';
 import { getDocument, getIndex, getProblem } from './document';
+import { exportStudyCsv, exportStudyJson, exportStudyPgn } from './exports';
 import { createGames } from './games';
 import { getHealth } from './health';
 import { cancelJob, createJob, getJob, listJobItems, listJobs, retryJob, watchJob } from './jobs';
@@ -51,6 +52,9 @@ export const contracts = {
   listChanges,
   getShares,
   putShares,
+  exportStudyPgn,
+  exportStudyCsv,
+  exportStudyJson,
   listPositions,
   createPosition,
   getPosition,

@@ -2,6 +2,7 @@
 import { z } from 'zod';
 import { squareSchema } from '../../engine/reading/schema';
 import { fenSchema } from './ids';
+import { plateLayers } from './plates';
 import { momentSchema, pageQuery, uuidSchema, versionSchema } from './page';
 
 export const TITLE_LENGTH_MAX = 200;
@@ -54,8 +55,7 @@ export const markSchema = z
   })
   .meta({ id: 'Mark', description: 'Something a person marks on a plate.' });
 
-export const PLATE_LAYERS = ['none', 'control', 'command', 'weak', 'outposts', 'files', 'mobility', 'routes'] as const;
-const layerSchema = z.enum(PLATE_LAYERS).nullable().describe('The layer its plate shows; null: the reader’s choice.');
+const layerSchema = z.enum(plateLayers).nullable().describe('The layer its plate shows; null: the reader’s choice.');
 
 const positionFields = {
   fen: fenSchema,

@@ -23,7 +23,7 @@ async function asked(
   return handler(new Request(ORIGIN + path, { method, headers }), { params: Promise.resolve({ code: 'internal' }) });
 }
 
-const addresses = routeFiles().filter((file) => !file.includes('[[...path]]'));
+const addresses = routeFiles().filter((file) => !/\[\[?\.\.\./.test(file));
 
 /** Those whose calls compute or describe only. */
 const openAddresses = addresses.filter((file) =>

@@ -152,7 +152,8 @@ function wordsOf({ kind, title, note, request }: ResultRow): Record<string, unkn
   return { kind, title, note, request };
 }
 
-function resultAnswer(row: ResultRow): ResultAnswer {
+/** A result as promised. */
+export function resultAnswer(row: ResultRow): ResultAnswer {
   return {
     id: row.id,
     kind: row.kind as ResultKind,
