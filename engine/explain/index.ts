@@ -3,4 +3,4 @@ export type { Fact, FactId } from './fact';
 export type { ReadingValues } from './values';
 export { routeFaultText, type RouteFacts, routeText, stepReason } from './route-words';
 export { type Phrase, type Phrases, phraseText } from './phrase';
-export { capital, counted, inWords, listed, type ManAt, name, possessive, theMan, theMen } from './words';
+export { capital, counted, inView, inWords, listed, type ManAt, name, possessive, theMan, theMen } from './words';

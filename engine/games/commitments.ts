@@ -3,7 +3,7 @@ import { PAWN, type Position, squareNamed } from '../board';
 import type { Step } from '../rules';
 import type { Side, SquareName } from '../types';
 import { endedText, madeText } from './feature-words';
-import { type Feature, type FeatureKind, type Features, isPawnOn } from './features';
+import { type Feature, type FeatureKind, type Features, inTellingOrder, isPawnOn } from './features';
 
 /** How a commitment was made: a king's or rook's move is one where it gives up castling. */
 export const ACTS = ['pawn-move', 'capture', 'promotion', 'king-move', 'rook-move'] as const;
@@ -76,24 +76,33 @@ export function commitmentsOf(game: GameFeatures): Commitment[] {
     if (before === after) return [];
     const later = features.slice(ply, ply + 1 + LASTS_PLIES);
     // What matters only later is named here too, so that every origin is found among the commitments.
-    const made = [...after.values()].filter(
-      ({ key, isShown }) =>
-        !before.has(key) && later.every((each) => each.has(key)) && (isShown || last.get(key)?.isShown === true),
-    );
-    const ended = [...before.values()].filter(
-      (feature) =>
-        later.every((each) => !each.has(feature.key)) && isEndWorthAWord(feature, after, game.positions[ply]!),
-    );
+    const side = step.man >> 3 ? 'black' : 'white';
+    const order = inTellingOrder(side);
+    const made = [...after.values()]
+      .filter(
+        ({ key, isShown }) =>
+          !before.has(key) && later.every((each) => each.has(key)) && (isShown || last.get(key)?.isShown === true),
+      )
+      .sort(order);
+    const ended = [...before.values()]
+      .filter(
+        (feature) =>
+          later.every((each) => !each.has(feature.key)) && isEndWorthAWord(feature, after, game.positions[ply]!),
+      )
+      .sort(order);
     if (made.length + ended.length === 0) return [];
     const move = moves[ply]!;
-    const texts = [...groups(made).map(madeText), ...groups(ended).map(endedText)];
+    const texts = [...groups(made).map((alike) => madeText(alike, side)), ...groups(ended).map(endedText)];
     return [
       {
         ply,
         move,
-        side: step.man >> 3 ? 'black' : 'white',
+        side,
         act: actOf(step),
-        changes: [...made.map((each) => changeOf(each, true)), ...ended.map((each) => changeOf(each, false))],
+        changes: [
+          ...made.map((each) => changeOf(each, side, true)),
+          ...ended.map((each) => changeOf(each, side, false)),
+        ],
         text: `${move}: ${texts.join('. ')}.`,
       },
     ];
@@ -135,19 +144,29 @@ function groups(features: readonly Feature[]): [Feature, ...Feature[]][] {
   return [...found.values()];
 }
 
-function changeOf(feature: Feature, made: boolean): FeatureChange {
+function changeOf(feature: Feature, mover: Side, made: boolean): FeatureChange {
   const { kind, side, squares, hold } = feature;
-  return { kind, side, squares, hold, made, text: made ? madeText([feature]) : endedText([feature]) };
+  return { kind, side, squares, hold, made, text: made ? madeText([feature], mover) : endedText([feature]) };
 }
 
 /** For each shown feature of the last position the move that made it: absent before, there ever since. */
-export function originsOf({ features, moves }: GameFeatures): Origin[] {
+export function originsOf({ features, moves, positions }: GameFeatures): Origin[] {
   const last = features.length - 1;
-  const shown = [...features[last]!.values()].filter(({ isShown }) => isShown);
+  const shown = [...features[last]!.values()]
+    .filter(({ isShown }) => isShown)
+    .sort(inTellingOrder(positions[last]!.sideToMove));
   return shown.map((feature) => {
     const { key, kind, side, squares, hold } = feature;
     let ply = last;
     while (ply > 0 && features[ply - 1]!.has(key)) ply--;
-    return { kind, side, squares, hold, text: madeText([feature]), ply, move: moves[ply]! };
+    return {
+      kind,
+      side,
+      squares,
+      hold,
+      text: madeText([feature], positions[ply]!.sideToMove === 'white' ? 'black' : 'white'),
+      ply,
+      move: moves[ply]!,
+    };
   });
 }

@@ -14,6 +14,8 @@ export interface CompactSide {
   readonly files: number;
   readonly safeMoves: number;
   readonly flights: number;
+  /** Own pawns before its king, one a file at most: on the king's file and its neighbours, 0 to 3. */
+  readonly shelter: number;
   /** Enemy men that attack the zone of its king. */
   readonly kingAttackers: number;
   /** Worth of its men, the king left out, in pawns. */
@@ -57,6 +59,7 @@ export function compactOf(values: ReadingValues): CompactReading {
       files: files.filter(({ control }) => control === side).length,
       safeMoves: totals[side].safeMoves,
       flights: kings[side]?.flights.length ?? 0,
+      shelter: kings[side]?.shelter.filter(({ pawn }) => pawn !== null).length ?? 0,
       kingAttackers: kings[side]?.reachedBy.length ?? 0,
       material: material[side === 'white' ? 0 : 1]!,
     }),

@@ -1,12 +1,15 @@
 /** Lasting features in sentences: those of one kind and side together. */
-import { capital, listed, name, possessive } from '../explain';
-import type { SquareName } from '../types';
+import { capital, inView, listed, name, possessive } from '../explain';
+import type { Side, SquareName } from '../types';
 import type { Feature } from './features';
 
-/** Features alike in kind, side and hold, as one claim without full stop: 'd3 and f3 are weak for White for good: …'. */
-export function madeText(alike: readonly [Feature, ...Feature[]]): string {
+/**
+ * Features alike in kind, side and hold, as one claim without full stop: 'd3 and f3 are weak for White for good: …'.
+ * Of pawns of both sides the mover's is named first.
+ */
+export function madeText(alike: readonly [Feature, ...Feature[]], mover: Side): string {
   const [{ kind, side, hold, label, squares }] = alike;
-  const all = alike.flatMap((each) => each.squares);
+  const all = alike.flatMap((each) => (kind === 'ram' ? pair(each, mover) : each.squares));
   const whose = side === null ? '' : name(side);
   const them = all.length === 1 ? 'it' : 'them';
   switch (kind) {
@@ -27,11 +30,11 @@ export function madeText(alike: readonly [Feature, ...Feature[]]): string {
     case 'bishop-pair':
       return `${whose} alone has both bishops`;
     case 'weak-complex':
-      return `${possessive(side!)} ${label} squares are weak together: ${listed(squares)}`;
+      return `${possessive(side!)} ${label} squares are weak together: ${listed(inView(squares, side!))}`;
     case 'ram':
       return alike.length === 1
         ? `The pawns on ${listed(all)} stand head to head`
-        : `Pawns stand head to head: ${listed(alike.map((ram) => ram.squares.join(' against ')))}`;
+        : `Pawns stand head to head: ${listed(alike.map((ram) => pair(ram, mover).join(' against ')))}`;
     case 'castling-lost':
       return `${whose} can castle no longer`;
     default:
@@ -59,6 +62,10 @@ export function endedText(alike: readonly [Feature, ...Feature[]]): string {
   }
 }
 
+function pair({ squares }: Feature, mover: Side): readonly SquareName[] {
+  return mover === 'white' ? squares : squares.toReversed();
+}
+
 function are(list: readonly unknown[]): string {
   return list.length === 1 ? 'is' : 'are';
 }
@@ -67,7 +74,7 @@ function outposts(squares: readonly SquareName[]): string {
   return squares.length === 1 ? 'an outpost' : 'outposts';
 }
 
-function thePawns(side: string, squares: readonly SquareName[]): string {
+function thePawns(side: Side, squares: readonly SquareName[]): string {
   return `the ${side} ${squares.length === 1 ? 'pawn' : 'pawns'} on ${listed(squares)}`;
 }
 

@@ -2,14 +2,14 @@
  * Lasting features of a position: what a move can change for good. All hang on pawns, on bishops that are there or gone,
  * and on castling rights; so only pawn moves, captures and moves that cost these rights make or end one.
  */
-import { BISHOP, colourOf, fileName, PAWN, type Position, squareName } from '../board';
+import { BISHOP, colourOf, fileName, PAWN, type Position, squareName, squareNamed, viewOrder } from '../board';
 import type { ReadingValues } from '../explain';
 import { nameStructure } from '../structures';
 import { opponent, type Side, SIDES, type Square, type SquareName } from '../types';
 import type { Lineage } from './lineage';
 
-/** Kinds of lasting features. */
-export const FEATURE_KINDS = [
+/** Kinds of lasting features, in the order in which they are told. */
+const FEATURE_KINDS = [
   'structure',
   'weak-square',
   'outpost',
@@ -58,7 +58,7 @@ class Collected extends Map<string, Feature> {
   }
 }
 
-/** All features of a position, by their keys, in the order of FEATURE_KINDS or nearly so. */
+/** All features of a position, by their keys. */
 export function featuresOf(values: ReadingValues, lineage: Lineage): Features {
   const found = new Collected();
   addStructure(found, values.position);
@@ -129,6 +129,19 @@ function addCastling(found: Collected, position: Position, { couldCastle, hasCas
     const queen = side === 'white' ? 13 : 5;
     found.add('castling-lost', side, '', { isShown: position.board.includes(queen) });
   }
+}
+
+/**
+ * The order of telling, for `sort`: by kind, the mover's before the other's, then as the side sees its squares; so that
+ * turning colours and board changes no word but the sides.
+ */
+export function inTellingOrder(mover: Side): (a: Feature, b: Feature) => number {
+  const rank = ({ kind, side, squares, label }: Feature): number => {
+    const places = squares.map((square) => viewOrder(squareNamed(square)!, side ?? mover));
+    const place = places.length > 0 ? Math.min(...places) : label.charCodeAt(0) || 0;
+    return (FEATURE_KINDS.indexOf(kind) * 2 + (side === opponent(mover) ? 1 : 0)) * 256 + place;
+  };
+  return (a, b) => rank(a) - rank(b);
 }
 
 /** Whether the side still has a right to castle. */

@@ -2,7 +2,6 @@ export * from './pgn';
 export * from './pgn-stream';
 export * from './replay';
 export * from './compact';
-export { FEATURE_KINDS, type Feature, type FeatureKind } from './features';
 export * from './commitments';
 export * from './journeys';
 export * from './read-game';

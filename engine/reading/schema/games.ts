@@ -9,10 +9,11 @@ const bySide = z.object({ white: count, black: count });
 
 const compactSideSchema = z.object({
   weakSquares: count.describe('Weak squares of the side itself.'),
-  outposts: count,
+  outposts: count.describe('Outposts of the side: no enemy pawn can come, a pawn guards them now or in one move.'),
   files: count.describe('Files it controls.'),
-  safeMoves: count,
+  safeMoves: count.describe('Safe moves of all its men.'),
   flights: count.describe('Flight squares of its king.'),
+  shelter: count.describe('Own pawns before its king: on its file and the files beside, one a file at most.'),
   kingAttackers: count.describe('Enemy men that attack the zone of its king.'),
   material: count.describe('Worth of its men in pawns, the king left out.'),
 });
@@ -21,8 +22,11 @@ export const timelinePlySchema = z
   .object({
     ply,
     move: move.nullable().describe('The move that led here; null at the beginning.'),
-    fen: z.string(),
-    structure: z.object({ id: z.string(), name: z.string(), side: sideSchema }).nullable(),
+    fen: z.string().describe('The position, six fields.'),
+    structure: z
+      .object({ id: z.string(), name: z.string(), side: sideSchema })
+      .nullable()
+      .describe('The named pawn structure; its side leads, or is to move where the structure is alike for both.'),
     command: z
       .object({ centre: bySide, queenside: bySide, kingside: bySide, whiteCamp: bySide, blackCamp: bySide })
       .describe('Squares commanded: c3 to f6; files a to c; files f to h; ranks 1 to 3; ranks 6 to 8.'),
@@ -38,7 +42,7 @@ export const journeySchema = z
     start: squareSchema,
     stays: z.array(z.object({ square: squareSchema, from: ply, plies: count })).describe('Where it stood, how long.'),
     takenAt: count.nullable().describe('The half-move that took it; null: it is there at the end.'),
-    promoted: z.object({ kind: kindSchema, at: count }).nullable(),
+    promoted: z.object({ kind: kindSchema, at: count }).nullable().describe('What it became, and at which half-move.'),
   })
   .meta({ id: 'Journey', description: 'One man’s way through the game.' });
 
@@ -79,8 +83,10 @@ export const commitmentSchema = z
     act: z
       .enum(['pawn-move', 'capture', 'promotion', 'king-move', 'rook-move'])
       .describe('A king’s or rook’s move is one where it gives up castling.'),
-    changes: z.array(z.object({ ...featureFields, made: z.boolean().describe('Made by the move; else ended.') })),
-    text: z.string(),
+    changes: z
+      .array(z.object({ ...featureFields, made: z.boolean().describe('Made by the move; else ended.') }))
+      .describe('One a feature; it still stands two half-moves later, or the game is over.'),
+    text: z.string().describe('The move and its changes in sentences, those of one kind together.'),
   })
   .meta({ id: 'Commitment', description: 'A move that cannot be taken back, and what it changed for good.' });
 
@@ -91,13 +97,13 @@ export const originSchema = z
 export const gameReadingSchema = z
   .object({
     game: z.int().min(1).describe('Its number in the text.'),
-    tags: z.record(z.string(), z.string()),
+    tags: z.record(z.string(), z.string()).describe('Its PGN tags by name.'),
     result: z.enum(['1-0', '0-1', '1/2-1/2', '*']),
-    plies: count,
-    timeline: z.array(timelinePlySchema),
-    journeys: z.array(journeySchema),
-    commitments: z.array(commitmentSchema),
-    origins: z.array(originSchema),
+    plies: count.describe('Half-moves of the main line.'),
+    timeline: z.array(timelinePlySchema).describe('One a position, the start first.'),
+    journeys: z.array(journeySchema).describe('One a man, in square order of where they began.'),
+    commitments: z.array(commitmentSchema).describe('In the order of the game.'),
+    origins: z.array(originSchema).describe('One a lasting feature of the last position.'),
   })
   .meta({ id: 'GameReading', description: 'A game: timeline, journeys, commitments, origins.' });
 
@@ -105,9 +111,9 @@ export const gameFaultSchema = z
   .object({
     game: z.int().min(1).describe('Its number in the text.'),
     line: z.int().min(0).describe('Line of the text, from 1.'),
-    move: z.string().nullable(),
-    code: z.string(),
-    message: z.string(),
+    move: z.string().nullable().describe('The move at fault with its number; null where no move is.'),
+    code: z.string().describe('Stable within v1, as "illegal-move".'),
+    message: z.string().describe('A sentence.'),
   })
   .meta({ id: 'GameFault', description: 'Why a game was not kept, and where.' });
 

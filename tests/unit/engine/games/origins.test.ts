@@ -198,3 +198,41 @@ function lasting({ weakSquares, pawns, files, outposts, colourComplexes }: Readi
     complexes: colourComplexes.map(({ side, colour, squares }) => [side, colour, squares]),
   };
 }
+
+/** A text or FEN board with colours and board turned. */
+function turned(text: string): string {
+  const swap: Record<string, string> = {
+    White: 'Black',
+    Black: 'White',
+    white: 'black',
+    black: 'white',
+    light: 'dark',
+    dark: 'light',
+  };
+  return text
+    .replace(/White|Black|white|black|light|dark/g, (side) => swap[side]!)
+    .replace(/\b([a-h])([1-8])\b/g, (_, file: string, rank: string) => `${file}${9 - Number(rank)}`);
+}
+
+it('the same games with colours and board turned are told in the same words, sides swapped', () => {
+  let told = 0;
+  for (const pgn of realGames(6)) {
+    const [written] = [...pgnGames(pgn)];
+    const moves = written!.moves.map((move) => ({
+      ...move,
+      text: move.text.replace(/[1-8]/g, (rank) => String(9 - Number(rank))),
+    }));
+    const [ours, theirs] = [
+      replayGame(written!),
+      replayGame({ ...written!, moves, tags: { FEN: 'rnbqkbnr/pppppppp/8/8/8/8/PPPPPPPP/RNBQKBNR b KQkq - 0 1' } }),
+    ].map((replayed) => {
+      if (!replayed.ok) throw new Error(replayed.fault.message);
+      return readGame(replayed.value);
+    });
+    const words = ({ text }: { text: string }): string => text.replace(/^\d+\.+ \S+ /, '');
+    expect(theirs!.commitments.map(words)).toEqual(ours!.commitments.map((each) => turned(words(each))));
+    expect(theirs!.origins.map(words)).toEqual(ours!.origins.map((each) => turned(words(each))));
+    told += ours!.commitments.length;
+  }
+  expect(told).toBeGreaterThan(60);
+});
