@@ -22,9 +22,8 @@ export {
   readPosition,
   readValues,
   type Reading,
-  type ReadingBytes,
   type Statement,
-  writeFen,
 } from './reading';
 export { checkRoute, routes } from './routes';
 export { encodeCheck, encodeRoutes } from './reading/encode-routes';
+export { type ReadingBytes, writeFen } from './reading/write-fen';

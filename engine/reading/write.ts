@@ -5,7 +5,7 @@
  */
 import { type Fault, formatFen } from '../board';
 import { explain, type Explanation, type ReadingValues } from '../explain';
-import { fragment, newPage, type Page, put, putList, putSides, putTexts, torn } from './page';
+import { fragment, newPage, type Page, put, putList, putSides, putText, putTexts, torn } from './page';
 import type { Reading } from './schema';
 
 import { ENGINE_VERSION } from './version';
@@ -35,6 +35,9 @@ const PARTS: { readonly [Part in ReadingPart]: (page: Page, values: ReadingValue
 
 const NAMES = Object.keys(PARTS) as ReadingPart[];
 const BEFORE = NAMES.map((name) => fragment(`,"${name}":`));
+const ENGINE_AND_FEN = fragment(`{"engine":${JSON.stringify(ENGINE_VERSION)},"fen":`);
+const MODE = fragment(',"mode":');
+const NO_WARNINGS = fragment(',"warnings":[],"sideToMove":');
 const END = fragment('}');
 
 /** One page serves all readings: each is torn off before the next begins. */
@@ -49,10 +52,13 @@ export function writeReading(
   const { position } = values;
   let made: Explanation | undefined;
   const said = () => (made ??= explain(values));
-  const { mode, sideToMove } = position;
-  const first = JSON.stringify({ engine: ENGINE_VERSION, fen: formatFen(position), mode, warnings, sideToMove });
   page.length = 0;
-  put(page, fragment(first.slice(0, -1)));
+  put(page, ENGINE_AND_FEN);
+  putText(page, formatFen(position));
+  put(page, MODE);
+  putText(page, position.mode);
+  put(page, warnings.length === 0 ? NO_WARNINGS : fragment(`,"warnings":${JSON.stringify(warnings)},"sideToMove":`));
+  putText(page, position.sideToMove);
   for (let index = 0; index < NAMES.length; index++) {
     const name = NAMES[index]!;
     if (!include.includes(name)) continue;
