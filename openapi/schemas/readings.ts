@@ -11,7 +11,6 @@ export const readingPartsSchema = readingSchema
   .meta({ id: 'ReadingParts', description: 'A reading with the parts that were asked for.' });
 
 export const readingAnswerSchema = z.union([readingSchema, readingPartsSchema]);
-export type ReadingAnswer = z.infer<typeof readingAnswerSchema>;
 
 export const readingRequestSchema = z
   .strictObject({ fen: fenSchema, mode: modeSchema.default('strict'), include: includeSchema.optional() })
