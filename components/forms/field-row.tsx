@@ -8,7 +8,8 @@ interface Props {
   readonly id: string;
 }
 
-const BOX = 'w-full border border-hair bg-raise px-3 py-2 text-[16px] aria-[invalid=true]:border-pick';
+const BOX =
+  'w-full min-h-11 rounded-sm border border-b-2 border-hair border-b-ink bg-raise px-3 py-2 text-[16px] aria-[invalid=true]:border-b-pick';
 
 /** A field with what was typed, or else its value. */
 export function FieldRow({ field, typed, fault, id }: Props) {
@@ -37,7 +38,9 @@ export function FieldRow({ field, typed, fault, id }: Props) {
           ))}
         </fieldset>
       ) : (
-        <label htmlFor={id}>{label}</label>
+        <label htmlFor={id} className="text-[13px] leading-5 font-medium">
+          {label}
+        </label>
       )}
       {type === 'area' && <textarea {...common} rows={4} maxLength={maxLength} defaultValue={shown} />}
       {type === 'choice' && (

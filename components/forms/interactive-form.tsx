@@ -20,7 +20,7 @@ export function InteractiveForm({ action, fields, verb, grave = false, plain = f
   const [state, send, isSending] = useActionState(action, EMPTY);
   const id = useId();
   return (
-    <form action={send} className={plain ? 'inline' : 'grid max-w-[420px] gap-y-4'}>
+    <form action={send} className={plain ? 'flex flex-wrap items-end gap-x-3 gap-y-2' : 'grid max-w-105 gap-y-4'}>
       {fields.map((field) => (
         <FieldRow
           key={`${field.name} ${state.done ?? ''}`}
@@ -39,10 +39,16 @@ export function InteractiveForm({ action, fields, verb, grave = false, plain = f
       <button
         type="submit"
         disabled={isSending}
-        className={`min-h-11 justify-self-start border px-4 hover:underline disabled:text-soft ${grave ? 'border-pick text-pick' : 'border-ink'}`}
+        className={`min-h-11 cursor-pointer justify-self-start rounded-sm hover:underline disabled:opacity-60 ${styleOf(plain, grave)}`}
       >
         {isSending ? 'One moment …' : verb}
       </button>
     </form>
   );
+}
+
+/** Ink for what a form is for; an outline beside other things; vermilion for what cannot be undone. */
+function styleOf(plain: boolean, grave: boolean): string {
+  if (grave) return 'border border-pick px-4 text-pick';
+  return plain ? 'border border-hair px-4' : 'bg-ink px-5 font-bold text-paper';
 }

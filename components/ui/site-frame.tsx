@@ -5,8 +5,14 @@ import { SiteHeader } from './site-header';
 
 const MAIN_ID = 'main';
 
+interface Props {
+  readonly children: ReactNode;
+  /** Whether the header leads to the desk, or else to signing in. */
+  readonly isSignedIn?: boolean;
+}
+
 /** A page between header and footer. The page brings its own measure (`page-measure`) and one h1. */
-export function SiteFrame({ children }: { readonly children: ReactNode }) {
+export function SiteFrame({ children, isSignedIn = false }: Props) {
   return (
     <>
       <a
@@ -15,7 +21,7 @@ export function SiteFrame({ children }: { readonly children: ReactNode }) {
       >
         Skip to the page
       </a>
-      <SiteHeader />
+      <SiteHeader isSignedIn={isSignedIn} />
       <main id={MAIN_ID} tabIndex={-1} className="grow outline-none">
         {children}
       </main>

@@ -16,7 +16,7 @@ import { endSignIn } from '@/lib/services/sign-ins/end-sign-in';
 import { ownPath } from '@/lib/site-address';
 import { acting, answered, dropSession, field, keepSession, parsed } from './call';
 import { idField, nameField } from './fields';
-import type { FormState } from './form-state';
+import type { FormState } from '@/openapi/schemas/form-state';
 
 const HOME = '/studies';
 

@@ -14,7 +14,7 @@ import { type Context, contextOf } from '@/lib/context';
 import { AppError } from '@/lib/errors';
 import { log } from '@/lib/log';
 import { isSecureSite } from '@/lib/site-address';
-import type { FormState } from './form-state';
+import type { FormState } from '@/openapi/schemas/form-state';
 
 const YEAR_SECONDS = 31_536_000;
 
