@@ -16,7 +16,8 @@ export async function sessionOf(
   db: Db,
   { userId, signInId, tokenVersion, workspaceId }: Claimed,
 ): Promise<{ readonly name: string | null; readonly workspaceId: string; readonly role: Role } | undefined> {
-  const chosen = workspaceId === undefined ? sql`false` : sql`${memberships.workspaceId}::text = ${workspaceId}`;
+  // Compared as text: what a cookie says need not be an id.
+  const chosen = sql`${memberships.workspaceId}::text = ${workspaceId ?? ''}`;
   const [row] = await db
     .select({ name: users.name, workspaceId: memberships.workspaceId, role: memberships.role })
     .from(signIns)

@@ -17,13 +17,13 @@ export async function endSignInsOf(
   return ended.length;
 }
 
-/** Notes that a session was used, if the last note is older than a moment: not every request need write. */
+/** Notes that a session was used, if the last note is older than so long: not every request need write. */
 export async function noteSeen(
   db: Db,
-  { id, at, unlessSince }: { readonly id: string; readonly at: Date; readonly unlessSince: Date },
+  { id, at, everyMs }: { readonly id: string; readonly at: Date; readonly everyMs: number },
 ): Promise<void> {
   await db
     .update(signIns)
     .set({ seenAt: at })
-    .where(and(eq(signIns.id, id), lt(signIns.seenAt, unlessSince)));
+    .where(and(eq(signIns.id, id), lt(signIns.seenAt, new Date(at.getTime() - everyMs))));
 }

@@ -1,6 +1,7 @@
 /** The person behind a session's cookie, held against the database at every request: a session that was ended is ended. */
 import { decode, encode } from 'next-auth/jwt';
 import { sessionOf } from '@/db/queries/sessions';
+import { noteSeen } from '@/db/queries/sign-ins';
 import { type Actor, VISITOR } from '@/lib/actor';
 import { openDb } from '@/lib/database';
 import { sessionSecret } from './secret';
@@ -13,6 +14,9 @@ export const WORKSPACE_COOKIE = 'waypost.workspace';
 
 /** How long a session lasts, in seconds. */
 export const SESSION_SECONDS = 30 * 86_400;
+
+/** How exactly the list of sessions knows when each was last used. */
+const SEEN_MS = 5 * 60_000;
 
 /** What a session's cookie holds, sealed. */
 export interface SessionClaims {
@@ -46,6 +50,7 @@ export async function sessionActor(headers: Headers): Promise<Actor> {
   const claims = sealed === undefined ? undefined : await openSession(sealed);
   if (!claims) return VISITOR;
   const found = await sessionOf(openDb(), { ...claims, workspaceId: cookies.get(WORKSPACE_COOKIE) });
+  if (found) await noteSeen(openDb(), { id: claims.signInId, at: new Date(), everyMs: SEEN_MS });
   return found ? { kind: 'person', userId: claims.userId, signInId: claims.signInId, ...found } : VISITOR;
 }
 
