@@ -6,7 +6,7 @@ import { type PawnMap, pawnReach } from '../pawns';
 import type { Reach } from '../reach';
 import type { OutpostValue, SquareTable } from '../squares';
 import { type BySide, bySide, type Kind, type Side, type Square } from '../types';
-import { type Duty, dutiesOf, isOverloaded } from './duties';
+import { allDuties, type Duty, isOverloaded } from './duties';
 import {
   addSquare,
   countAhead,
@@ -80,11 +80,12 @@ export function manValues(context: MenContext, bishops: ReadonlyMap<Square, Note
   const posts = newWords();
   for (const { rank, occupant } of outposts) if (rank === 'outpost' && occupant !== null) addSquare(posts, occupant);
   const own = bySide((side) => wordsOfMen(map, side));
+  const duties = allDuties(map, context.table);
   const values: ManValue[] = [];
   for (let square = 0; square < 64; square++) {
     if (map.board[square] === 0) continue;
     const at = square as Square;
-    values.push(manValue(context, at, bishops.get(at), hasSquare(posts, at), own));
+    values.push(manValue(context, at, bishops.get(at), hasSquare(posts, at), own, duties));
   }
   return values;
 }
@@ -97,6 +98,7 @@ function manValue(
   bishop: Note | undefined,
   onOutpost: boolean,
   own: BySide<Words>,
+  dutiesByMan: readonly (readonly Duty[])[],
 ): ManValue {
   const { map, position, safety, table } = context;
   const code = map.board[square]!;
@@ -115,7 +117,7 @@ function manValue(
   const enPrise = Math.max(0, table.exchanges[((index ^ 1) << 6) | square]!);
   const attackers = map.attackers[((index ^ 1) << 6) | square]!;
   const defenders = map.attackers[(index << 6) | square]!;
-  const duties = dutiesOf(map, table, square);
+  const duties = dutiesByMan[square]!;
   const movesToCentre = kind === 'king' || kind === 'pawn' ? null : centreDistance(context.reach, index, square);
   const trapped = isTrapped(context, square, moves, safeMoves, attackers !== 0, pinned);
   const isPiece = kind !== 'king' && kind !== 'pawn';
