@@ -19,7 +19,7 @@ export default async function DeskLayout({ children }: { readonly children: Reac
     <SiteFrame isSignedIn>
       <div className="border-b border-rule print:hidden">
         <div className="page-measure flex flex-wrap items-center gap-x-6">
-          <p className="min-w-0 grow py-2">
+          <p className="min-w-0 flex-1 py-2">
             <Link href="/workspaces" className="font-bold hover:underline">
               {name}
             </Link>{' '}

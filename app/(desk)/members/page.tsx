@@ -72,7 +72,9 @@ export default async function MembersPage({ searchParams }: Props) {
             fields={[{ name: 'name', label: 'Name', value: name, maxLength: 80 }]}
           />
           <details>
-            <summary className="flex min-h-11 cursor-pointer items-center">Delete it, with all that is in it</summary>
+            <summary className="flex min-h-11 cursor-pointer items-center underlined">
+              Delete it, with all that is in it
+            </summary>
             <InteractiveForm
               action={deleteWorkspaceAction}
               verb="Delete it for good"

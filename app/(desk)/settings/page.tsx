@@ -84,7 +84,7 @@ export default async function SettingsPage({ searchParams }: Props) {
           : account, workspaces, sessions, what you made and when.
         </p>
         <details className="mt-4">
-          <summary className="flex min-h-11 cursor-pointer items-center">Delete the account</summary>
+          <summary className="flex min-h-11 cursor-pointer items-center underlined">Delete the account</summary>
           <p className="mb-4 max-w-130">
             Name, address and password are erased, and every session ends. Workspaces with nobody else in them go with
             the account. What you wrote in the workspaces of others stays there, without your name.

@@ -44,7 +44,7 @@ export function MemberList({ members, invitations, roles, changeRole, remove, re
             since <MomentText at={since} />
           </span>
           <details className="md:col-span-4">
-            <summary className="flex min-h-11 cursor-pointer items-center text-[13px] text-soft">
+            <summary className="flex min-h-11 cursor-pointer items-center text-[13px] text-soft underlined">
               {isSelf ? 'Change your role, or leave' : `Change ${name}’s role, or take them out`}
             </summary>
             <div className="flex flex-wrap items-end gap-x-6 gap-y-3 pb-3">
