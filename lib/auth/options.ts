@@ -11,7 +11,7 @@ import { contextOf } from '@/lib/context';
 import { AppError } from '@/lib/errors';
 import { log } from '@/lib/log';
 import { signIn } from '@/lib/services/accounts/sign-in';
-import { isSecureSite, ownPath } from '@/lib/site-address';
+import { isSecureSite, ownPath, siteHref } from '@/lib/site-address';
 import { sessionSecret } from './secret';
 import { openSession, SESSION_SECONDS, sessionActor } from './session-actor';
 
@@ -53,7 +53,7 @@ export function authOptions(request: Request): NextAuthOptions {
         const actor = await sessionActor(request.headers);
         return { ...session, user: actor.kind === 'person' ? { name: actor.name } : {} };
       },
-      redirect: async ({ url, baseUrl }) => `${baseUrl}${ownPath(url.replace(baseUrl, ''), '/')}`,
+      redirect: async ({ url, baseUrl }) => siteHref(ownPath(url.replace(baseUrl, ''), '/')),
     },
   };
 }
