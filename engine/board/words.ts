@@ -2,7 +2,7 @@
  * Sets of squares as two 32-bit words: the first holds a1 to h4, the second a5 to h8, one bit a square
  * (`1 << (square & 31)` in word `square >> 5`). For hot code; tables have the two words of an entry side by side.
  */
-import { KING_STEPS, KNIGHT_LEAPS, LEAP_ROW, PAWN_STRIKES, RAY_ROW, RAYS, STRIKE_ROW } from './geometry';
+import { RAY_ROW, RAYS } from './geometry';
 
 /** The words of rows of squares, each row ended by -1. */
 function wordsOfRows(rows: Readonly<Int8Array>, width: number): Readonly<Int32Array> {
@@ -16,12 +16,6 @@ function wordsOfRows(rows: Readonly<Int8Array>, width: number): Readonly<Int32Ar
   return words;
 }
 
-/** Squares that a knight attacks: entry (square << 1 | word). */
-export const KNIGHT_WORDS: Readonly<Int32Array> = wordsOfRows(KNIGHT_LEAPS, LEAP_ROW);
-/** Squares that a king attacks: entry (square << 1 | word). */
-export const KING_WORDS: Readonly<Int32Array> = wordsOfRows(KING_STEPS, LEAP_ROW);
-/** Squares that a pawn attacks: entry ((side << 6 | square) << 1 | word). */
-export const PAWN_WORDS: Readonly<Int32Array> = wordsOfRows(PAWN_STRIKES, STRIKE_ROW);
 /** All squares in a direction: entry ((square << 3 | direction) << 1 | word). */
 export const RAY_WORDS: Readonly<Int32Array> = wordsOfRows(RAYS, RAY_ROW);
 

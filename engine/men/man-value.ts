@@ -1,7 +1,7 @@
 /** One man and what it can do from where it stands. */
 import { type AttackMap, isPinned, kindOn, type SideIndex, sideOn } from '../attacks';
 import { bitCount, fileOf, KING, PAWN, type Position } from '../board';
-import { isSafeMove, lossOn, type Safety, worthOf } from '../exchange';
+import { lossOn, type Safety, safeAmong, worthOf } from '../exchange';
 import { type PawnMap, pawnReach } from '../pawns';
 import type { Reach } from '../reach';
 import type { OutpostValue, SquareTable } from '../squares';
@@ -10,7 +10,6 @@ import { allDuties, type Duty, isOverloaded } from './duties';
 import {
   addSquare,
   countAhead,
-  fillAttacked,
   fillMovesOf,
   hasSquare,
   newWords,
@@ -105,14 +104,16 @@ function manValue(
   const index = (code >> 3) as SideIndex;
   const side = sideOn(map, square) ?? 'white';
   const kind = kindOn(map, square);
-  fillAttacked(map.board, code, square, square, words);
+  const man = (index << 5) | map.numbers[square]!;
+  words[0] = map.sights[man << 1]!;
+  words[1] = map.sights[(man << 1) | 1]!;
   const sees = bitCount(words[0]!) + bitCount(words[1]!);
   const seesAhead = countAhead(words, side, square);
   const seesOnlyOwn = ((words[0]! & ~own[side][0]!) | (words[1]! & ~own[side][1]!)) === 0;
   fillMovesOf(map, position, square, words);
   const moves = squaresOfWords(words);
-  const safeMoves: Square[] = [];
-  for (const to of moves) if (isSafeMove(safety, square, to)) safeMoves.push(to);
+  for (let half = 0; half < 2; half++) words[half] = safeAmong(safety, man, half, words[half]!);
+  const safeMoves = squaresOfWords(words);
   const pinned = isPinned(map, square);
   const enPrise = Math.max(0, table.exchanges[((index ^ 1) << 6) | square]!);
   const attackers = map.attackers[((index ^ 1) << 6) | square]!;
