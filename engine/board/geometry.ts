@@ -17,9 +17,6 @@ export const DIRECTIONS: readonly (readonly [number, number])[] = [
   [-1, 1],
 ];
 
-/** Direction back: north and south, east and west and so on are neighbours in the list. */
-export const OPPOSITE: Readonly<Int8Array> = Int8Array.of(1, 0, 3, 2, 5, 4, 7, 6);
-
 const KNIGHT_STEPS = [
   [1, 2],
   [2, 1],
