@@ -27,3 +27,5 @@ export {
 export { checkRoute, routes } from './routes';
 export { encodeCheck, encodeRoutes } from './reading/encode-routes';
 export { type ReadingBytes, writeFen } from './reading/write-fen';
+export { sheetOf } from './structures';
+export { encodeSheet, encodeSheets } from './reading/encode-sheets';
