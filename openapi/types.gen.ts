@@ -144,6 +144,66 @@ export interface paths {
         readonly patch?: never;
         readonly trace?: never;
     };
+    readonly "/api/v1/structures": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * List the structure sheets
+         * @description Handbook knowledge about every named pawn structure: key squares, usual posts, levers, trades and plans of both sides.
+         */
+        readonly get: operations["listStructures"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/structures/{id}": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Read a structure sheet
+         * @description The sheet of one structure, in the colours as the books draw it.
+         */
+        readonly get: operations["getStructure"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
+    readonly "/api/v1/sheets": {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        /**
+         * Hold a structure sheet against a position
+         * @description Names the position’s structure and says of each key square, post, lever and trade of its sheet whether it is to be had. The sheet is null where the pawns have no name.
+         */
+        readonly get: operations["getSheet"];
+        readonly put?: never;
+        readonly post?: never;
+        readonly delete?: never;
+        readonly options?: never;
+        readonly head?: never;
+        readonly patch?: never;
+        readonly trace?: never;
+    };
     readonly "/api/v1/plates.svg": {
         readonly parameters: {
             readonly query?: never;
@@ -1061,7 +1121,7 @@ export interface components {
             readonly squares: readonly components["schemas"]["SquareDifference"][];
             readonly men: readonly components["schemas"]["ManDifference"][];
             readonly balance: readonly components["schemas"]["BalanceLine"][];
-            /** @description Statements of B that A does not make. */
+            /** @description Statements of B that A does not make word for word. */
             readonly gained: readonly components["schemas"]["Statement"][];
             /** @description Statements of A that B does not make. */
             readonly lost: readonly components["schemas"]["Statement"][];
@@ -1076,14 +1136,16 @@ export interface components {
             readonly id: string;
             /** @enum {string} */
             readonly theme: "structure" | "squares" | "outposts" | "files" | "men" | "king" | "control";
-            /** @description Whose gain or loss it is. */
-            readonly side: components["schemas"]["Side"];
-            /** @description Good for that side. */
+            /** @description Whose gain or loss it is; null: of both. */
+            readonly side: components["schemas"]["Side"] | null;
+            /** @description Good for that side; where it is of both: there is more of it. */
             readonly good: boolean;
             /** @description Only orders. */
             readonly weight: number;
             readonly text: string;
             readonly squares: readonly components["schemas"]["Square"][];
+            /** @description Men of B that it points at. */
+            readonly men: readonly components["schemas"]["Square"][];
             /** @description What the text is made from. */
             readonly facts: {
                 readonly [key: string]: unknown;
@@ -1112,7 +1174,18 @@ export interface components {
                 readonly white: number;
                 readonly black: number;
             };
-            /** @description What is said for and against each side, weighted and added up; only orders. */
+            /** @description What is said for and against each side, counted and weighed. */
+            readonly reasons: readonly {
+                /** @description As in the sentences. */
+                readonly id: string;
+                readonly side: components["schemas"]["Side"];
+                readonly good: boolean;
+                /** @description How many such sentences. */
+                readonly times: number;
+                /** @description What they add up to; below 0 where they speak against the side. */
+                readonly points: number;
+            }[];
+            /** @description The points of the reasons of each side, added up; only orders. */
             readonly points: {
                 readonly white: number;
                 readonly black: number;
@@ -1935,6 +2008,193 @@ export interface components {
             /** @description Ids of the students who may read the study. */
             readonly students: readonly components["schemas"]["Id"][];
         };
+        /** @description What of a structure sheet holds in a position. */
+        readonly SheetAnswer: {
+            /** @description Version of the computations. */
+            readonly engine: string;
+            /** @description The position, six fields, normalised. */
+            readonly fen: string;
+            /** @description The sheet of the named structure; null where the pawns have no name. */
+            readonly sheet: {
+                /** @description Id of the structure. */
+                readonly id: string;
+                /** @description Its name. */
+                readonly name: string;
+                /** @description The side that has the leading part here. */
+                readonly side: components["schemas"]["Side"];
+                /** @description Pawns that differ from the model. */
+                readonly differs: number;
+                /** @description What the structure means, in a clause. */
+                readonly lead: string;
+                /** @description White’s part. */
+                readonly white: components["schemas"]["SheetSideHeld"];
+                /** @description Black’s part. */
+                readonly black: components["schemas"]["SheetSideHeld"];
+                /** @description Books that treat it. */
+                readonly books: readonly components["schemas"]["SheetBook"][];
+            } | null;
+        };
+        /** @description A handbook that treats the structure; author, title and year from memory. */
+        readonly SheetBook: {
+            /** @description Who wrote it. */
+            readonly author: string;
+            /** @description Its title. */
+            readonly title: string;
+            /** @description Year of the first edition, or of the first in English. */
+            readonly year: number;
+        };
+        /** @description A key square, and who holds it. */
+        readonly SheetKeySquareHeld: {
+            /** @description The key square. */
+            readonly square: components["schemas"]["Square"];
+            /** @description Who stands on the square now; null for nobody. */
+            readonly occupant: {
+                /** @description Whose man it is. */
+                readonly side: components["schemas"]["Side"];
+                /** @description What it is. */
+                readonly kind: components["schemas"]["Kind"];
+            } | null;
+            /** @description Men that attack it, cheapest first. */
+            readonly attackers: {
+                readonly white: readonly components["schemas"]["Square"][];
+                readonly black: readonly components["schemas"]["Square"][];
+            };
+            /** @description The one side whose knight would be safe there; null where both sides’ would, or neither’s. */
+            readonly controller: components["schemas"]["Side"] | null;
+        };
+        /** @description A pawn’s attack on an enemy pawn. */
+        readonly SheetLever: {
+            /** @description The square from which the pawn attacks. */
+            readonly on: components["schemas"]["Square"];
+            /** @description The enemy pawn’s square that it attacks from there. */
+            readonly against: components["schemas"]["Square"];
+        };
+        /** @description A lever, and whether it is to be had. */
+        readonly SheetLeverHeld: {
+            /** @description The square from which the pawn attacks. */
+            readonly on: components["schemas"]["Square"];
+            /** @description The enemy pawn’s square that it attacks from there. */
+            readonly against: components["schemas"]["Square"];
+            /**
+             * @description ready: attacks now; needs-moves; blocked: men on the road; impossible: see fault.
+             * @enum {string}
+             */
+            readonly state: "ready" | "needs-moves" | "blocked" | "impossible";
+            /** @description no-pawn: none can come; no-target: nothing to attack; rammed: an enemy pawn on the road. */
+            readonly fault: ("no-pawn" | "no-target" | "rammed") | null;
+            /** @description The pawn that makes it. */
+            readonly from: components["schemas"]["Square"] | null;
+            /** @description Pawn moves to the square, the double step being one. */
+            readonly moves: number | null;
+            /** @description Men on the road, nearest first. */
+            readonly blockers: readonly components["schemas"]["Square"][];
+            /** @description Another own pawn guards the square, as things stand. */
+            readonly supported: boolean;
+        };
+        /** @description A man and its usual square. */
+        readonly SheetPost: {
+            /** @description The kind of man that belongs there. */
+            readonly kind: components["schemas"]["Kind"];
+            /** @description Its usual square. */
+            readonly square: components["schemas"]["Square"];
+        };
+        /** @description A post, who stands there and who can come. */
+        readonly SheetPostHeld: {
+            /** @description The kind of man that belongs there. */
+            readonly kind: components["schemas"]["Kind"];
+            /** @description Its usual square. */
+            readonly square: components["schemas"]["Square"];
+            /**
+             * @description held: a man of that kind stands there; own-man or enemy-man: another; free.
+             * @enum {string}
+             */
+            readonly state: "held" | "own-man" | "enemy-man" | "free";
+            /** @description Who stands on the square now; null for nobody. */
+            readonly occupant: {
+                /** @description Whose man it is. */
+                readonly side: components["schemas"]["Side"];
+                /** @description What it is. */
+                readonly kind: components["schemas"]["Kind"];
+            } | null;
+            /** @description A man of that kind would not be lost there by exchange. */
+            readonly safe: boolean;
+            /** @description Men of that kind that can come safely within three moves, soonest first. */
+            readonly users: readonly {
+                /** @description Where the man stands. */
+                readonly from: components["schemas"]["Square"];
+                /** @description Its own moves to the post. */
+                readonly moves: number;
+            }[];
+        };
+        /** @description What the handbooks teach for one side. */
+        readonly SheetSide: {
+            /** @description Squares that the side wants in hand. */
+            readonly keySquares: readonly components["schemas"]["Square"][];
+            /** @description Usual posts by kind of man. */
+            readonly posts: readonly components["schemas"]["SheetPost"][];
+            /** @description The pawn levers of the side. */
+            readonly levers: readonly components["schemas"]["SheetLever"][];
+            /** @description Trades that the side looks for. */
+            readonly wanted: readonly components["schemas"]["SheetTrade"][];
+            /** @description Trades that the side keeps out of. */
+            readonly unwanted: readonly components["schemas"]["SheetTrade"][];
+            /** @description The typical plan of this side, in one sentence. */
+            readonly plan: string;
+        };
+        /** @description What of the sheet holds for one side. */
+        readonly SheetSideHeld: {
+            /** @description Squares that the side wants in hand, and who holds them. */
+            readonly keySquares: readonly components["schemas"]["SheetKeySquareHeld"][];
+            /** @description Usual posts, and who can come. */
+            readonly posts: readonly components["schemas"]["SheetPostHeld"][];
+            /** @description Levers, and the pawn moves they need. */
+            readonly levers: readonly components["schemas"]["SheetLeverHeld"][];
+            /** @description Trades that the side looks for. */
+            readonly wanted: readonly components["schemas"]["SheetTradeHeld"][];
+            /** @description Trades that the side keeps out of. */
+            readonly unwanted: readonly components["schemas"]["SheetTradeHeld"][];
+            /** @description The typical plan of this side, in one sentence. */
+            readonly plan: string;
+        };
+        /** @description The pawns of one side of a structure, as text. */
+        readonly SheetSkeleton: {
+            /** @description Pawns that must stand: "d4", "c2|c3" on either, "f" anywhere on the file. */
+            readonly core: string;
+            /** @description Files and squares without a pawn of this side. */
+            readonly bare: string;
+            /** @description Pawns that may be missing; each that is counts as a difference. */
+            readonly usual: string;
+        };
+        /** @description A trade, own man for enemy man. */
+        readonly SheetTrade: {
+            /** @description The man of this side. */
+            readonly own: components["schemas"]["SheetTradeMan"];
+            /** @description The man of the other side. */
+            readonly enemy: components["schemas"]["SheetTradeMan"];
+        };
+        /** @description A trade, and whether it can still come. */
+        readonly SheetTradeHeld: {
+            /** @description The man of this side. */
+            readonly own: components["schemas"]["SheetTradeMan"];
+            /** @description The man of the other side. */
+            readonly enemy: components["schemas"]["SheetTradeMan"];
+            /**
+             * @description available: both such men are there; one-left; done: neither is.
+             * @enum {string}
+             */
+            readonly state: "available" | "one-left" | "done";
+            /** @description Such men of this side. */
+            readonly ownMen: readonly components["schemas"]["Square"][];
+            /** @description Such men of the other side. */
+            readonly enemyMen: readonly components["schemas"]["Square"][];
+        };
+        /** @description A man that may be traded. */
+        readonly SheetTradeMan: {
+            /** @description The kind of man. */
+            readonly kind: components["schemas"]["Kind"];
+            /** @description Of which squares the bishop is, where that matters; else null. */
+            readonly colour: components["schemas"]["Colour"] | null;
+        };
         /**
          * @description A side.
          * @enum {string}
@@ -2075,6 +2335,35 @@ export interface components {
             readonly facts: {
                 readonly [key: string]: unknown;
             };
+        };
+        /** @description Handbook knowledge about one named pawn structure. */
+        readonly StructureSheet: {
+            /** @description Stable id of the structure. */
+            readonly id: string;
+            /** @description Its name in the books. */
+            readonly name: string;
+            /** @description The side with the leading part, in the colours as written here. */
+            readonly leader: components["schemas"]["Side"];
+            /** @description What the structure means, in a clause. */
+            readonly lead: string;
+            /** @description The pawns by which the structure is known. */
+            readonly pawns: {
+                readonly white: components["schemas"]["SheetSkeleton"];
+                readonly black: components["schemas"]["SheetSkeleton"];
+            };
+            /** @description What White looks for. */
+            readonly white: components["schemas"]["SheetSide"];
+            /** @description What Black looks for. */
+            readonly black: components["schemas"]["SheetSide"];
+            /** @description Books that treat it. */
+            readonly books: readonly components["schemas"]["SheetBook"][];
+        };
+        /** @description Every structure sheet. */
+        readonly StructuresAnswer: {
+            /** @description Version of the computations. */
+            readonly engine: string;
+            /** @description All sheets, by family of openings. */
+            readonly structures: readonly components["schemas"]["StructureSheet"][];
         };
         /** @description A folder of positions, games and results on one subject. */
         readonly Study: {
@@ -3291,6 +3580,310 @@ export interface operations {
                 };
             };
             /** @description invalid-request: The request does not have the promised shape. pgn-refused: The text holds no game that can be read. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly listStructures: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description List the structure sheets */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StructuresAnswer"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getStructure: {
+        readonly parameters: {
+            readonly query?: never;
+            readonly header?: never;
+            readonly path: {
+                /** @example carlsbad */
+                readonly id: string;
+            };
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Read a structure sheet */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["StructureSheet"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-found: There is nothing at this address. */
+            readonly 404: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. */
+            readonly 422: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description too-many-requests: The allowance is used up for now. */
+            readonly 429: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description internal: Something went wrong on our side. */
+            readonly 500: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    readonly getSheet: {
+        readonly parameters: {
+            readonly query: {
+                /**
+                 * @description A position in Forsyth-Edwards notation, with six fields or, as in EPD, four.
+                 * @example r1bqr1k1/pp1nbppp/2p2n2/3p2B1/3P4/2NBPN2/PPQ2PPP/R4RK1 w - - 0 11
+                 */
+                readonly fen: components["schemas"]["Fen"];
+                readonly mode?: components["schemas"]["Mode"];
+            };
+            readonly header?: never;
+            readonly path?: never;
+            readonly cookie?: never;
+        };
+        readonly requestBody?: never;
+        readonly responses: {
+            /** @description Hold a structure sheet against a position */
+            readonly 200: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/json": components["schemas"]["SheetAnswer"];
+                };
+            };
+            /** @description The copy named by If-None-Match is still good. */
+            readonly 304: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    /** @description Changes only when the answer does. */
+                    readonly ETag?: string;
+                    /** @description What is left of the allowance, and for how many seconds. */
+                    readonly RateLimit?: string;
+                    /** @description The allowance: so many requests in so many seconds. */
+                    readonly "RateLimit-Policy"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description not-signed-in: This call needs a key that is good, or a person who is signed in. */
+            readonly 401: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description not-allowed: The key’s scopes, or the person’s role, do not allow this call. */
+            readonly 403: {
+                headers: {
+                    /** @description The id of this request. */
+                    readonly "X-Request-Id"?: string;
+                    readonly [name: string]: unknown;
+                };
+                content: {
+                    readonly "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description invalid-request: The request does not have the promised shape. fen-refused: The FEN is not a position that can be read. */
             readonly 422: {
                 headers: {
                     /** @description The id of this request. */

@@ -20,6 +20,7 @@ import {
 import { createReading, getReading } from './readings';
 import { studyComparisons, studyExchanges, studyRoutes } from './results';
 import { createRouteCheck, createRoutes } from './routes';
+import { getSheet, getStructure, listStructures } from './structures';
 import {
   changeStudy,
   createStudy,
@@ -41,6 +42,9 @@ export const contracts = {
   createComparison,
   createExchanges,
   createGames,
+  listStructures,
+  getStructure,
+  getSheet,
   getPlateSvg,
   getPlatePng,
   listStudies,
