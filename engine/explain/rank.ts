@@ -44,6 +44,7 @@ const BASE: Readonly<Record<FactId, number>> = {
   'centre-command': 50,
   'open-line-beside-king': 48,
   'heavy-doubled': 48,
+  'file-man-target': 54,
   'shelter-broken': 46,
   'bad-but-active': 46,
   'best-placed': 46,

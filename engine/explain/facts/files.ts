@@ -60,6 +60,16 @@ export interface DoubledHeavy extends FactBase {
   readonly heavy: readonly ManAt[];
 }
 
+export interface ManOnFile extends FactBase {
+  readonly id: 'file-man-target';
+  /** The side whose heavy men press. */
+  readonly side: Side;
+  readonly file: FileName;
+  /** The enemy knight or bishop that no pawn guards, next on the file after the foremost heavy man. */
+  readonly target: ManAt;
+  readonly heavy: readonly ManAt[];
+}
+
 export interface OnSeventh extends FactBase {
   readonly id: 'on-seventh';
   readonly side: Side;
@@ -101,6 +111,7 @@ export type FilesFact =
   | HalfOpenNothing
   | RookToFile
   | DoubledHeavy
+  | ManOnFile
   | OnSeventh
   | ToSeventh
   | LongDiagonal

@@ -1,6 +1,6 @@
 /** Facts about files, the seventh rank and diagonals that hold in a position. */
 import { attackersOf, kindOn, sideOn } from '../../attacks';
-import { fileName, fileOf, relativeRank, squareName } from '../../board';
+import { ahead, fileName, fileOf, relativeRank, squareName } from '../../board';
 import type { DiagonalValue, FileValue } from '../../files';
 import { bySide, opponent, type Side, SIDES, type Square } from '../../types';
 import type { FilesFact } from '../facts/files';
@@ -120,7 +120,8 @@ function halfOpen(
   });
 }
 
-function doubled(values: ReadingValues, { file, heavy }: FileValue, side: Side, facts: FilesFact[]): void {
+function doubled(values: ReadingValues, value: FileValue, side: Side, facts: FilesFact[]): void {
+  const { file, heavy } = value;
   const squares = heavy[side];
   if (squares.length < 2) return;
   const between = (a: Square, b: Square) => {
@@ -134,6 +135,27 @@ function doubled(values: ReadingValues, { file, heavy }: FileValue, side: Side, 
   const men = squares.map((square) => manAt(values, square));
   const on = men.map(({ square }) => square);
   facts.push({ id: 'heavy-doubled', side, file: fileName(file), heavy: men, squares: on, men: on });
+  const front = squares[squares.length - 1];
+  if (front === undefined || (value.status === 'half-open' && value.halfOpenFor !== side)) return;
+  const square = manAhead(values, front, side);
+  if (square === undefined || !isMinorWithoutPawn(values, opponent(side), square)) return;
+  const target = manAt(values, square);
+  const all = [target.square, ...on];
+  facts.push({ id: 'file-man-target', side, file: fileName(file), target, heavy: men, squares: all, men: all });
+}
+
+/** The next man straight ahead of a square, as the side sees it. */
+function manAhead({ map }: ReadingValues, from: Square, side: Side): Square | undefined {
+  let at = ahead(from, side);
+  while (at !== undefined && map.board[at] === 0) at = ahead(at, side);
+  return at;
+}
+
+/** Whether on the square stands a knight or bishop of the side that no pawn of its side guards. */
+function isMinorWithoutPawn({ map }: ReadingValues, side: Side, square: Square): boolean {
+  const kind = kindOn(map, square);
+  if (sideOn(map, square) !== side || (kind !== 'knight' && kind !== 'bishop')) return false;
+  return attackersOf(map, side, square).every((from) => kindOn(map, from) !== 'pawn');
 }
 
 /** Whether the side's rooks have something to do on the file: a way in, or a pawn to bite on. */

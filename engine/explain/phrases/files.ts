@@ -50,6 +50,10 @@ export const FILES_PHRASES: Phrases<FilesFact> = {
     head: `${name(side)} has ${heavy.length > 2 ? `${inWords(heavy.length)} heavy men` : 'doubled'} on the ${file}-file`,
     body: `${theMen(heavy)} stand behind one another`,
   }),
+  'file-man-target': ({ file, target, heavy }) => ({
+    head: `${capital(theMan(target))} is a target on the ${file}-file`,
+    body: `no pawn guards it, and ${theMen(heavy)} stand against it`,
+  }),
   'on-seventh': ({ side, heavy, pawns }) => {
     const where = `on ${possessive(side)} seventh rank`;
     const prey =

@@ -212,6 +212,24 @@ export const FILES: Checkers<FilesFact> = {
       },
     };
   },
+  'file-man-target': (scene, { side, file, target: { square } }) => {
+    const on = heavyOn(scene, side, numberOf(file));
+    const heavy = on.map((at) => man(scene, at));
+    const at = squareOf(square);
+    const target = man(scene, at);
+    const beyond = along(side, numberOf(file)).filter((each) => rankFor(side, each) > rankFor(side, on.at(-1) ?? 0));
+    return {
+      facts: { file, target, heavy },
+      text: `${start(the(target))} is a target on the ${file}-file: no pawn guards it, and ${theAll(heavy)} stand against it.`,
+      claims: {
+        'two or more': heavy.length > 1,
+        'an enemy minor man': scene.sideOn(at) === other(side) && ['knight', 'bishop'].includes(target.kind),
+        'the next man on the file': beyond.find((each) => scene.letter(each) !== '') === at,
+        'no pawn guards it': pawnAttackers(scene, other(side), at).length === 0,
+        'no own pawn on the file': pawnsOnFile(scene, side, numberOf(file)).length === 0,
+      },
+    };
+  },
   'on-seventh': onSeventh,
   'to-seventh': (scene, { side, man: { square }, to }) => {
     const from = squareOf(square);
