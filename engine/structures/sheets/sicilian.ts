@@ -90,7 +90,7 @@ export const SICILIAN_SHEETS: readonly StructureSheet[] = [
       levers: 'f4xe5 e4xf5 c5xd6',
       wanted: 'Bl-Bl',
       unwanted: 'N-Bd',
-      plan: '{d5} is held by a knight and {f5} watched by the rest, for the pawns cannot dispute them.',
+      plan: '{d5} is held by a knight, for no pawn can drive it off, and the f-pawns are kept from {f5} as long as may be.',
     },
     black: {
       keys: 'd4 f4 d5',
@@ -138,7 +138,7 @@ export const SICILIAN_SHEETS: readonly StructureSheet[] = [
       levers: 'b4xc3 f5xe4 d5xe4 c4xd3',
       wanted: 'Q-Q',
       unwanted: 'Bd-Bd',
-      plan: '{b5}-{b4} loosens {c3} for the bishop on {g7}, and a knight on {d4} is the gain if no pawn comes to {c3}.',
+      plan: '{b5}-{b4} loosens {c3} before the bishop on {g7}, and {d4} is a knight’s square while no pawn comes to {c3}.',
     },
     books: ['flores', 'openings'],
   },
