@@ -9,15 +9,6 @@ export type StudyRow = typeof studies.$inferSelect;
 /** A position of a study as stored. */
 export type PositionRow = typeof positions.$inferSelect;
 
-/** A study of this workspace that is not in the trash. */
-export async function studyById(db: Db, workspaceId: string, id: string): Promise<StudyRow | undefined> {
-  const rows = await db
-    .select()
-    .from(studies)
-    .where(and(eq(studies.id, id), eq(studies.workspaceId, workspaceId), isNull(studies.deletedAt)));
-  return rows[0];
-}
-
 /** A new study. */
 export async function insertStudy(db: Db, study: typeof studies.$inferInsert): Promise<StudyRow> {
   const [row] = await db.insert(studies).values(study).returning();

@@ -1,5 +1,5 @@
 /** Positions of a study one by one, and their places. */
-import { and, asc, desc, eq, gt, isNull, lt, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, gt, isNull, sql } from 'drizzle-orm';
 import type { Db } from '@/db/client';
 import { positions } from '@/db/schema';
 import type { PositionRow } from './studies';
@@ -64,10 +64,4 @@ export async function orderBehind(db: Db, studyId: string, order: string | null)
     })
     .from(sql`(select 1) as one`);
   return row?.between ?? '1';
-}
-
-/** Positions of a study that were put into the trash before a moment, for good. */
-export async function emptyTrash(db: Db, before: Date): Promise<number> {
-  const gone = await db.delete(positions).where(lt(positions.deletedAt, before)).returning({ id: positions.id });
-  return gone.length;
 }

@@ -1,12 +1,22 @@
 /** What is counted of a reading for a comparison. */
-import type { Reading, Statement } from '../reading/schema';
-import { type BySide, bySide, opponent, SIDES, type Side, type SquareName, THEMES, type Theme } from '../types';
+import {
+  type BySide,
+  bySide,
+  type Colour,
+  opponent,
+  SIDES,
+  type Side,
+  type SquareName,
+  THEMES,
+  type Theme,
+} from '../types';
 import type { BalanceLine, Hold, ManCounts } from './difference';
+import type { Board } from './given';
 
-type Man = Reading['men'][number];
+type Man = Board['men'][number];
 
 /** Squares that each man attacks in the other side's half, by the man's square. */
-function enemyHalfOf({ squares }: Reading): ReadonlyMap<SquareName, number> {
+function enemyHalfOf({ squares }: Board): ReadonlyMap<SquareName, number> {
   const counts = new Map<SquareName, number>();
   for (const { square, attackers } of squares) {
     const attackersThere = Number(square.charAt(1)) > 4 ? attackers.white : attackers.black;
@@ -31,40 +41,37 @@ export interface Looked {
   readonly enemyHalf: ReadonlyMap<SquareName, number>;
   readonly holds: BySide<ReadonlyMap<SquareName, Hold>>;
   readonly outposts: BySide<ReadonlySet<SquareName>>;
-  /** Statements by what they say: a count that changed makes another of it. */
-  readonly said: ReadonlySet<string>;
 }
 
-const looked = new WeakMap<Reading, Looked>();
+const looked = new WeakMap<Board, Looked>();
 
 /** What is looked up of a reading; made once for each. */
-export function lookedUp(reading: Reading): Looked {
+export function lookedUp(reading: Board): Looked {
   const known = looked.get(reading);
   if (known) return known;
   const made = {
     enemyHalf: enemyHalfOf(reading),
     holds: holdsOf(reading),
     outposts: outpostsOf(reading),
-    said: new Set(reading.statements.map(saidBy)),
   };
   looked.set(reading, made);
   return made;
 }
 
-/** What a statement says. */
-export function saidBy({ key, text }: Statement): string {
-  return `${key} ${text}`;
+/** The colour of a square: a1 is dark. */
+export function colourOf(square: SquareName): Colour {
+  return (square.charCodeAt(0) + square.charCodeAt(1)) % 2 === 0 ? 'dark' : 'light';
 }
 
 /** Each weak square with its hold, of the side that suffers. */
-function holdsOf({ weakSquares }: Reading): BySide<ReadonlyMap<SquareName, Hold>> {
+function holdsOf({ weakSquares }: Board): BySide<ReadonlyMap<SquareName, Hold>> {
   return bySide(
     (side) => new Map(weakSquares.filter((weak) => weak.side === side).map((weak) => [weak.square, weak.hold])),
   );
 }
 
 /** Outposts of each side, advanced posts left out. */
-function outpostsOf({ outposts }: Reading): BySide<ReadonlySet<SquareName>> {
+function outpostsOf({ outposts }: Board): BySide<ReadonlySet<SquareName>> {
   return bySide(
     (side) =>
       new Set(outposts.filter((post) => post.side === side && post.rank === 'outpost').map((post) => post.square)),
@@ -74,7 +81,7 @@ function outpostsOf({ outposts }: Reading): BySide<ReadonlySet<SquareName>> {
 interface Count {
   /** What is counted, in words. */
   readonly counts: string;
-  readonly of: (reading: Reading, side: Side) => number;
+  readonly of: (reading: Board, side: Side) => number;
 }
 
 /** One count a theme: what a balance line shows. */
@@ -113,7 +120,7 @@ const COUNTS: Readonly<Record<Theme, Count>> = {
 };
 
 /** The balance of each theme, A beside B. */
-export function balanceOf(a: Reading, b: Reading): BalanceLine[] {
+export function balanceOf(a: Board, b: Board): BalanceLine[] {
   return THEMES.map((theme) => {
     const { counts, of } = COUNTS[theme];
     const [white, black] = SIDES.map((side) => ({ a: of(a, side), b: of(b, side) }));

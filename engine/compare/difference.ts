@@ -58,24 +58,31 @@ export interface BalanceLine {
 export interface DifferenceSentence {
   readonly id: DifferenceFact['id'];
   readonly theme: Theme;
-  /** Whose gain or loss it is. */
-  readonly side: Side;
+  /** Whose gain or loss it is; null: of both. */
+  readonly side: Side | null;
+  /** Good for that side; where it is of both: there is more of it. */
   readonly good: boolean;
   readonly weight: number;
   readonly text: string;
   readonly squares: readonly SquareName[];
+  /** Men of B that it points at. */
+  readonly men: readonly SquareName[];
   readonly facts: Readonly<Record<string, unknown>>;
 }
 
-/** All that differs from A to B. */
-export interface Difference {
+/** What differs from A to B on the board, and how it is said. */
+export interface BoardDifference {
   readonly squares: readonly SquareDifference[];
   readonly men: readonly ManDifference[];
   readonly balance: readonly BalanceLine[];
+  readonly sentences: readonly DifferenceSentence[];
+}
+
+/** All that differs from A to B. */
+export interface Difference extends BoardDifference {
   /** Statements of B that A does not make, and the reverse. */
   readonly gained: readonly Statement[];
   readonly lost: readonly Statement[];
   /** How many statements both make. */
   readonly unchanged: number;
-  readonly sentences: readonly DifferenceSentence[];
 }

@@ -5,13 +5,14 @@
  * offered where one of the two attacks the other, now or after safe moves of its own, the enemy standing still.
  */
 import { formatFen, type Position, squareNamed } from '../board';
-import { reachOf, type Reach } from '../reach';
-import { newDesk, type Reading, readPosition, readValues } from '../reading';
+import type { Reach } from '../reach';
+import { newDesk, readBoard, readValues } from '../reading';
 import { bears } from '../routes';
-import type { Kind, Side, Square, SquareName } from '../types';
-import { compare } from './compare';
+import { bySide, type Kind, type Side, type Square, type SquareName } from '../types';
+import { compareBoards } from './compare';
 import { gainOf } from './counts';
 import type { BalanceLine, DifferenceSentence } from './difference';
+import type { Board } from './given';
 import { without } from './placement';
 
 /** A man that can be traded. */
@@ -31,11 +32,22 @@ export interface Exchange {
   readonly balance: readonly BalanceLine[];
   /** Themes whose balance moves towards each side. */
   readonly themes: { readonly white: number; readonly black: number };
-  /** The weights of what is said for and against each side, added up; they only order. */
+  /** What is said for and against each side, counted and weighed. */
+  readonly reasons: readonly Reason[];
+  /** The points of the reasons of each side, added up; they only order. */
   readonly points: { readonly white: number; readonly black: number };
   /** The side that the trade helps; null where the points differ by less than one. */
   readonly helps: Side | null;
   readonly sentences: readonly DifferenceSentence[];
+}
+
+/** So many sentences of one kind for or against a side, and the points that they add up to. */
+export interface Reason {
+  readonly id: DifferenceSentence['id'];
+  readonly side: Side;
+  readonly good: boolean;
+  readonly times: number;
+  readonly points: number;
 }
 
 export interface ExchangeTest {
@@ -45,8 +57,6 @@ export interface ExchangeTest {
   readonly exchanges: readonly Exchange[];
 }
 
-/** How far offers are looked for, in own moves. */
-const OFFER_MOVES = 3;
 /** Sentences of a cell. */
 const SENTENCES_MAX = 5;
 /** Points in which the sides must differ for a trade to help one of them. */
@@ -54,9 +64,9 @@ const HELPS_MIN = 1;
 
 /** All trades of a position, with what each changes. */
 export function exchangeTest(position: Position): ExchangeTest {
+  const before = readBoard(position);
+  const { reach } = readValues(position);
   const desk = newDesk();
-  const before = readPosition(position, [], desk);
-  const reach = reachOf(readValues(position).safety, OFFER_MOVES);
   const traders = (side: Side): Trader[] =>
     before.men
       .filter((man) => man.side === side && classOf(man.kind) > 0)
@@ -78,7 +88,7 @@ function classOf(kind: Kind): number {
 
 function exchange(
   position: Position,
-  before: Reading,
+  before: Board,
   reach: Reach,
   white: Trader,
   black: Trader,
@@ -87,9 +97,9 @@ function exchange(
   const [at, on] = [squareNamed(white.square)!, squareNamed(black.square)!];
   const left = without(position, [at, on]);
   if (!left.ok) return [];
-  const after = readPosition(left.value, [], desk);
-  const { balance, sentences } = compare(before, after);
-  const points = { white: pointsOf(sentences, 'white'), black: pointsOf(sentences, 'black') };
+  const { balance, sentences } = compareBoards(before, readBoard(left.value, desk));
+  const reasons = reasonsOf(sentences);
+  const points = bySide((side) => pointsOf(reasons, side));
   const lead = points.white - points.black;
   return [
     {
@@ -99,6 +109,7 @@ function exchange(
       fen: formatFen(left.value),
       balance,
       themes: { white: themesFor(balance, 'white'), black: themesFor(balance, 'black') },
+      reasons,
       points,
       helps: Math.abs(lead) < HELPS_MIN ? null : lead > 0 ? 'white' : 'black',
       sentences: sentences.slice(0, SENTENCES_MAX),
@@ -114,8 +125,10 @@ function themesFor(balance: readonly BalanceLine[], side: Side): number {
 const POINTS: Readonly<Partial<Record<DifferenceSentence['id'], number>>> = {
   'problem-bishop-gone': 6,
   'problem-bishop-made': 6,
-  'now-en-prise': 5,
-  'en-prise-no-more': 5,
+  'now-en-prise': 2,
+  'en-prise-no-more': 2,
+  'target-made': 2,
+  'target-gone': 2,
   'outpost-made': 2,
   'outpost-gone': 2,
   'weak-square-made': 2,
@@ -129,15 +142,22 @@ const POINTS: Readonly<Partial<Record<DifferenceSentence['id'], number>>> = {
 /** Points of every other sentence. */
 const POINTS_UNSAID = 0.5;
 
-function pointsOf(sentences: readonly DifferenceSentence[], side: Side): number {
-  let sum = 0;
-  for (const { id, side: owner, good } of sentences) {
-    if (owner === side) sum += (good ? 1 : -1) * (POINTS[id] ?? POINTS_UNSAID);
+function reasonsOf(sentences: readonly DifferenceSentence[]): Reason[] {
+  const reasons = new Map<string, Reason>();
+  for (const { id, side, good } of sentences) {
+    if (side === null) continue;
+    const key = `${id} ${side} ${good}`;
+    const times = (reasons.get(key)?.times ?? 0) + 1;
+    reasons.set(key, { id, side, good, times, points: (good ? 1 : -1) * times * (POINTS[id] ?? POINTS_UNSAID) });
   }
-  return sum;
+  return [...reasons.values()];
 }
 
-/** Own safe moves until the man of `from` attacks `target`; null where not within OFFER_MOVES. */
+function pointsOf(reasons: readonly Reason[], side: Side): number {
+  return reasons.reduce((sum, { side: owner, points }) => (owner === side ? sum + points : sum), 0);
+}
+
+/** Own safe moves until the man of `from` attacks `target`; null where not within three moves. */
 function offerMoves({ board }: Position, reach: Reach, from: Square, target: Square): number | null {
   const place = board[from]! & 7;
   const side = board[from]! >> 3;

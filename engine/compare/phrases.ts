@@ -12,11 +12,10 @@ import {
   theMan,
   theMen,
 } from '../explain';
-import { opponent } from '../types';
-import type { DifferenceFact, LastGuard } from './facts';
+import { opponent, type Side } from '../types';
+import type { DifferenceFact, FileStatus, LastGuard } from './facts';
 
 const COMMAND = { white: 'White’s', black: 'Black’s', open: 'open to both', disputed: 'disputed' } as const;
-const STATUS = { open: 'open', 'half-open': 'half-open', closed: 'closed' } as const;
 
 const PHRASES: Phrases<DifferenceFact> = {
   'man-placed': ({ kind, side, at, safeMoves, enemyHalf }) => ({
@@ -46,11 +45,21 @@ const PHRASES: Phrases<DifferenceFact> = {
   'weak-square-mended': ({ side, square }) => ({ head: `${capital(square)} is weak for ${name(side)} no longer` }),
   'outpost-made': ({ side, square }) => ({ head: `${capital(square)} is an outpost of ${possessive(side)} now` }),
   'outpost-gone': ({ side, square }) => ({ head: `${capital(square)} is an outpost of ${possessive(side)} no longer` }),
-  'file-opened': ({ file, status }) => ({
-    head: `The ${file}-file is ${STATUS[status.b]}; it was ${STATUS[status.a]}`,
+  'file-opened': ({ file, status, halfOpenFor }) => ({
+    head: `The ${file}-file is ${opened(status.b, halfOpenFor.b)}`,
+    body: `it was ${opened(status.a, halfOpenFor.a)}`,
   }),
-  'file-taken': ({ file, side, good }) => ({
-    head: good ? `${name(side)} controls the ${file}-file now` : `${name(side)} controls the ${file}-file no longer`,
+  'file-taken': ({ file, side, good, heavy }) => ({
+    head: `${name(side)} controls the ${file}-file ${good ? 'now' : 'no longer'}`,
+    body: good && heavy.length > 0 ? `${theMen(heavy)} ${heavy.length === 1 ? 'stands' : 'stand'} on it` : undefined,
+  }),
+  'target-made': ({ man, side, file, heavy }) => ({
+    head: `${capital(theMan(man))} is a target`,
+    body: `no ${side} pawn guards it, and ${inWords(heavy.length)} heavy men, ${theMen(heavy)}, stand against it on the ${file}-file`,
+  }),
+  'target-gone': ({ man, file, heavy }) => ({
+    head: `${capital(theMan(man))} is a target no longer`,
+    body: `before, no pawn guarded it against ${theMen(heavy)} on the ${file}-file`,
   }),
   'now-en-prise': ({ man, side, loses }) => ({
     head: `${capital(theMan(man))} can be taken now`,
@@ -86,22 +95,26 @@ const PHRASES: Phrases<DifferenceFact> = {
   }),
 };
 
-function lastGuard({ side, square, before, user, gone }: LastGuard): Phrase {
-  const first = gone[0];
-  const twins = gone.length === 2 && first !== undefined && gone.every(({ kind }) => kind === first.kind);
-  const off = twins
-    ? `With the ${first.kind}s gone, `
-    : gone.length > 0 && gone.length <= 2
-      ? `With ${theMen(gone)} gone, `
-      : '';
-  const guards = before === 1 ? `its last ${side} guard` : `its ${inWords(before)} ${side} guards`;
-  const comes = user
-    ? user.moves === 0
-      ? `, and ${theMan({ kind: user.kind, square: user.from })} stands there`
-      : `, and ${theMan({ kind: user.kind, square: user.from })} gets there in ${counted(user.moves, 'move')}`
-    : '';
-  const text = `${off}${square} loses ${guards}${comes}`;
-  return { head: capital(text) };
+function lastGuard({ side, square, before, on, user, gone, pair }: LastGuard): Phrase {
+  const off =
+    gone.length === 0
+      ? ''
+      : pair
+        ? `With the ${pair.colour ? `${pair.colour}-squared ` : ''}${pair.kind}s gone, `
+        : `With ${theMen(gone)} gone, `;
+  const what = on ? `the ${on.side} ${on.kind} on ${square}` : square;
+  // An enemy man is attacked, all else is guarded.
+  const noun = on ? (on.side === side ? 'guard' : 'attacker') : `${side} guard`;
+  const guards = before === 1 ? `its last ${noun}` : `its ${inWords(before)} ${noun}s`;
+  const comes =
+    user === null || user.moves === 0
+      ? ''
+      : `, and ${theMan({ kind: user.kind, square: user.from })} gets there in ${counted(user.moves, 'move')}`;
+  return { head: capital(`${off}${what} loses ${guards}${comes}`) };
+}
+
+function opened(status: FileStatus, side: Side | null): string {
+  return side ? `half-open for ${name(side)}` : status;
 }
 
 /** A count that stands alone. */

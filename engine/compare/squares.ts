@@ -1,11 +1,11 @@
 /** Squares on which two readings differ. */
-import type { Reading } from '../reading/schema';
 import { bySide } from '../types';
 import { lookedUp } from './counts';
 import type { Change, Occupant, SquareDifference } from './difference';
+import type { Board } from './given';
 
 /** The squares that differ, a1 first. */
-export function squaresDifference(a: Reading, b: Reading): SquareDifference[] {
+export function squaresDifference(a: Board, b: Board): SquareDifference[] {
   const { holds: holdsA, outposts: postsA } = lookedUp(a);
   const { holds: holdsB, outposts: postsB } = lookedUp(b);
   return a.squares.flatMap((before, place) => {

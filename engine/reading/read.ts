@@ -19,3 +19,8 @@ export function readPosition(position: Position, warnings: readonly Fault[] = []
   const { statements, lead } = explain(values);
   return encodeReading(values, statements, lead, warnings);
 }
+
+/** A reading without its statements, at a third of the time: enough to compare by the dozen. */
+export function readBoard(position: Position, desk: Desk = newDesk()): Omit<Reading, 'statements' | 'lead'> {
+  return encodeReading(readValues(position, desk), [], [], []);
+}

@@ -53,11 +53,12 @@ export const differenceSentenceSchema = z
   .object({
     id: z.string().describe('Stable id of what is said, e.g. "last-guard-gone".'),
     theme: themeSchema,
-    side: sideSchema.describe('Whose gain or loss it is.'),
-    good: z.boolean().describe('Good for that side.'),
+    side: sideSchema.nullable().describe('Whose gain or loss it is; null: of both.'),
+    good: z.boolean().describe('Good for that side; where it is of both: there is more of it.'),
     weight: z.number().describe('Only orders.'),
     text: z.string(),
     squares: squaresSchema,
+    men: squaresSchema.describe('Men of B that it points at.'),
     facts: z.record(z.string(), z.unknown()).describe('What the text is made from.'),
   })
   .meta({ id: 'DifferenceSentence', description: 'A sentence of the difference.' });
@@ -67,7 +68,7 @@ export const differenceSchema = z
     squares: z.array(squareDifferenceSchema),
     men: z.array(manDifferenceSchema),
     balance: z.array(balanceLineSchema),
-    gained: z.array(statementSchema).describe('Statements of B that A does not make.'),
+    gained: z.array(statementSchema).describe('Statements of B that A does not make word for word.'),
     lost: z.array(statementSchema).describe('Statements of A that B does not make.'),
     unchanged: count.describe('How many statements both make.'),
     sentences: z.array(differenceSentenceSchema).describe('Best said first.'),
@@ -97,7 +98,18 @@ export const exchangeSchema = z
     fen: z.string().describe('The position with both gone.'),
     balance: z.array(balanceLineSchema),
     themes: bySide(count).describe('Themes whose balance moves towards each side.'),
-    points: bySide(z.number()).describe('What is said for and against each side, weighted and added up; only orders.'),
+    reasons: z
+      .array(
+        z.object({
+          id: z.string().describe('As in the sentences.'),
+          side: sideSchema,
+          good: z.boolean(),
+          times: z.int().min(1).describe('How many such sentences.'),
+          points: z.number().describe('What they add up to; below 0 where they speak against the side.'),
+        }),
+      )
+      .describe('What is said for and against each side, counted and weighed.'),
+    points: bySide(z.number()).describe('The points of the reasons of each side, added up; only orders.'),
     helps: sideSchema.nullable().describe('The side that the trade helps by those points; null: neither.'),
     sentences: z.array(differenceSentenceSchema),
   })

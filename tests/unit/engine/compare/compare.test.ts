@@ -98,6 +98,8 @@ describe('compare', () => {
     for (const [a, b] of pairs) {
       for (const { id, side, good, squares, facts } of compare(a, b).sentences) {
         const square = squares[0];
+        // What is of both sides is the name of the structure, which has no side to look at.
+        if (side === null) continue;
         if (id === 'weak-square-made')
           expect([holdOf(a, square, side), holdOf(b, square, side) !== undefined]).toEqual([undefined, true]);
         else if (id === 'now-en-prise') expect(b.men.find((man) => man.square === square)?.enPrise).toBe(facts.loses);
