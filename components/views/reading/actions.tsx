@@ -40,6 +40,9 @@ export function Actions({ state, act }: { readonly state: PageState; readonly ac
       <a href={`/routes?${new URLSearchParams({ fen: address.fen }).toString()}`} className={LINK}>
         Routes
       </a>
+      <a href={`/keep?${new URLSearchParams({ fen: address.fen }).toString()}`} className={LINK}>
+        Keep in a study
+      </a>
       <span className="flex items-center gap-x-2 text-[14px]">
         Figure:
         <a href={figure('svg')} download="waypost-plate.svg" className={LINK}>
