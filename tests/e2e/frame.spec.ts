@@ -48,7 +48,8 @@ test('an address where nothing is says so with 404', async ({ page }) => {
   expect(await screen.open()).toBe(404);
   await screen.expectAccessible();
   await page.getByRole('link', { name: 'Read a position' }).click();
-  await expect(page).toHaveURL('/');
+  // The first page writes its position into the address as soon as it is alive.
+  await expect(page).toHaveURL(({ pathname }) => pathname === '/');
 });
 
 test('each answer has its own nonce, and a script without it does not run', async ({ page, request }) => {
